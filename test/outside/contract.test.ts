@@ -1,0 +1,44 @@
+import { readFileSync } from 'node:fs';
+import { describe, expect, it } from 'vitest';
+import { parse } from 'yaml';
+import { answer } from '../../src/desk/answer.ts';
+
+/** Asks with hand-written expectations: fixtures/contract/asks.yaml. */
+interface Case {
+  readonly name: string;
+  readonly ask: unknown;
+  readonly expect?: Readonly<Record<string, unknown>>;
+  readonly near?: Readonly<Record<string, number>>;
+  readonly notes?: readonly string[];
+  readonly absent?: readonly string[];
+  readonly unordered?: readonly string[];
+}
+
+const cases = parse(readFileSync('fixtures/contract/asks.yaml', 'utf8')) as readonly Case[];
+
+/** The value at a dotted path of a JSON value, undefined where there is none. */
+const at = (value: unknown, path: string): unknown =>
+  path
+    .split('.')
+    .reduce<unknown>(
+      (inner, key) =>
+        typeof inner === 'object' && inner !== null ? (inner as Record<string, unknown>)[key] : undefined,
+      value,
+    );
+
+const sorted = (list: unknown): unknown =>
+  Array.isArray(list) ? list.map((item) => JSON.stringify(item)).sort() : list;
+
+describe('the contract, ask by ask', () => {
+  it.each(cases)('$name', ({ ask, expect: expected = {}, near = {}, notes = [], absent = [], unordered = [] }) => {
+    const given: unknown = JSON.parse(JSON.stringify(answer(ask)));
+    for (const path of unordered) expect(sorted(at(given, path))).toEqual(sorted(at(expected, path)));
+    if (unordered.length === 0) expect(given).toMatchObject(expected);
+    for (const [path, value] of Object.entries(near)) {
+      expect(Number(at(given, path)) / value, path).toBeCloseTo(1, 6);
+    }
+    const codes = at(given, 'notes');
+    for (const code of notes) expect(codes).toContainEqual(expect.objectContaining({ code }));
+    for (const path of absent) expect(at(given, path)).toBeUndefined();
+  });
+});
