@@ -151,9 +151,9 @@ const nullVector = (echelon: Echelon, free: number, columnCount: number): bigint
 export const transpose = (matrix: IntegerMatrix, columnCount: number): IntegerMatrix =>
   range(columnCount).map((column) => matrix.map((row) => entry(row, column)));
 
-/** A basis of { w : w matrix = 0 }: primitive whole vectors, one entry for each row. */
-export const leftNullSpace = (matrix: IntegerMatrix): bigint[][] =>
-  nullSpace(transpose(matrix, matrix[0]?.length ?? 0), matrix.length);
+/** A basis of { w : w matrix = 0 } for a matrix of `rowCount` rows: primitive whole vectors, one entry for each row. */
+export const leftNullSpace = (matrix: IntegerMatrix, rowCount: number = matrix.length): bigint[][] =>
+  nullSpace(transpose(matrix, matrix[0]?.length ?? 0), rowCount);
 
 /** `(x, y)` divided by the greatest common divisor of all entries of both. */
 export const primitivePair = (x: IntegerVector, y: IntegerVector): readonly [bigint[], bigint[]] => {
