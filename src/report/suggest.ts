@@ -3,8 +3,8 @@
  * Case counts. Row by row: `row[j]` is the distance between the first i letters of `a` and the first j of `b`.
  */
 export const editDistance = (a: string, b: string): number => {
-  const from = [...a];
-  const to = [...b];
+  const from = Array.from(a);
+  const to = Array.from(b);
   let before: readonly number[] = [];
   let above: readonly number[] = Array.from({ length: to.length + 1 }, (_, j) => j);
   from.forEach((letter, i) => {
