@@ -1,0 +1,73 @@
+import { lcmOf } from '../exact/integer.ts';
+import type { IntegerVector } from '../exact/matrix.ts';
+import { type Rational, ONE, denominatorOf, isWhole, rational } from '../exact/rational.ts';
+import type { Medium } from '../redox/medium.ts';
+import type { Species } from '../species/species.ts';
+import { helpersFor, lentTo } from './helper-ions.ts';
+import type { RepairKind } from './repair-kinds.ts';
+import { type Columns, type Draft, type DraftTerm, type Surplus, columnsOf, surplusOf } from './writing.ts';
+
+/** An equation that does not conserve, ready for the search of repairs. */
+export interface Problem {
+  readonly draft: Draft;
+  readonly medium: Medium | undefined;
+  /** Helpers that may have been forgotten. */
+  readonly helpers: readonly Species[];
+  readonly columns: Columns;
+  readonly surplus: Surplus;
+  /** Common denominator of the written numbers; a repair keeps to it. */
+  readonly denominator: bigint;
+}
+
+/** A repaired equation before it is ranked. */
+export interface Candidate {
+  readonly kind: RepairKind;
+  readonly draft: Draft;
+}
+
+/** Written fractions finer than this are rounded decimals: a repair does not keep to them. */
+const FINEST = 60n;
+
+const commonDenominator = (draft: Draft): bigint => {
+  const denominator = lcmOf(draft.map(({ coefficient }) => denominatorOf(coefficient)));
+  return denominator > FINEST ? 1n : denominator;
+};
+
+/** The problem that `draft` poses. */
+export const problemOf = (draft: Draft, medium: Medium | undefined): Problem => {
+  const columns = columnsOf([...draft.map(({ species }) => species), ...lentTo(draft, medium)]);
+  return {
+    draft,
+    medium,
+    helpers: helpersFor(draft, medium),
+    columns,
+    surplus: surplusOf(draft, columns),
+    denominator: commonDenominator(draft),
+  };
+};
+
+/** The column of a term, its sign that of its side: right counts, left takes away. */
+export const signedColumn = (
+  problem: Problem,
+  { species, side }: Pick<DraftTerm, 'species' | 'side'>,
+): IntegerVector => {
+  const column = problem.columns.of(species);
+  return side === 'right' ? column : column.map((value) => -value);
+};
+
+/** True where `value` is no finer a fraction than those that were written. */
+export const keepsToFractions = (value: Rational, { denominator }: Problem): boolean =>
+  isWhole(value.mul(rational(denominator)));
+
+/** A term that was not written. */
+export const addedTerm = (species: Species, side: DraftTerm['side'], coefficient: Rational = ONE): DraftTerm => ({
+  species,
+  side,
+  coefficient,
+  coefficientWritten: false,
+  origin: null,
+});
+
+/** True where both sides still have a term. */
+export const hasBothSides = (draft: Draft): boolean =>
+  draft.some(({ side }) => side === 'left') && draft.some(({ side }) => side === 'right');

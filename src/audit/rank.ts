@@ -1,0 +1,129 @@
+import type { Reaction } from '../balance/reaction.ts';
+import { plainReaction } from '../balance/reaction.ts';
+import { isConserved } from '../balance/recount.ts';
+import { type Rational, ONE } from '../exact/rational.ts';
+import { isElectron } from '../species/species.ts';
+import { type Change, changesOf } from './changes.ts';
+import { isHelper, isHydroxide, isProton } from './helper-ions.ts';
+import { isKnown } from './known.ts';
+import type { Candidate, Problem } from './problem.ts';
+import { EDIT_COSTS, IMPROBABLE, REPAIR_KINDS, type RepairKind, TIE } from './repair-kinds.ts';
+import { doublings } from './scale.ts';
+import { type Draft, type DraftTerm, reactionOf } from './writing.ts';
+
+/** A candidate with what its edits cost. */
+export interface Ranked {
+  readonly kind: RepairKind;
+  readonly reaction: Reaction;
+  readonly changes: readonly Change[];
+  readonly cost: number;
+  readonly improbable: boolean;
+}
+
+/** The candidates that conserve, each reaction once, the likeliest first and the improbable ones last. */
+export const ranked = (problem: Problem, candidates: readonly Candidate[]): readonly Ranked[] => {
+  const best = new Map<string, Ranked>();
+  for (const candidate of candidates) {
+    const one = rank(problem, candidate);
+    const text = plainReaction(one.reaction);
+    const other = best.get(text);
+    if (isConserved(one.reaction) && (other === undefined || before(one, other) < 0)) best.set(text, one);
+  }
+  return [...best.values()].sort(before);
+};
+
+const before = (a: Ranked, b: Ranked): number => {
+  const gap = a.cost - b.cost;
+  const byCost = Math.abs(gap) < TIE ? REPAIR_KINDS[a.kind].order - REPAIR_KINDS[b.kind].order : gap;
+  return Number(a.improbable) - Number(b.improbable) || byCost;
+};
+
+const rank = (problem: Problem, { kind, draft }: Candidate): Ranked => {
+  const changes = changesOf(problem.draft, draft);
+  const costs = changes.map((change) => costOf(problem, change));
+  const extra = addedHelpers(changes).length > 1 ? EDIT_COSTS.furtherHelper - EDIT_COSTS.helperAdded : 0;
+  return {
+    kind,
+    reaction: reactionOf(draft),
+    changes,
+    cost: kind === 'rounding' ? 0 : costs.reduce((sum, cost) => sum + cost, extra),
+    improbable: kind !== 'rounding' && isImprobable(problem.draft, draft, changes),
+  };
+};
+
+const addedHelpers = (changes: readonly Change[]): readonly DraftTerm[] =>
+  changes.flatMap((change) => (change.kind === 'added' && !isElectron(change.is.species) ? [change.is] : []));
+
+const costOf = (problem: Problem, change: Change): number => {
+  switch (change.kind) {
+    case 'number':
+      return numberCost(problem.draft, change.was, change.is);
+    case 'moved':
+      if (isElectron(change.was.species)) return EDIT_COSTS.electronMoved;
+      return isHelper(change.was.species, problem.medium) ? EDIT_COSTS.helperMoved : EDIT_COSTS.termMoved;
+    case 'respelled':
+      return respellingCost(problem, change.was, change.is);
+    case 'dropped':
+      if (isElectron(change.was.species)) return EDIT_COSTS.electronsDropped;
+      return isHelper(change.was.species, problem.medium) ? EDIT_COSTS.helperDropped : EDIT_COSTS.termDropped;
+    case 'added':
+      return isElectron(change.is.species) ? EDIT_COSTS.electronsAdded : EDIT_COSTS.helperAdded;
+  }
+};
+
+const isSkeleton = (draft: Draft): boolean => !draft.some(({ coefficientWritten }) => coefficientWritten);
+
+const numberCost = (draft: Draft, was: DraftTerm, is: DraftTerm): number => {
+  const far = EDIT_COSTS.perDoubling * doublings(was.coefficient, is.coefficient);
+  if (isSkeleton(draft)) return EDIT_COSTS.skeletonNumber + far;
+  return far + (was.coefficientWritten ? EDIT_COSTS.writtenNumber : EDIT_COSTS.unwrittenNumber);
+};
+
+const respellingCost = ({ medium }: Problem, was: DraftTerm, is: DraftTerm): number => {
+  if (isIonExchange(was, is)) {
+    const foreign = medium !== undefined && !medium.helpers.some(({ key }) => key === was.species.key);
+    return foreign ? EDIT_COSTS.foreignIonExchanged : EDIT_COSTS.ionExchanged;
+  }
+  const [before, after] = [isKnown(was.species), isKnown(is.species)];
+  const base = before
+    ? after
+      ? EDIT_COSTS.knownToKnown
+      : EDIT_COSTS.knownToUnknown
+    : after
+      ? EDIT_COSTS.unknownToKnown
+      : EDIT_COSTS.unknownToUnknown;
+  return base + EDIT_COSTS.perFurtherUnit * Math.max(0, distanceBetween(was, is) - 1);
+};
+
+const isIonExchange = (was: DraftTerm, is: DraftTerm): boolean =>
+  (isProton(was.species) && isHydroxide(is.species)) || (isHydroxide(was.species) && isProton(is.species));
+
+/** Atoms and charges by which two species differ. */
+const distanceBetween = ({ species: a }: DraftTerm, { species: b }: DraftTerm): number => {
+  const size = (value: Rational): number => Number(value.n) / Number(value.d);
+  let sum = size(a.charge.sub(b.charge));
+  for (const element of new Set([...a.composition.keys(), ...b.composition.keys()])) {
+    const here = a.composition.get(element) ?? ONE.sub(ONE);
+    sum += size(here.sub(b.composition.get(element) ?? ONE.sub(ONE)));
+  }
+  return sum;
+};
+
+/** A re-solve that leaves hardly a number standing, or protons and electrons brought in together. */
+const isImprobable = (written: Draft, draft: Draft, changes: readonly Change[]): boolean =>
+  bringsProtonsAndElectrons(changes) || (!isSkeleton(written) && isReSolve(written, draft, changes));
+
+const bringsProtonsAndElectrons = (changes: readonly Change[]): boolean => {
+  const ions = addedHelpers(changes).filter(({ species }) => species.charge.n !== 0n);
+  const electrons = changes.some((change) => change.kind === 'added' && isElectron(change.is.species));
+  return electrons && ions.length > 0;
+};
+
+const isReSolve = (written: Draft, draft: Draft, changes: readonly Change[]): boolean => {
+  const changed = changes.filter(({ kind }) => kind === 'number').length;
+  const grown = largest(draft).div(largest(written));
+  return changed > IMPROBABLE.share * written.length && grown.compare(IMPROBABLE.growth) > 0;
+};
+
+const largest = (draft: Draft): Rational =>
+  draft.reduce((most, { coefficient }) => (coefficient.compare(most) > 0 ? coefficient : most), ONE);
