@@ -1,0 +1,95 @@
+import { speciesMatrix } from '../balance/matrix.ts';
+import type { Numbers } from '../balance/solve.ts';
+import type { Unknown } from '../balance/unknowns.ts';
+import { type IntegerVector, nullSpace, range } from '../exact/matrix.ts';
+import { isElectron, plainSpecies } from '../species/species.ts';
+
+/** A balance and the assumption, in words, that singles it out. */
+export interface Assumed {
+  readonly assume: string;
+  readonly numbers: Numbers;
+}
+
+/** One condition  row nu = 0  on the numbers, in words without "if". */
+interface Condition {
+  readonly words: string;
+  readonly row: IntegerVector;
+}
+
+/** Conditions thought of, sets of them tried, balances given. */
+const MOST_CONDITIONS = 40;
+const MOST_TRIES = 400;
+const MOST_GIVEN = 12;
+
+/**
+ * The balances that `dimension` - 1 simple conditions single out and in which every species with a side takes part on
+ * it. Conditions, the first tried first: an unwritten helper takes no part (a later one before an earlier one, so that
+ * the order of the list is its preference); two products, or two reactants, go one to one; of a couple, the reactant
+ * gives its product one to one.
+ */
+export const assumedBalances = (unknowns: readonly Unknown[], dimension: number): readonly Assumed[] => {
+  const { rows } = speciesMatrix(unknowns.map((unknown) => unknown.species));
+  const found = new Map<string, Assumed>();
+  for (const conditions of choices(conditionsOn(unknowns), dimension - 1, MOST_TRIES)) {
+    if (found.size >= MOST_GIVEN) break;
+    const [line, second] = nullSpace([...rows, ...conditions.map(({ row }) => row)], unknowns.length);
+    const numbers = line === undefined || second !== undefined ? undefined : onTheirSides(unknowns, line);
+    if (numbers === undefined || found.has(numbers.join())) continue;
+    found.set(numbers.join(), { assume: `if ${conditions.map(({ words }) => words).join(' and ')}`, numbers });
+  }
+  return [...found.values()];
+};
+
+/** `line` or its opposite, whichever has every unknown with a side on it; undefined if neither. */
+export const onTheirSides = (unknowns: readonly Unknown[], line: Numbers): Numbers | undefined => {
+  const fits = (numbers: Numbers): boolean =>
+    unknowns.every(({ side }, index) => {
+      const nu = numbers[index] ?? 0n;
+      return side === 'free' || (side === 'left' ? nu < 0n : nu > 0n);
+    });
+  const opposite = line.map((value) => -value);
+  return fits(line) ? line : fits(opposite) ? opposite : undefined;
+};
+
+interface Standing {
+  readonly name: string;
+  readonly index: number;
+}
+
+const conditionsOn = (unknowns: readonly Unknown[]): readonly Condition[] => {
+  const standing = (side: Unknown['side']): readonly Standing[] =>
+    unknowns.flatMap((one, index) =>
+      one.side === side && !isElectron(one.species) ? [{ name: plainSpecies(one.species), index }] : [],
+    );
+  const row = (a: number, b: number | null, sign: bigint): IntegerVector =>
+    range(unknowns.length).map((index) => (index === a ? 1n : index === b ? sign : 0n));
+  const pairs = (all: readonly Standing[], verb: string): readonly Condition[] =>
+    all.flatMap((a, at) =>
+      all
+        .slice(at + 1)
+        .map((b) => ({ words: `${a.name} and ${b.name} ${verb} one to one`, row: row(a.index, b.index, -1n) })),
+    );
+  const without = standing('free').toReversed();
+  const [reactants, products] = [standing('left'), standing('right')];
+  const couples = reactants.flatMap((a) =>
+    products.map((b) => ({ words: `1 ${a.name} gives 1 ${b.name}`, row: row(a.index, b.index, 1n) })),
+  );
+  return [
+    ...without.map(({ name, index }) => ({ words: `${name} takes no part`, row: row(index, null, 0n) })),
+    ...pairs(products, 'form'),
+    ...pairs(reactants, 'are used'),
+    ...(couples.length === 1 ? couples : []),
+  ].slice(0, MOST_CONDITIONS);
+};
+
+/** The first `most` ways to choose `count` of `items`, in their order. */
+const choices = <T>(items: readonly T[], count: number, most: number): readonly (readonly T[])[] => {
+  if (count === 0) return [[]];
+  const found: (readonly T[])[] = [];
+  for (const [index, item] of items.entries()) {
+    if (found.length >= most) break;
+    const rest = choices(items.slice(index + 1), count - 1, most - found.length);
+    found.push(...rest.map((chosen) => [item, ...chosen]));
+  }
+  return found;
+};
