@@ -1,0 +1,38 @@
+import type { Answered } from '../desk/schema/answer.ts';
+import { amountsBlocks } from './amounts.ts';
+import { cellAuditBlocks, equationAuditBlocks } from './audit.ts';
+import { page } from './block.ts';
+import type { Look } from './look.ts';
+import { cellBlocks, halfBlocks, redoxBlocks } from './reactions.ts';
+import { cautionLines, noteLines } from './remarks.ts';
+import { equationBlocks, speciesBlocks } from './species.ts';
+
+/** What the answer is about, as the person wrote it: the equation of an audit, the species of amounts. */
+export interface Subject {
+  readonly text: string;
+}
+
+const blocksOf = (given: Answered, subject: Subject, look: Look): readonly (readonly string[])[] => {
+  switch (given.ask) {
+    case 'species':
+      return speciesBlocks(given.answer, look);
+    case 'equation':
+      return equationBlocks(given.answer, look);
+    case 'half':
+      return halfBlocks(given.answer, look);
+    case 'redox':
+      return redoxBlocks(given.answer, look);
+    case 'cell':
+      return cellBlocks(given.answer, look);
+    case 'audit':
+      return 'parts' in given.answer
+        ? cellAuditBlocks(given.answer, look)
+        : equationAuditBlocks(given.answer, subject.text, look);
+    case 'amounts':
+      return amountsBlocks(given.answer, subject.text, look);
+  }
+};
+
+/** An answer as a page of text for a person: the result, how it comes about, notes, cautions. */
+export const renderAnswer = (given: Answered, subject: Subject, look: Look): string =>
+  page([cautionLines(given.cautions, look), ...blocksOf(given, subject, look), noteLines(given.notes, look)]);

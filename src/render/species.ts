@@ -1,0 +1,44 @@
+import type { EquationAnswer, SpeciesAnswer } from '../desk/schema/answer.ts';
+import type { ShownSpecies } from '../desk/schema/shape.ts';
+import { labelled } from './block.ts';
+import { columns } from './columns.ts';
+import { quantityText } from './figure.ts';
+import type { Look } from './look.ts';
+import { speciesText } from './spelling.ts';
+
+const spelled = (species: ShownSpecies, look: Look): string =>
+  speciesText(species.plain, look) + (species.state === null ? '' : `(${species.state})`);
+
+const atoms = (species: ShownSpecies): string =>
+  Object.entries(species.composition)
+    .map(([element, count]) => `${element} ${count}`)
+    .join('   ');
+
+/** What a spelling was read as. */
+export const speciesBlocks = (answer: SpeciesAnswer, look: Look): readonly (readonly string[])[] => {
+  const { species, readings, molarMass, oxidationNumbers } = answer;
+  const others = readings.slice(1).map((reading) => spelled(reading, look));
+  const numbers = Object.entries(oxidationNumbers ?? {}).map(([element, list]) => `${element} ${list.join(', ')}`);
+  const rows: readonly (readonly [string, string])[] = [
+    ['atoms', atoms(species)],
+    ['charge', species.charge],
+    ...(molarMass === undefined ? [] : [['molar mass', quantityText(molarMass)] as const]),
+    ...(numbers.length === 0 ? [] : [['oxidation', numbers.join('   ')] as const]),
+    ...(others.length === 0 ? [] : [['or read as', others.join('   ')] as const]),
+  ];
+  return [[look.paint.strong(spelled(species, look))], labelled(rows, look)];
+};
+
+/** The terms of an equation as they were read. */
+export const equationBlocks = (answer: EquationAnswer, look: Look): readonly (readonly string[])[] => {
+  const side = (label: string, terms: EquationAnswer['left']): readonly (readonly string[])[] =>
+    terms.map(({ coefficient, species }, at) => [
+      at === 0 ? label : '',
+      coefficient,
+      spelled(species, look),
+      atoms(species),
+      species.charge === '0' ? '' : `charge ${species.charge}`,
+    ]);
+  const rows = [...side('left', answer.left), ...side('right', answer.right)];
+  return [columns(rows, ['left', 'right', 'left', 'left', 'left'])];
+};
