@@ -9,19 +9,34 @@ export const ONE: Rational = new Fraction(1n);
 /** The rational `numerator / denominator`; the denominator must not be 0. */
 export const rational = (numerator: bigint, denominator: bigint = 1n): Rational => new Fraction(numerator, denominator);
 
-/** The exact value of a decimal or fraction text that is known to be well formed: "0.35" is 7/20, "5/2" is 5/2. */
+const DECIMAL = String.raw`(\d+(?:\.\d*)?|\.\d+)`;
+const RATIONAL = new RegExp(`^([+-]?)${DECIMAL}(?:/${DECIMAL})?$`, 'u');
+
+/**
+ * The exact value of a decimal or of a fraction of decimals: "0.35" is 7/20, "-5/2", "1.5/4" is 3/8. Undefined for
+ * anything else, a division by 0 among it; there are no exponents, no inner blanks, no repeating decimals.
+ */
+export const readRational = (text: string): Rational | undefined => {
+  const match = RATIONAL.exec(text.trim());
+  if (match === null) return undefined;
+  const [, sign = '', numerator = '', denominator = '1'] = match;
+  const below = decimal(denominator);
+  if (isZero(below)) return undefined;
+  const size = decimal(numerator).div(below);
+  return sign === '-' ? size.neg() : size;
+};
+
+/** The exact value of a text that is known to be well formed; anything `readRational` refuses is a broken program. */
 export const rationalFromText = (text: string): Rational => {
-  const [numerator = '', denominator = '1'] = text.split('/');
-  return decimal(numerator).div(decimal(denominator));
+  const value = readRational(text);
+  if (value === undefined) throw new RangeError(`not an exact number: ${text}`);
+  return value;
 };
 
 /** Digits after the point become a power of ten below the line: no float, no repeating-decimal syntax. */
 const decimal = (text: string): Rational => {
-  const match = /^([+-]?)(\d*)(?:\.(\d*))?$/.exec(text.trim());
-  const [, sign = '', whole = '', part = ''] = match ?? [];
-  if (match === null || whole + part === '') throw new RangeError(`not a decimal: ${text}`);
-  const magnitude = new Fraction(BigInt(whole + part), 10n ** BigInt(part.length));
-  return sign === '-' ? magnitude.neg() : magnitude;
+  const [whole = '', part = ''] = text.split('.');
+  return new Fraction(BigInt(whole + part), 10n ** BigInt(part.length));
 };
 
 /** Numerator, with the sign. */
