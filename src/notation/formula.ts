@@ -5,6 +5,8 @@ export interface Atom {
   readonly kind: 'atom';
   readonly symbol: string;
   readonly massNumber: string | null;
+  /** Where the text says D or T; the nuclide is the same as ^2H or ^3H. */
+  readonly spelled?: 'D' | 'T';
   readonly count: Rational;
 }
 

@@ -1,0 +1,81 @@
+import moo from 'moo';
+import { ELEMENTS_BY_LENGTH } from './symbols.ts';
+
+/** Superscript, subscript and fullwidth forms and the plain character that each stands for. */
+const PLAIN_FORMS: ReadonlyMap<string, string> = new Map(
+  [...'⁰0¹1²2³3⁴4⁵5⁶6⁷7⁸8⁹9₀0₁1₂2₃3₄4₅5₆6₇7₈8₉9ₓxₙnₘm⁺+₊+⁻-₋-']
+    .map((form, at, all): readonly [string, string] => [form, all[at + 1] ?? form])
+    .filter((_, at) => at % 2 === 0),
+);
+
+/** The plain character behind a superscript or subscript form; any other text as it is. */
+export const plainForm = (text: string): string => PLAIN_FORMS.get(text) ?? text;
+
+/** Letters that are subscripts of unknown size without being declared: CuxS, CnH2n+2, YBa2Cu3O7-δ. */
+export const UNKNOWN_SUBSCRIPTS: readonly string[] = ['x', 'y', 'z', 'n', 'm', 'k', 'δ', 'ε', 'ξ'];
+
+/** Minus signs as typed and pasted: hyphen-minus, minus sign, hyphens, dashes, small and fullwidth hyphen-minus. */
+const MINUS_SIGNS = '\\-\\u2212\\u2010\\u2011\\u2012\\u2013\\u2014\\ufe63\\uff0d';
+
+/** States of the IUPAC Green Book (3rd ed., 2.10.1) and `ads`; the first of two that start alike is the longer. */
+export const STATES: readonly string[] = ['aq', 'am', 'ads', 'cd', 'cr', 'fl', 'lc', 'mon', 'pol', 'sln', 'vit', 'a', 's', 'l', 'g'];
+
+/** Spaces of every width that carry no meaning of their own, line ends included. */
+const SPACES = '[ \\t\\r\\n\\u00a0\\u2000-\\u200a\\u202f\\u205f\\u3000]+';
+
+const alternatives = (words: readonly string[]): string =>
+  [...words].sort((a, b) => b.length - a.length).join('|');
+
+/** Token types, tried in this order at each place. Every text lexes: what fits nowhere is a `stray`. */
+const rulesFor = (names: readonly string[], unknowns: readonly string[]): moo.Rules => ({
+  space: { match: new RegExp(SPACES, 'u'), lineBreaks: true },
+  state: {
+    match: new RegExp(`\\(\\s*(?:${alternatives(STATES)})\\s*(?:,[^()]*)?\\)`, 'u'),
+    lineBreaks: true,
+  },
+  ...(names.length === 0 ? {} : { name: new RegExp(alternatives(names), 'u') }),
+  element: new RegExp(alternatives(ELEMENTS_BY_LENGTH), 'u'),
+  unknown: {
+    match: new RegExp(`${alternatives([...unknowns, 'ₓ', 'ₙ', 'ₘ'])}`, 'u'),
+    value: plainForm,
+  },
+  electron: /e/u,
+  zero: /0/u,
+  digit: /[1-9]/u,
+  subZero: { match: /₀/u, value: plainForm },
+  subDigit: { match: /[₁-₉]/u, value: plainForm },
+  superZero: { match: /⁰/u, value: plainForm },
+  superDigit: { match: /[¹²³⁴-⁹]/u, value: plainForm },
+  superPlus: { match: /⁺/u, value: plainForm },
+  superMinus: { match: /⁻/u, value: plainForm },
+  subPlus: { match: /₊/u, value: plainForm },
+  subMinus: { match: /₋/u, value: plainForm },
+  plus: /\+/u,
+  minus: new RegExp(`[${MINUS_SIGNS}]`, 'u'),
+  caret: /\^/u,
+  roundOpen: /\(/u,
+  roundClose: /\)/u,
+  squareOpen: /\[/u,
+  squareClose: /\]/u,
+  curlyOpen: /\{/u,
+  curlyClose: /\}/u,
+  period: /\./u,
+  adduct: /[*·•∙⋅∗⸱・]/u,
+  slash: /[/⁄∕]/u,
+  arrowMark: /[↑↓]/u,
+  letters: /[A-Z][a-z]*|[a-z]+/u,
+  stray: { match: /[\s\S]/u, lineBreaks: true },
+});
+
+/** The lexer of species text without definitions. */
+export const lexer: moo.Lexer = moo.compile(rulesFor([], UNKNOWN_SUBSCRIPTS));
+
+/** A lexer that also knows these defined names and these unknown subscripts. */
+export const lexerWith = (names: readonly string[], unknowns: readonly string[]): moo.Lexer =>
+  moo.compile(rulesFor(names, [...new Set([...unknowns, ...UNKNOWN_SUBSCRIPTS])]));
+
+/** All tokens of `text`; offsets are UTF-16. The lexer is reset and drained at once, so no two texts meet in it. */
+export const tokensOf = (text: string, source: moo.Lexer = lexer): readonly moo.Token[] => {
+  source.reset(text);
+  return [...source];
+};
