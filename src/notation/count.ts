@@ -7,7 +7,10 @@ import { type CountSyntax, type NumberSyntax, type Summand, type SumSyntax, chai
 /** Values of unknown subscripts by name. */
 export type Unknowns = ReadonlyMap<string, Rational>;
 
-const textOf = (number: NumberSyntax): string => chainItems(number.tokens).map((token) => token.value).join('');
+const textOf = (number: NumberSyntax): string =>
+  chainItems(number.tokens)
+    .map((token) => token.value)
+    .join('');
 
 /** The value of a number as spelled. */
 export const numberValue = (number: NumberSyntax): Rational => {
@@ -33,7 +36,9 @@ const sumValue = (text: string, sum: SumSyntax, unknowns: Unknowns): Result<Rati
   const unset = values.find(isToken);
   if (unset !== undefined) {
     const message = `the subscript ${unset.value} has no value`;
-    return failure(faultAt(text, 'bad-count', placeOf(unset), message, `give it in where, as {"${unset.value}": "0.4"}`));
+    return failure(
+      faultAt(text, 'bad-count', placeOf(unset), message, `give it in where, as {"${unset.value}": "0.4"}`),
+    );
   }
   const total = values.filter((value): value is Rational => !isToken(value)).reduce((a, b) => a.add(b), ZERO);
   if (signOf(total) >= 0n) return success(total);

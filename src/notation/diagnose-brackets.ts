@@ -12,8 +12,20 @@ const CLOSING: ReadonlySet<string> = new Set(PARTNER.values());
 const strayClosing = (text: string, token: Token, open: Token | undefined): Fault => {
   const expected = open === undefined ? undefined : PARTNER.get(open.text);
   return expected === undefined
-    ? faultAt(text, 'bracket', placeOf(token), `${token.text} closes a bracket that was never opened`, 'open it or leave it out')
-    : faultAt(text, 'bracket', placeOf(token), `${token.text} stands where ${expected} was expected`, `write ${expected}`);
+    ? faultAt(
+        text,
+        'bracket',
+        placeOf(token),
+        `${token.text} closes a bracket that was never opened`,
+        'open it or leave it out',
+      )
+    : faultAt(
+        text,
+        'bracket',
+        placeOf(token),
+        `${token.text} stands where ${expected} was expected`,
+        `write ${expected}`,
+      );
 };
 
 /** The first bracket without a partner, or an empty pair; null where all brackets are in order. */
@@ -26,7 +38,13 @@ export const bracketFault = (text: string, tokens: readonly Token[]): Fault | nu
     const partner = open.pop();
     if (partner === undefined || PARTNER.get(partner.text) !== token.text) return strayClosing(text, token, partner);
     if (before === partner)
-      return faultAt(text, 'bracket', placeOf(partner, token), 'nothing stands in these brackets', 'fill them or leave them out');
+      return faultAt(
+        text,
+        'bracket',
+        placeOf(partner, token),
+        'nothing stands in these brackets',
+        'fill them or leave them out',
+      );
   }
   const unclosed = open.at(-1);
   if (unclosed === undefined) return null;

@@ -3,8 +3,7 @@ import type { Fault } from '../report/fault.ts';
 import { faultAt, isType, placeOf } from './place.ts';
 
 const HINT = 'write a charge as ^2+, ^- or ^3-';
-const isSign = (token: Token | undefined): token is Token =>
-  isType(token, 'plus', 'minus', 'superPlus', 'superMinus');
+const isSign = (token: Token | undefined): token is Token => isType(token, 'plus', 'minus', 'superPlus', 'superMinus');
 const isDigit = (token: Token | undefined): token is Token =>
   isType(token, 'digit', 'zero', 'superDigit', 'superZero', 'period', 'slash', 'curlyOpen', 'roundOpen');
 

@@ -31,12 +31,24 @@ export const countFault = (text: string, tokens: readonly Token[]): Fault | null
     const after = tokens[at + number.length];
     const last = number.at(-1) ?? token;
     if (at === 0)
-      return faultAt(text, 'bad-count', placeOf(token, last), 'a number stands before the formula', 'a species has no coefficient');
+      return faultAt(
+        text,
+        'bad-count',
+        placeOf(token, last),
+        'a number stands before the formula',
+        'a species has no coefficient',
+      );
     if (isType(after, 'plus', 'minus')) continue;
     const zero = zeroFault(text, number, token, before);
     if (zero !== null) return zero;
     if (last.type === 'period' && after === undefined)
-      return faultAt(text, 'bad-count', placeOf(last), 'nothing stands after the period', 'write digits or a formula after it');
+      return faultAt(
+        text,
+        'bad-count',
+        placeOf(last),
+        'nothing stands after the period',
+        'write digits or a formula after it',
+      );
   }
   return null;
 };

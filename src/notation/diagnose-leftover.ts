@@ -10,7 +10,14 @@ const LEFTOVERS: ReadonlyMap<string, readonly [PlainFaultCode, string, string]> 
   ['adduct', ['bad-count', 'a formula was expected on both sides of the dot', 'write adducts as CuSO4*5H2O']],
   ['period', ['bad-count', 'a formula or digits were expected after the period', 'write adducts as CuSO4*5H2O']],
   ['slash', ['bad-count', 'a fraction stands in brackets', 'write (1/2)']],
-  ['unknown', ['bad-count', 'an unknown subscript stands where none can be', 'write it after an atom or in brackets: Li(1-x)CoO2']],
+  [
+    'unknown',
+    [
+      'bad-count',
+      'an unknown subscript stands where none can be',
+      'write it after an atom or in brackets: Li(1-x)CoO2',
+    ],
+  ],
   ['electron', ['bad-charge', 'e stands for the electron, alone and with its charge', 'write e^-']],
 ]);
 

@@ -18,13 +18,28 @@ export const UNKNOWN_SUBSCRIPTS: readonly string[] = ['x', 'y', 'z', 'n', 'm', '
 const MINUS_SIGNS = '\\-\\u2212\\u2010\\u2011\\u2012\\u2013\\u2014\\ufe63\\uff0d';
 
 /** States of the IUPAC Green Book (3rd ed., 2.10.1) and `ads`; the first of two that start alike is the longer. */
-export const STATES: readonly string[] = ['aq', 'am', 'ads', 'cd', 'cr', 'fl', 'lc', 'mon', 'pol', 'sln', 'vit', 'a', 's', 'l', 'g'];
+export const STATES: readonly string[] = [
+  'aq',
+  'am',
+  'ads',
+  'cd',
+  'cr',
+  'fl',
+  'lc',
+  'mon',
+  'pol',
+  'sln',
+  'vit',
+  'a',
+  's',
+  'l',
+  'g',
+];
 
 /** Spaces of every width that carry no meaning of their own, line ends included. */
 const SPACES = '[ \\t\\r\\n\\u00a0\\u2000-\\u200a\\u202f\\u205f\\u3000]+';
 
-const alternatives = (words: readonly string[]): string =>
-  [...words].sort((a, b) => b.length - a.length).join('|');
+const alternatives = (words: readonly string[]): string => [...words].sort((a, b) => b.length - a.length).join('|');
 
 /** Token types, tried in this order at each place. Every text lexes: what fits nowhere is a `stray`. */
 const rulesFor = (names: readonly string[], unknowns: readonly string[]): moo.Rules => ({

@@ -14,6 +14,10 @@ export const LIMITS = {
   doubtfulPeriods: 5,
   /** Plus signs inside one species (charges, subscripts such as 2n+2). */
   plusSigns: 12,
+  /** Plus signs in a row of terms without spaces that may be charges as well. */
+  doubtfulSigns: 200,
+  /** Placements of plus signs that are told apart; two are enough to refuse. */
+  placements: 4,
   /** Species readings kept for reuse, and the length of a text worth keeping. */
   remembered: 2_000,
   rememberedLength: 200,

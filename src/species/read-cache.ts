@@ -1,15 +1,14 @@
 import { LIMITS } from '../notation/limits.ts';
-import type { Result } from '../report/result.ts';
-import type { SpeciesReading } from './read.ts';
+import type { KeptReading } from './read.ts';
 
 /**
  * Readings already made, the oldest use first. Reading is a pure function of its key, so that nothing can go stale, and
  * the number of entries is fixed: the same few species come again in every ask of a batch.
  */
-const readings = new Map<string, Result<SpeciesReading>>();
+const readings = new Map<string, KeptReading>();
 
 /** The reading under `key`, made by `read` at its first use. Texts beyond the length of a species are not kept. */
-export const remember = (key: string, read: () => Result<SpeciesReading>): Result<SpeciesReading> => {
+export const remember = (key: string, read: () => KeptReading): KeptReading => {
   const kept = readings.get(key);
   const reading = kept ?? read();
   if (key.length > LIMITS.rememberedLength) return reading;

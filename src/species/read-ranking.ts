@@ -63,7 +63,8 @@ const decideCharge = (charge: Reading, count: Reading): Decision => {
   const known = [charge, count].filter(({ species }) => isKnownIon(species));
   if (CONTESTED.has(plainSpecies(count.species)) || known.length === 2)
     return { first: 'neither', because: 'chemists differ' };
-  if (known.length === 1) return { first: known[0] === charge ? 'charge' : 'count', because: 'only that is a known ion' };
+  if (known.length === 1)
+    return { first: known[0] === charge ? 'charge' : 'count', because: 'only that is a known ion' };
   const last = lastMember(count.species);
   if (last !== undefined && hasSeveralDigits(last.count))
     return { first: 'charge', because: 'of several digits the last is the charge' };
@@ -103,7 +104,14 @@ const sortPair = (readings: readonly Reading[]): Ranking => {
   const charge = same.find(takesCharge);
   const count = same.find((reading) => !takesCharge(reading));
   if (charge === undefined || count === undefined)
-    return { readings: ordered, contested: false, because: best !== undefined && dotsOf(best) > 0 ? 'what follows the period is a molecule that adducts hold' : 'a period between digits is a decimal point' };
+    return {
+      readings: ordered,
+      contested: false,
+      because:
+        best !== undefined && dotsOf(best) > 0
+          ? 'what follows the period is a molecule that adducts hold'
+          : 'a period between digits is a decimal point',
+    };
   const { first, because } = decideCharge(charge, count);
   const chosen = first === 'charge' ? charge : count;
   const others = ordered.filter((reading) => reading !== chosen);

@@ -56,7 +56,13 @@ const distinct = (readings: readonly Reading[]): readonly Reading[] => [
 const severalReadings = (text: string, species: readonly Species[]): Result<never> => {
   const readings = species.map(plainSpecies);
   const message = `${text.trim()} can be read as ${readings.join(' or ')}`;
-  return failure({ code: 'several-readings', message, span: wholeSpan(text), hint: 'write the charge with a caret', readings });
+  return failure({
+    code: 'several-readings',
+    message,
+    span: wholeSpan(text),
+    hint: 'write the charge with a caret',
+    readings,
+  });
 };
 
 const notesOn = (text: string, ranking: Ranking, chosen: Reading): readonly Note[] => {
@@ -67,7 +73,8 @@ const notesOn = (text: string, ranking: Ranking, chosen: Reading): readonly Note
     notes.push(note('reading-chosen', `${taken}: ${ranking.because ?? ''}; it could also be ${others.join(' or ')}`));
   }
   const remark = remarkOf(chosen.syntax.state);
-  if (remark !== null) notes.push(note('remark-dropped', `the remark ${remark} after ${plainSpecies(chosen.species)} was dropped`));
+  if (remark !== null)
+    notes.push(note('remark-dropped', `the remark ${remark} after ${plainSpecies(chosen.species)} was dropped`));
   return notes;
 };
 
@@ -75,24 +82,37 @@ const choose = (text: string, strict: boolean, readings: readonly Reading[]): Re
   const ranking = rankReadings(distinct(readings));
   const species = ranking.readings.map((reading) => reading.species);
   const [chosen] = ranking.readings;
-  if (chosen === undefined || ranking.contested || (strict && species.length > 1)) return severalReadings(text, species);
+  if (chosen === undefined || ranking.contested || (strict && species.length > 1))
+    return severalReadings(text, species);
   return success({ species: chosen.species, readings: species }, notesOn(text, ranking, chosen));
 };
 
-const readAnew = (text: string, options: ReadingOptions): Result<SpeciesReading> =>
-  chain(chain(parseSpecies(text, lexerFor(options)), buildReadings(text, options)), (readings) =>
-    choose(text, options.strict === true, readings),
-  );
+/** One spelling as kept for reuse: whether it parses at all, and what reading makes of it. */
+export interface KeptReading {
+  readonly spells: boolean;
+  readonly result: Result<SpeciesReading>;
+}
+
+const readAnew = (text: string, options: ReadingOptions): KeptReading => {
+  const parsed = parseSpecies(text, lexerFor(options));
+  const readings = chain(parsed, buildReadings(text, options));
+  return { spells: parsed.ok, result: chain(readings, (built) => choose(text, options.strict === true, built)) };
+};
 
 const signatureOf = ({ where = NO_UNKNOWNS, define, strict }: ReadingOptions): string => {
   const values = [...where].map(([name, value]) => `${name}=${showRational(value)}`).sort();
   return `${strict === true ? 's' : ''}|${values.join(',')}|${define?.signature ?? ''}`;
 };
 
+const kept = (text: string, options: ReadingOptions): KeptReading =>
+  remember(`${signatureOf(options)}|${text}`, () => readAnew(text, options));
+
+/** True where `text` parses as a species, whatever a closer look finds. */
+export const spells = (text: string, options: ReadingOptions): boolean => kept(text, options).spells;
+
 /**
  * The species that `text` spells, with all its readings. Notes: `reading-chosen`, `remark-dropped`. Faults: the codes of
  * reading with their span in code points of `text`, `several-readings`, `too-hard`.
  */
 export const readSpecies = (text: string, options: ReadingOptions = {}): Result<SpeciesReading> =>
-  remember(`${signatureOf(options)}|${text}`, () => readAnew(text, options));
-
+  kept(text, options).result;

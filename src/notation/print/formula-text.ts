@@ -33,7 +33,8 @@ const memberKey = (member: Member): string => {
   return `(${membersKey(member.members)})${countText(member.count)}`;
 };
 
-const nuclideKey = ({ massNumber, symbol }: Atom): string => (massNumber === null ? symbol : `{${massNumber}${symbol}}`);
+const nuclideKey = ({ massNumber, symbol }: Atom): string =>
+  massNumber === null ? symbol : `{${massNumber}${symbol}}`;
 
 /** Members of a bracket that only wraps another bracket or everything are those of the inner one. */
 const membersKey = (members: readonly Member[]): string => {
