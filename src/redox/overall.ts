@@ -1,0 +1,109 @@
+import { explain } from '../balance/explain.ts';
+import { type Reaction, showReaction } from '../balance/reaction.ts';
+import type { Numbers } from '../balance/solve.ts';
+import { type Rational, showRational } from '../exact/rational.ts';
+import type { Note } from '../report/note.ts';
+import { type Result, chain, failure, success } from '../report/result.ts';
+import type { Equation } from '../species/equation.ts';
+import { isElectron } from '../species/species.ts';
+import { assumedBalances } from './assume.ts';
+import { type Attempt, attempt, finish, notesOf } from './attempt.ts';
+import { type MediumChoice, chooseMedium } from './choose-medium.ts';
+import type { Medium } from './medium.ts';
+import { nameCouplings } from './name-coupling.ts';
+import { pairHalves } from './pairs.ts';
+import { settled, severalBalances } from './several.ts';
+
+/** One way to settle a redox skeleton: an oxidation paired with a reduction, or a simple ratio. */
+export interface Coupling {
+  readonly assume: string;
+  readonly overall: Reaction;
+  /** Exchanged between the halves at the scale of `overall`. */
+  readonly electrons: Rational;
+  /** Each whole and primitive, with its electrons; null where a ratio was assumed. */
+  readonly halves: { readonly oxidation: Reaction; readonly reduction: Reaction } | null;
+}
+
+/** An overall reaction in lowest whole numbers, recounted, before it is split into halves. */
+export interface OverallBalance {
+  readonly reaction: Reaction;
+  readonly dimension: number;
+  readonly medium: Medium;
+  /** The coupling that `settle` named; null where conservation alone gives the reaction. */
+  readonly coupling: Coupling | null;
+}
+
+/** What an overall reaction exchanges, where its halves are not known; undefined where that cannot be told. */
+export type ElectronCount = (reaction: Reaction) => Rational | undefined;
+
+/**
+ * The overall reaction of a redox skeleton. `settle` is the `assume` text of one of the couplings that
+ * `several-balances` gave; `countElectrons` serves couplings without halves, which are left out without it.
+ * Faults: `unknown-medium`, `bad-ask` (e^- written, both H^+ and OH^- without a medium, unknown assumption),
+ * `missing-element`, `several-balances` (or `too-hard`), `no-balance`, `wrong-side`, `idle-species`.
+ */
+export const balanceOverall = (
+  skeleton: Equation,
+  choice: MediumChoice,
+  settle?: string,
+  countElectrons?: ElectronCount,
+): Result<OverallBalance> =>
+  chain(withoutElectrons(skeleton), () =>
+    chain(chooseMedium(choice, skeleton), (medium) =>
+      balance(attempt(skeleton, medium, false), settle, countElectrons ?? ((): undefined => undefined)),
+    ),
+  );
+
+const withoutElectrons = (skeleton: Equation): Result<Equation> => {
+  const term = [...skeleton.left, ...skeleton.right].find(({ species }) => isElectron(species));
+  if (term === undefined) return success(skeleton);
+  return failure({
+    code: 'bad-ask',
+    span: term.span,
+    message: 'An overall reaction has no e^-: its electrons pass from one species to the other.',
+    hint: 'Leave e^- out, or ask for a half-reaction.',
+  });
+};
+
+const balance = (tried: Attempt, settle: string | undefined, count: ElectronCount): Result<OverallBalance> => {
+  const { verdict, unknowns, medium } = tried;
+  if (verdict.kind !== 'unique' && verdict.kind !== 'family') return failure(explain(verdict, unknowns));
+  const found = (reaction: Reaction, coupling: Coupling | null, notes: readonly Note[]): Result<OverallBalance> =>
+    success({ reaction, dimension: verdict.dimension, medium, coupling }, [...notesOf(tried, reaction), ...notes]);
+  if (verdict.kind === 'unique') return found(finish(tried, verdict.numbers), null, []);
+  const couplings = couplingsOf(tried, verdict.dimension, count);
+  if (settle === undefined) return severalBalances(tried, verdict.dimension, couplings.map(showCoupling));
+  return chain(
+    settled(couplings, settle, (one) => one.overall),
+    ({ choice, reaction, notes }) => found(reaction, choice, notes),
+  );
+};
+
+/** Each way of pairing one oxidation with one reduction; where there is none, simple ratios. */
+const couplingsOf = (tried: Attempt, dimension: number, count: ElectronCount): readonly Coupling[] => {
+  const paired = pairedCouplings(tried);
+  if (paired.length > 0) return paired;
+  return assumedBalances(tried.unknowns, dimension).flatMap(({ assume, numbers }) => {
+    const overall = finish(tried, numbers);
+    const electrons = count(overall);
+    return electrons === undefined ? [] : [{ assume, overall, electrons, halves: null }];
+  });
+};
+
+const pairedCouplings = (tried: Attempt): readonly Coupling[] => {
+  const pairing = pairHalves(tried.unknowns);
+  const names = nameCouplings(pairing);
+  const reaction = (numbers: Numbers): Reaction => finish({ ...tried, unknowns: pairing.unknowns }, numbers);
+  return pairing.pairs.map((pair, index) => ({
+    assume: names[index] ?? '',
+    overall: reaction(pair.overall),
+    electrons: pair.electrons,
+    halves: { oxidation: reaction(pair.oxidation), reduction: reaction(pair.reduction) },
+  }));
+};
+
+const showCoupling = (coupling: Coupling): Parameters<typeof severalBalances>[2][number] => ({
+  assume: coupling.assume,
+  overall: showReaction(coupling.overall),
+  electrons: showRational(coupling.electrons),
+});
