@@ -3,9 +3,9 @@ import { ELEMENTS_BY_LENGTH } from './symbols.ts';
 
 /** Superscript, subscript and fullwidth forms and the plain character that each stands for. */
 const PLAIN_FORMS: ReadonlyMap<string, string> = new Map(
-  [...'⁰0¹1²2³3⁴4⁵5⁶6⁷7⁸8⁹9₀0₁1₂2₃3₄4₅5₆6₇7₈8₉9ₓxₙnₘm⁺+₊+⁻-₋-']
-    .map((form, at, all): readonly [string, string] => [form, all[at + 1] ?? form])
-    .filter((_, at) => at % 2 === 0),
+  '⁰0 ¹1 ²2 ³3 ⁴4 ⁵5 ⁶6 ⁷7 ⁸8 ⁹9 ₀0 ₁1 ₂2 ₃3 ₄4 ₅5 ₆6 ₇7 ₈8 ₉9 ₓx ₙn ₘm ⁺+ ₊+ ⁻- ₋-'
+    .split(' ')
+    .map((pair): readonly [string, string] => [pair.slice(0, 1), pair.slice(1)]),
 );
 
 /** The plain character behind a superscript or subscript form; any other text as it is. */
@@ -51,7 +51,7 @@ const rulesFor = (names: readonly string[], unknowns: readonly string[]): moo.Ru
   ...(names.length === 0 ? {} : { name: new RegExp(alternatives(names), 'u') }),
   element: new RegExp(alternatives(ELEMENTS_BY_LENGTH), 'u'),
   unknown: {
-    match: new RegExp(`${alternatives([...unknowns, 'ₓ', 'ₙ', 'ₘ'])}`, 'u'),
+    match: new RegExp(alternatives([...unknowns, 'ₓ', 'ₙ', 'ₘ']), 'u'),
     value: plainForm,
   },
   electron: /e/u,

@@ -1,4 +1,3 @@
-import type { Lexer } from 'moo';
 import type { Member } from '../notation/formula.ts';
 
 /** Names that stand for formulas in one ask. Made by `readDefinitions` only. */
@@ -6,9 +5,7 @@ export interface Definitions {
   /** The members that each name stands for. */
   readonly members: ReadonlyMap<string, readonly Member[]>;
   /** The canonical spelling of each name with its charge: "EDTA^4-". */
-  readonly spellings: readonly string[];
+  readonly spellings: ReadonlySet<string>;
   /** Equal where the definitions are equal: the key under which readings are kept. */
   readonly signature: string;
-  /** A lexer that knows the names. */
-  readonly lexer: Lexer;
 }

@@ -1,17 +1,30 @@
-import { IONS_TEXT } from './ions-table.ts';
+import { ION_GROUPS } from './ions-table.ts';
 import type { Species } from './species.ts';
 
-/** Plain spellings of the known ions, in the order of the table. */
-export const KNOWN_IONS: readonly string[] = [...new Set(IONS_TEXT.split(/\s+/u).filter((word) => word !== ''))];
+const spellingsOf = (text: string): readonly string[] => text.split(' ');
 
-/** A spelling without an outer pair of square brackets, round inside: how a species' key writes it. */
-const keyOf = (spelling: string): string =>
-  spelling
-    .replace(/^\[(.*)\](\^.*)$/u, '$1$2')
-    .replaceAll('[', '(')
-    .replaceAll(']', ')');
+/** Plain spellings of the known ions, in the order of the table, nuclides left out. */
+export const KNOWN_IONS: readonly string[] = [...new Set(Object.values(ION_GROUPS).flatMap(spellingsOf))].filter(
+  (spelling) => !spelling.includes('{'),
+);
 
-const KEYS: ReadonlySet<string> = new Set(KNOWN_IONS.map(keyOf));
+const KEYS: ReadonlySet<string> = new Set(Object.values(ION_GROUPS).flatMap(spellingsOf));
 
-/** True where the table of ions holds this species; state and bracket shapes do not matter. */
+/** True where the table of ions holds this species; its state and the shapes of its brackets do not matter. */
 export const isKnownIon = (species: Species): boolean => KEYS.has(species.key);
+
+/** Letters, digits and signs alone, all small: what is left of a spelling when case, brackets and carets are forgotten. */
+const skeletonOf = (text: string): string =>
+  text
+    .normalize('NFKC')
+    .toLowerCase()
+    .replaceAll(/[−‐‑–—]/gu, '-')
+    .replaceAll(/[^a-z0-9+-]/gu, '');
+
+const BY_SKELETON: ReadonlyMap<string, readonly string[]> = KNOWN_IONS.reduce(
+  (known, ion) => known.set(skeletonOf(ion), [...(known.get(skeletonOf(ion)) ?? []), ion]),
+  new Map<string, readonly string[]>(),
+);
+
+/** Known ions that differ from `text` in capital and small letters, brackets or carets only: `Mno4-` is near MnO4^-. */
+export const ionsNear = (text: string): readonly string[] => BY_SKELETON.get(skeletonOf(text)) ?? [];

@@ -3,7 +3,6 @@ import { isWhole } from '../exact/rational.ts';
 import type { Formula, Member } from '../notation/formula.ts';
 import { type SpeciesSyntax, chainItems } from '../notation/syntax.ts';
 import { isAdductMolecule } from './adducts.ts';
-import { isKnownIon } from './ions.ts';
 import { type Species, plainSpecies } from './species.ts';
 
 /** One reading of a spelling: what was parsed and the species it makes. */
@@ -11,6 +10,9 @@ export interface Reading {
   readonly syntax: SpeciesSyntax;
   readonly species: Species;
 }
+
+/** True for a species of the table of ions or of the ask's definitions. */
+export type IsKnown = (species: Species) => boolean;
 
 /** How the readings of one spelling were put in order: chosen first, or `contested` where nobody can say. */
 export interface Ranking {
@@ -59,8 +61,8 @@ const isSingleElement = (parts: Formula): boolean =>
 type Decision = { readonly first: 'charge' | 'count' | 'neither'; readonly because: string };
 
 /** Between the charge reading and the count reading of one spelling. */
-const decideCharge = (charge: Reading, count: Reading): Decision => {
-  const known = [charge, count].filter(({ species }) => isKnownIon(species));
+const decideCharge = (charge: Reading, count: Reading, isKnown: IsKnown): Decision => {
+  const known = [charge, count].filter(({ species }) => isKnown(species));
   if (CONTESTED.has(plainSpecies(count.species)) || known.length === 2)
     return { first: 'neither', because: 'chemists differ' };
   if (known.length === 1)
@@ -97,7 +99,7 @@ const byPeriods = (readings: readonly Reading[]): readonly Reading[] => {
   return readings.toSorted((a, b) => weight(a) - weight(b));
 };
 
-const sortPair = (readings: readonly Reading[]): Ranking => {
+const sortPair = (readings: readonly Reading[], isKnown: IsKnown): Ranking => {
   const ordered = byPeriods(readings);
   const [best] = ordered;
   const same = ordered.filter((reading) => best !== undefined && dotsOf(reading) === dotsOf(best));
@@ -112,15 +114,15 @@ const sortPair = (readings: readonly Reading[]): Ranking => {
           ? 'what follows the period is a molecule that adducts hold'
           : 'a period between digits is a decimal point',
     };
-  const { first, because } = decideCharge(charge, count);
+  const { first, because } = decideCharge(charge, count, isKnown);
   const chosen = first === 'charge' ? charge : count;
   const others = ordered.filter((reading) => reading !== chosen);
   return { readings: [chosen, ...others], contested: first === 'neither', because };
 };
 
-/** The readings of one spelling in order of preference, by the table above. */
-export const rankReadings = (readings: readonly Reading[]): Ranking => {
+/** The readings of one spelling in order of preference, by the table above. `isKnown`: the ion has a name of its own. */
+export const rankReadings = (readings: readonly Reading[], isKnown: IsKnown): Ranking => {
   const sensible = readings.filter((reading) => !writesOneBeforeDot(reading));
   const kept = sensible.length === 0 ? readings : sensible;
-  return kept.length < 2 ? { readings: kept, contested: false, because: null } : sortPair(kept);
+  return kept.length < 2 ? { readings: kept, contested: false, because: null } : sortPair(kept, isKnown);
 };

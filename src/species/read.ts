@@ -8,8 +8,10 @@ import type { SpeciesSyntax } from '../notation/syntax.ts';
 import { type Note, note } from '../report/note.ts';
 import { type Result, all, chain, failure, success } from '../report/result.ts';
 import { wholeSpan } from '../report/span.ts';
+import { didYouMean } from '../report/suggest.ts';
 import type { Definitions } from './definitions.ts';
 import { buildSpecies } from './read-build.ts';
+import { ionsNear, isKnownIon } from './ions.ts';
 import { remember } from './read-cache.ts';
 import { type Ranking, type Reading, rankReadings } from './read-ranking.ts';
 import { type Species, plainSpecies, plainWithState } from './species.ts';
@@ -78,11 +80,13 @@ const notesOn = (text: string, ranking: Ranking, chosen: Reading): readonly Note
   return notes;
 };
 
-const choose = (text: string, strict: boolean, readings: readonly Reading[]): Result<SpeciesReading> => {
-  const ranking = rankReadings(distinct(readings));
+const choose = (text: string, options: ReadingOptions, readings: readonly Reading[]): Result<SpeciesReading> => {
+  const isKnown = (species: Species): boolean =>
+    isKnownIon(species) || options.define?.spellings.has(plainSpecies(species)) === true;
+  const ranking = rankReadings(distinct(readings), isKnown);
   const species = ranking.readings.map((reading) => reading.species);
   const [chosen] = ranking.readings;
-  if (chosen === undefined || ranking.contested || (strict && species.length > 1))
+  if (chosen === undefined || ranking.contested || (options.strict === true && species.length > 1))
     return severalReadings(text, species);
   return success({ species: chosen.species, readings: species }, notesOn(text, ranking, chosen));
 };
@@ -93,10 +97,17 @@ export interface KeptReading {
   readonly result: Result<SpeciesReading>;
 }
 
+/** A letter fault with the ion that was meant, where the whole text differs from one in case only. */
+const withIonMeant = <T>(text: string, result: Result<T>): Result<T> => {
+  if (result.ok || result.fault.code !== 'unknown-element') return result;
+  const hint = didYouMean(ionsNear(text));
+  return hint === undefined ? result : failure({ ...result.fault, hint });
+};
+
 const readAnew = (text: string, options: ReadingOptions): KeptReading => {
-  const parsed = parseSpecies(text, lexerFor(options));
+  const parsed = withIonMeant(text, parseSpecies(text, lexerFor(options)));
   const readings = chain(parsed, buildReadings(text, options));
-  return { spells: parsed.ok, result: chain(readings, (built) => choose(text, options.strict === true, built)) };
+  return { spells: parsed.ok, result: chain(readings, (built) => choose(text, options, built)) };
 };
 
 const signatureOf = ({ where = NO_UNKNOWNS, define, strict }: ReadingOptions): string => {
