@@ -1,11 +1,11 @@
 import { isZero, signOf } from '../exact/rational.ts';
 import { type Species, ELECTRON, isElectron } from '../species/species.ts';
 import { isHydroxide, isProton } from './helper-ions.ts';
-import { type Candidate, type Problem, addedTerm, signedColumn } from './problem.ts';
+import { type Candidate, type Problem, addedTerm } from './problem.ts';
 import type { RepairKind } from './repair-kinds.ts';
 import { bestScales } from './scale.ts';
-import { completion, ray } from './solve.ts';
-import type { Draft, DraftTerm } from './writing.ts';
+import { balancesOf, completion, onlyOne } from './solve.ts';
+import { type Draft, type DraftTerm, signedColumn } from './writing.ts';
 
 /** Classes 4 and 5: helpers of the medium or electrons that were forgotten. */
 export const additions = (problem: Problem): readonly Candidate[] =>
@@ -43,8 +43,9 @@ const additionOf = (problem: Problem, species: readonly Species[]): readonly Can
 /** The only balance of the written species with `species`, if it keeps every written one on its side. */
 const resolvedWith = (problem: Problem, species: readonly Species[], kind: RepairKind): readonly Candidate[] => {
   const count = problem.draft.length;
-  const signed = problem.draft.map((term) => signedColumn(problem, term));
-  const found = ray([...signed, ...species.map((one) => problem.columns.of(one))], problem.columns.rowCount);
+  const signed = problem.draft.map((term) => signedColumn(problem.columns, term));
+  const columns = [...signed, ...species.map((one) => problem.columns.of(one))];
+  const found = onlyOne(balancesOf(columns, problem.columns.rowCount));
   if (found === null) return [];
   const numbers = (found[0] ?? 0n) < 0n ? found.map((value) => -value) : found;
   if (!numbers.every((value, index) => (index < count ? value > 0n : value !== 0n))) return [];

@@ -1,10 +1,10 @@
 import { HYDROXIDE, PROTON } from '../redox/media.ts';
 import { OXONIUM, isHydroxide, isProton } from './helper-ions.ts';
 import type { Species } from '../species/species.ts';
-import { type Candidate, type Problem, signedColumn } from './problem.ts';
-import { onRay, upright } from './renumber.ts';
-import { ray } from './solve.ts';
-import { type Draft, isConserved, surplusOf } from './writing.ts';
+import type { Candidate, Problem } from './problem.ts';
+import { onRay } from './renumber.ts';
+import { balancesOf, onlyOne } from './solve.ts';
+import { type Draft, isConserved, signedColumn, surplusOf } from './writing.ts';
 
 /** Class 3: H^+ typed for OH^- or back, the numbers kept where they then conserve, else solved anew. */
 export const exchanges = (problem: Problem): readonly Candidate[] =>
@@ -24,10 +24,11 @@ const exchangeAt = (problem: Problem, index: number, species: Species): readonly
     at === index ? { ...term, species: { ...species, state: term.species.state } } : term,
   );
   if (isConserved(surplusOf(draft, problem.columns))) return [{ kind: 'medium-ion', draft }];
-  const numbers = ray(
-    draft.map((term) => signedColumn(problem, term)),
+  const balances = balancesOf(
+    draft.map((term) => signedColumn(problem.columns, term)),
     problem.columns.rowCount,
   );
-  if (numbers === null || !upright(numbers).every((value) => value > 0n)) return [];
-  return onRay(problem, draft, upright(numbers), 'medium-ion');
+  const numbers = onlyOne(balances);
+  if (numbers?.every((value) => value > 0n) !== true) return [];
+  return onRay(problem, draft, numbers, 'medium-ion');
 };

@@ -1,6 +1,6 @@
 import { type Rational, isZero, showRational } from '../exact/rational.ts';
 import { type Species, isElectron } from '../species/species.ts';
-import { knownSpecies } from './known-species.ts';
+import { commonSpecies, rareSpellings } from './known-species.ts';
 
 /** Atoms and charge number as one text, elements in the order of the alphabet. */
 export const contentsOf = (composition: ReadonlyMap<string, Rational>, charge: Rational): string => {
@@ -11,31 +11,40 @@ export const contentsOf = (composition: ReadonlyMap<string, Rational>, charge: R
   return `${atoms.join(' ')} ${showRational(charge)}`;
 };
 
+/** True where two species hold the same atoms and charge, however spelled. */
+export const sameContents = (a: Species, b: Species): boolean =>
+  contentsOf(a.composition, a.charge) === contentsOf(b.composition, b.charge);
+
 interface KnownIndex {
-  readonly keys: ReadonlySet<string>;
-  readonly byContents: ReadonlyMap<string, readonly Species[]>;
+  readonly common: ReadonlyMap<string, readonly Species[]>;
+  readonly rare: ReadonlySet<string>;
 }
 
-const indexOf = (species: readonly Species[]): KnownIndex => {
-  const byContents = new Map<string, Species[]>();
-  for (const one of species) {
+const indexed = (): KnownIndex => {
+  const common = new Map<string, Species[]>();
+  for (const one of commonSpecies()) {
     const contents = contentsOf(one.composition, one.charge);
-    byContents.set(contents, [...(byContents.get(contents) ?? []), one]);
+    common.set(contents, [...(common.get(contents) ?? []), one]);
   }
-  return { keys: new Set(species.map(({ key }) => key)), byContents };
+  return { common, rare: rareSpellings() };
 };
 
 let index: KnownIndex | undefined;
 
-/** The table of known ions and common substances, indexed the first time it is asked. */
-const known = (): KnownIndex => (index ??= indexOf(knownSpecies()));
+/** The tables, indexed the first time they are asked. */
+const tables = (): KnownIndex => (index ??= indexed());
 
-/** True for what stands in the table of known ions and common substances, however spelled, and for the electron. */
-export const isKnown = (species: Species): boolean =>
-  isElectron(species) ||
-  known().keys.has(species.key) ||
-  known().byContents.has(contentsOf(species.composition, species.charge));
+/** How well a species is known: in the tables, in them as rare, not in them and charged, or not in them. */
+export type Familiarity = 'common' | 'rare' | 'unlisted-ion' | 'unlisted';
 
-/** The known species with these atoms and this charge number. */
-export const knownWith = (composition: ReadonlyMap<string, Rational>, charge: Rational): readonly Species[] =>
-  known().byContents.get(contentsOf(composition, charge)) ?? [];
+/** How well `species` is known, however spelled. A missing neutral species says little: no table holds them all. */
+export const familiarityOf = (species: Species): Familiarity => {
+  const contents = contentsOf(species.composition, species.charge);
+  if (isElectron(species) || tables().common.has(contents)) return 'common';
+  if (tables().rare.has(species.key)) return 'rare';
+  return isZero(species.charge) ? 'unlisted' : 'unlisted-ion';
+};
+
+/** The common species with these atoms and this charge number. */
+export const commonWith = (composition: ReadonlyMap<string, Rational>, charge: Rational): readonly Species[] =>
+  tables().common.get(contentsOf(composition, charge)) ?? [];

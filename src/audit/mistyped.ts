@@ -2,7 +2,7 @@ import { type Rational, ZERO, isWhole, isZero, signOf } from '../exact/rational.
 import { type Species, isElectron, plainSpecies } from '../species/species.ts';
 import { CHARGE } from '../balance/matrix.ts';
 import { editDistance } from '../report/suggest.ts';
-import { isKnown, knownWith } from './known.ts';
+import { commonWith, familiarityOf, sameContents } from './known.ts';
 import type { Candidate, Problem } from './problem.ts';
 import { withCharge, withOneSubscript } from './respell.ts';
 import type { DraftTerm } from './writing.ts';
@@ -22,7 +22,7 @@ export const respellings = (problem: Problem, residual: ReadonlyMap<string, Rati
     isElectron(term.species)
       ? []
       : meant(term, residual)
-          .filter((species) => !problem.draft.some((other) => other.species.key === species.key))
+          .filter((species) => !problem.draft.some((other) => sameContents(other.species, species)))
           .map((species) => ({
             kind: 'species' as const,
             draft: problem.draft.map((other, at) => (at === index ? { ...other, species } : other)),
@@ -57,16 +57,18 @@ const spelledAlike = (
   const atomsStand = [...wanted].every(([element, count]) => (species.composition.get(element) ?? ZERO).equals(count));
   if (atomsStand) return [withCharge(species, charge)].filter(isBelievable);
   return withOneSubscript(withCharge(species, charge), wanted).filter(
-    (found) => isKnown(found) || (charge.equals(species.charge) && isBelievable(found)),
+    (found) => isCommon(found) || (charge.equals(species.charge) && isBelievable(found)),
   );
 };
 
+const isCommon = (species: Species): boolean => familiarityOf(species) === 'common';
+
 const isBelievable = (species: Species): boolean =>
-  isKnown(species) || Math.abs(Number(species.charge.n)) <= LARGEST_UNKNOWN_CHARGE;
+  isCommon(species) || Math.abs(Number(species.charge.n)) <= LARGEST_UNKNOWN_CHARGE;
 
 /** Known species with these contents whose spelling is near what was written. */
 const fromTable = (species: Species, wanted: ReadonlyMap<string, Rational>, charge: Rational): readonly Species[] =>
-  knownWith(wanted, charge)
+  commonWith(wanted, charge)
     .filter((found) => editDistance(plainSpecies(found), plainSpecies(species)) <= 3)
     .map((found) => ({ ...found, state: species.state }));
 

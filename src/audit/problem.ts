@@ -1,11 +1,19 @@
 import { lcmOf } from '../exact/integer.ts';
-import type { IntegerVector } from '../exact/matrix.ts';
 import { type Rational, ONE, denominatorOf, isWhole, rational } from '../exact/rational.ts';
 import type { Medium } from '../redox/medium.ts';
 import type { Species } from '../species/species.ts';
 import { helpersFor, lentTo } from './helper-ions.ts';
 import type { RepairKind } from './repair-kinds.ts';
-import { type Columns, type Draft, type DraftTerm, type Surplus, columnsOf, surplusOf } from './writing.ts';
+import { balancesOf } from './solve.ts';
+import {
+  type Columns,
+  type Draft,
+  type DraftTerm,
+  type Surplus,
+  columnsOf,
+  signedColumn,
+  surplusOf,
+} from './writing.ts';
 
 /** An equation that does not conserve, ready for the search of repairs. */
 export interface Problem {
@@ -17,6 +25,10 @@ export interface Problem {
   readonly surplus: Surplus;
   /** Common denominator of the written numbers; a repair keeps to it. */
   readonly denominator: bigint;
+  /** The balances of the terms as they stand, one vector for each independent one, most of its numbers positive. */
+  readonly balances: readonly (readonly bigint[])[];
+  /** Whether the written species balance on the sides where they stand. */
+  readonly solvable: boolean;
 }
 
 /** A repaired equation before it is ranked. */
@@ -36,6 +48,10 @@ const commonDenominator = (draft: Draft): bigint => {
 /** The problem that `draft` poses. */
 export const problemOf = (draft: Draft, medium: Medium | undefined): Problem => {
   const columns = columnsOf([...draft.map(({ species }) => species), ...lentTo(draft, medium)]);
+  const balances = balancesOf(
+    draft.map((term) => signedColumn(columns, term)),
+    columns.rowCount,
+  );
   return {
     draft,
     medium,
@@ -43,16 +59,9 @@ export const problemOf = (draft: Draft, medium: Medium | undefined): Problem => 
     columns,
     surplus: surplusOf(draft, columns),
     denominator: commonDenominator(draft),
+    balances,
+    solvable: balances.length > 1 || balances[0]?.every((value) => value > 0n) === true,
   };
-};
-
-/** The column of a term, its sign that of its side: right counts, left takes away. */
-export const signedColumn = (
-  problem: Problem,
-  { species, side }: Pick<DraftTerm, 'species' | 'side'>,
-): IntegerVector => {
-  const column = problem.columns.of(species);
-  return side === 'right' ? column : column.map((value) => -value);
 };
 
 /** True where `value` is no finer a fraction than those that were written. */

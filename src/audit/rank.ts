@@ -1,13 +1,13 @@
 import type { Reaction } from '../balance/reaction.ts';
 import { plainReaction } from '../balance/reaction.ts';
 import { isConserved } from '../balance/recount.ts';
-import { type Rational, ONE } from '../exact/rational.ts';
+import { type Rational, ONE, ZERO, isZero } from '../exact/rational.ts';
 import { isElectron } from '../species/species.ts';
 import { type Change, changesOf } from './changes.ts';
 import { isHelper, isHydroxide, isProton } from './helper-ions.ts';
-import { isKnown } from './known.ts';
+import { familiarityOf } from './known.ts';
 import type { Candidate, Problem } from './problem.ts';
-import { EDIT_COSTS, IMPROBABLE, REPAIR_KINDS, type RepairKind, TIE } from './repair-kinds.ts';
+import { EDIT_COSTS, IMPROBABLE, REPAIR_KINDS, RESPELLING_COSTS, type RepairKind, TIE } from './repair-kinds.ts';
 import { doublings } from './scale.ts';
 import { type Draft, type DraftTerm, reactionOf } from './writing.ts';
 
@@ -27,9 +27,21 @@ export const ranked = (problem: Problem, candidates: readonly Candidate[]): read
     const one = rank(problem, candidate);
     const text = plainReaction(one.reaction);
     const other = best.get(text);
-    if (isConserved(one.reaction) && (other === undefined || before(one, other) < 0)) best.set(text, one);
+    if (
+      isConserved(one.reaction) &&
+      !isNothing(problem.draft, one.reaction) &&
+      (other === undefined || before(one, other) < 0)
+    )
+      best.set(text, one);
   }
   return [...best.values()].sort(before);
+};
+
+/** True where the electrons alone made the difference: without them X -> X is left. */
+const isNothing = (written: Draft, { terms }: Reaction): boolean => {
+  const net = new Map<string, Rational>();
+  for (const { species, nu } of terms) net.set(species.key, (net.get(species.key) ?? ZERO).add(nu));
+  return written.some(({ species }) => isElectron(species)) && [...net.values()].every(isZero);
 };
 
 const before = (a: Ranked, b: Ranked): number => {
@@ -65,10 +77,19 @@ const costOf = (problem: Problem, change: Change): number => {
       return respellingCost(problem, change.was, change.is);
     case 'dropped':
       if (isElectron(change.was.species)) return EDIT_COSTS.electronsDropped;
-      return isHelper(change.was.species, problem.medium) ? EDIT_COSTS.helperDropped : EDIT_COSTS.termDropped;
+      return dropCost(problem, change.was);
     case 'added':
-      return isElectron(change.is.species) ? EDIT_COSTS.electronsAdded : EDIT_COSTS.helperAdded;
+      if (!isElectron(change.is.species)) return EDIT_COSTS.helperAdded;
+      return problem.solvable ? EDIT_COSTS.electronsAddedThoughSolvable : EDIT_COSTS.electronsAdded;
   }
+};
+
+const dropCost = ({ draft, medium }: Problem, { species }: DraftTerm): number => {
+  if (!isHelper(species, medium)) return EDIT_COSTS.termDropped;
+  const ions = draft.filter((term) => isProton(term.species) || isHydroxide(term.species));
+  const both = ions.some((term) => isProton(term.species)) && ions.some((term) => isHydroxide(term.species));
+  const isIon = isProton(species) || isHydroxide(species);
+  return isIon && both ? EDIT_COSTS.oneOfBothIonsDropped : EDIT_COSTS.helperDropped;
 };
 
 const isSkeleton = (draft: Draft): boolean => !draft.some(({ coefficientWritten }) => coefficientWritten);
@@ -84,16 +105,25 @@ const respellingCost = ({ medium }: Problem, was: DraftTerm, is: DraftTerm): num
     const foreign = medium !== undefined && !medium.helpers.some(({ key }) => key === was.species.key);
     return foreign ? EDIT_COSTS.foreignIonExchanged : EDIT_COSTS.ionExchanged;
   }
-  const [before, after] = [isKnown(was.species), isKnown(is.species)];
-  const base = before
-    ? after
-      ? EDIT_COSTS.knownToKnown
-      : EDIT_COSTS.knownToUnknown
-    : after
-      ? EDIT_COSTS.unknownToKnown
-      : EDIT_COSTS.unknownToUnknown;
-  return base + EDIT_COSTS.perFurtherUnit * Math.max(0, distanceBetween(was, is) - 1);
+  const further = EDIT_COSTS.perFurtherUnit * Math.max(0, distanceBetween(was, is) - 1);
+  const stateClash = isZero(was.species.charge) && !isZero(is.species.charge) && isBulk(was.species.state);
+  return (
+    RESPELLING_COSTS[familiarityOf(was.species)][familiarityOf(is.species) === 'common' ? 'common' : 'other'] +
+    further +
+    (stateClash ? EDIT_COSTS.ionInBulk : 0) -
+    (isDissolvedElement(was) ? EDIT_COSTS.dissolvedElement : 0)
+  );
 };
+
+/** An element of single atoms in solution lacks its charge: Ag(aq). */
+const isDissolvedElement = ({ species }: DraftTerm): boolean =>
+  species.state === 'aq' &&
+  isZero(species.charge) &&
+  species.composition.size === 1 &&
+  [...species.composition.values()].every((count) => count.equals(ONE));
+
+/** No ion is written as a solid, a liquid or a gas. */
+const isBulk = (state: string | null): boolean => state === 's' || state === 'l' || state === 'g';
 
 const isIonExchange = (was: DraftTerm, is: DraftTerm): boolean =>
   (isProton(was.species) && isHydroxide(is.species)) || (isHydroxide(was.species) && isProton(is.species));
@@ -101,10 +131,11 @@ const isIonExchange = (was: DraftTerm, is: DraftTerm): boolean =>
 /** Atoms and charges by which two species differ. */
 const distanceBetween = ({ species: a }: DraftTerm, { species: b }: DraftTerm): number => {
   const size = (value: Rational): number => Number(value.n) / Number(value.d);
-  let sum = size(a.charge.sub(b.charge));
+  // a sign turned over is one slip, however large the charge
+  let sum = a.charge.equals(b.charge.neg()) ? 1 : size(a.charge.sub(b.charge));
   for (const element of new Set([...a.composition.keys(), ...b.composition.keys()])) {
-    const here = a.composition.get(element) ?? ONE.sub(ONE);
-    sum += size(here.sub(b.composition.get(element) ?? ONE.sub(ONE)));
+    const here = a.composition.get(element) ?? ZERO;
+    sum += size(here.sub(b.composition.get(element) ?? ZERO));
   }
   return sum;
 };

@@ -1,28 +1,20 @@
 import { isElectron } from '../species/species.ts';
 import { isZero, signOf } from '../exact/rational.ts';
 import { isHelper } from './helper-ions.ts';
-import { type Candidate, type Problem, hasBothSides, keepsToFractions, signedColumn } from './problem.ts';
+import { type Candidate, type Problem, hasBothSides, keepsToFractions } from './problem.ts';
 import type { RepairKind } from './repair-kinds.ts';
 import { bestScales } from './scale.ts';
-import { completion, ray } from './solve.ts';
-import { type Draft, type DraftTerm, otherSide } from './writing.ts';
+import { completion, onlyOne } from './solve.ts';
+import { type Draft, type DraftTerm, otherSide, signedColumn } from './writing.ts';
 
 /** Above this many terms only single numbers are tried where the balance is not unique. */
 const MOST_TERMS_FOR_PAIRS = 14;
 
 /** Repairs by other numbers: class 1, and what the numbers themselves say of sides and superfluous terms. */
 export const renumberings = (problem: Problem): readonly Candidate[] => {
-  const numbers = ray(
-    problem.draft.map((term) => signedColumn(problem, term)),
-    problem.columns.rowCount,
-  );
-  return numbers === null ? sparseChanges(problem) : onRay(problem, problem.draft, upright(numbers), 'coefficients');
-};
-
-/** `numbers` turned so that most of them are positive. */
-export const upright = (numbers: readonly bigint[]): readonly bigint[] => {
-  const balance = numbers.filter((value) => value > 0n).length - numbers.filter((value) => value < 0n).length;
-  return balance < 0 ? numbers.map((value) => -value) : numbers;
+  const numbers = onlyOne(problem.balances);
+  if (numbers !== null) return onRay(problem, problem.draft, numbers, 'coefficients');
+  return problem.balances.length === 0 ? [] : sparseChanges(problem);
 };
 
 /**
@@ -93,7 +85,7 @@ const changeOf = (problem: Problem, indices: readonly number[]): readonly Candid
   const terms = indices.flatMap((index) => problem.draft[index] ?? []);
   const steps = completion(
     problem.surplus,
-    terms.map((term) => signedColumn(problem, term)),
+    terms.map((term) => signedColumn(problem.columns, term)),
   );
   if (steps === null || steps.some(isZero)) return [];
   const numbers = problem.draft.map(({ coefficient }, index) => {

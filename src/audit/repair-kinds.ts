@@ -58,21 +58,27 @@ export const EDIT_COSTS = {
   /** A second helper added together with the first. */
   furtherHelper: 0.7,
   helperDropped: 1.25,
-  electronsAdded: 2.1,
+  /** H^+ dropped where OH^- is written too, or back. */
+  oneOfBothIonsDropped: 0.25,
+  electronsAdded: 1.4,
+  /** The same where other numbers balance without electrons: an overall reaction needs none. */
+  electronsAddedThoughSolvable: 2.4,
   electronsDropped: 1.1,
   termDropped: 2.2,
-  /** An ion that is in no table becomes a known one. */
-  unknownToKnown: 0.85,
-  /** A known ion becomes another known one. */
-  knownToKnown: 1.5,
-  /** A spelling that is in no table becomes another such. */
-  unknownToUnknown: 1.8,
-  /** A known ion becomes one that is in no table. */
-  knownToUnknown: 2.4,
   /** Per unit of charge or atom by which a species changes, after the first. */
   perFurtherUnit: 0.05,
-  /** The repaired equation exchanges no electrons and changes no charge: an electrode reaction was probably meant. */
-  sameSpeciesTwice: 0.5,
+  /** A solid, a liquid or a gas becomes an ion. */
+  ionInBulk: 1,
+  /** Taken off where an element of single atoms is written as dissolved: its charge was left out. */
+  dissolvedElement: 0.7,
+} as const;
+
+/** What it costs to take one species for another, by how well both are known. */
+export const RESPELLING_COSTS = {
+  common: { common: 1.5, other: 2.4 },
+  rare: { common: 0.5, other: 2 },
+  unlisted: { common: 0.75, other: 1.8 },
+  'unlisted-ion': { common: 0.12, other: 1.8 },
 } as const;
 
 /** Costs that differ by less are a tie. */

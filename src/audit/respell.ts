@@ -1,44 +1,24 @@
-import { type Rational, ONE, isWhole, rational, showDecimal, signOf } from '../exact/rational.ts';
-import type { Group, Member, Part } from '../notation/formula.ts';
+import { type Rational, ONE, ZERO, isWhole, isZero, signOf } from '../exact/rational.ts';
+import type { Formula, Member } from '../notation/formula.ts';
+import { formulaKey, formulaText } from '../notation/print/formula-text.ts';
 import { type Species, countAtoms, plainCharge } from '../species/species.ts';
 
-const countText = (count: Rational): string => (count.equals(ONE) ? '' : showDecimal(count));
-
-const CLOSING: Readonly<Record<Group['bracket'], string>> = { '(': ')', '[': ']', '{': '}' };
-
-const spellMember = (member: Member): string => {
-  switch (member.kind) {
-    case 'atom':
-      return (member.massNumber === null ? '' : `^${member.massNumber}`) + member.symbol + countText(member.count);
-    case 'group':
-      return (
-        member.bracket + member.members.map(spellMember).join('') + CLOSING[member.bracket] + countText(member.count)
-      );
-    case 'named':
-      return member.name + countText(member.count);
-  }
-};
-
-const spellParts = (parts: readonly Part[]): string =>
-  parts.map(({ multiplier, members }) => countText(multiplier) + members.map(spellMember).join('')).join('*');
-
 /** `species` with another charge number, spelled alike. */
-export const withCharge = (species: Species, charge: Rational): Species => {
-  const bare = species.key.slice(0, species.key.length - plainCharge(species.charge).length);
-  return { ...species, charge, key: bare + plainCharge(charge) };
-};
+export const withCharge = (species: Species, charge: Rational): Species => ({
+  ...species,
+  charge,
+  key: formulaKey(species.parts) + plainCharge(charge),
+});
 
-/** `species` with other parts. */
-const withParts = (species: Species, parts: readonly Part[]): Species => {
-  const formula = spellParts(parts);
-  const bare = formula
-    .replace(/^\[([^[\]]*)\]$/, '$1')
-    .replaceAll('[', '(')
-    .replaceAll(']', ')');
-  return { ...species, parts, formula, composition: countAtoms(parts), key: bare + plainCharge(species.charge) };
-};
+const withParts = (species: Species, parts: Formula): Species => ({
+  ...species,
+  parts,
+  formula: formulaText(parts),
+  composition: countAtoms(parts),
+  key: formulaKey(parts) + plainCharge(species.charge),
+});
 
-/** Every way to change one count in `species`, as (new count asked of `change`) -> species. */
+/** A subscript of a species. */
 interface Slot {
   /** Atoms that one more of this member brings. */
   readonly worth: ReadonlyMap<string, Rational>;
@@ -96,11 +76,10 @@ const multipleOf = (
 ): Rational | null => {
   let found: Rational | null = null;
   for (const element of new Set([...composition.keys(), ...wanted.keys()])) {
-    const zero = rational(0n);
-    const gap = (wanted.get(element) ?? zero).sub(composition.get(element) ?? zero);
+    const gap = (wanted.get(element) ?? ZERO).sub(composition.get(element) ?? ZERO);
     const each = worth.get(element);
     if (each === undefined) {
-      if (!gap.equals(zero)) return null;
+      if (!isZero(gap)) return null;
       continue;
     }
     const step = gap.div(each);

@@ -1,7 +1,6 @@
 import { type Rational, ONE, denominatorOf, isWhole, rational } from '../exact/rational.ts';
-import { type Candidate, type Problem, signedColumn } from './problem.ts';
-import { upright } from './renumber.ts';
-import { ray } from './solve.ts';
+import type { Candidate, Problem } from './problem.ts';
+import { onlyOne } from './solve.ts';
 
 /** Decimals with this many places may have been cut instead of rounded. */
 const PLACES_CUT = 3;
@@ -30,14 +29,13 @@ const slackOf = (value: Rational): Rational => {
  */
 export const unrounded = (problem: Problem): readonly Candidate[] => {
   if (!problem.draft.some(({ coefficient }) => decimalPlaces(coefficient) !== null)) return [];
-  const signed = problem.draft.map((term) => signedColumn(problem, term));
-  const numbers = ray(signed, problem.columns.rowCount);
-  if (numbers === null || !upright(numbers).every((value) => value > 0n)) return [];
-  const scale = commonScale(problem, upright(numbers));
+  const numbers = onlyOne(problem.balances);
+  if (numbers === null || !problem.solvable) return [];
+  const scale = commonScale(problem, numbers);
   if (scale === null) return [];
   const draft = problem.draft.map((term, index) => ({
     ...term,
-    coefficient: scale.mul(rational(upright(numbers)[index] ?? 1n)),
+    coefficient: scale.mul(rational(numbers[index] ?? 1n)),
   }));
   return [{ kind: 'rounding', draft }];
 };

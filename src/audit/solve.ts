@@ -18,8 +18,18 @@ export const completion = (surplus: Surplus, columns: readonly IntegerVector[]):
   return only.slice(0, columns.length).map((value) => rational(value, last * surplus.scale));
 };
 
-/** The primitive whole vector p with sum p_j u_j = 0, or null where it is not unique up to its sign. */
-export const ray = (columns: readonly IntegerVector[], rowCount: number): readonly bigint[] | null => {
-  const [only, another] = nullSpace(matrixOf(columns, rowCount), columns.length);
-  return only === undefined || another !== undefined ? null : only;
+/**
+ * A basis of the whole vectors p with sum p_j u_j = 0, each turned so that most of its numbers are positive. Where it
+ * has one vector, that is the only balance.
+ */
+export const balancesOf = (columns: readonly IntegerVector[], rowCount: number): readonly (readonly bigint[])[] =>
+  nullSpace(matrixOf(columns, rowCount), columns.length).map(upright);
+
+const upright = (numbers: readonly bigint[]): readonly bigint[] => {
+  const balance = numbers.reduce((sum, value) => sum + (value > 0n ? 1 : value < 0n ? -1 : 0), 0);
+  return balance < 0 ? numbers.map((value) => -value) : numbers;
 };
+
+/** The only vector of `balances`, or null. */
+export const onlyOne = (balances: readonly (readonly bigint[])[]): readonly bigint[] | null =>
+  balances.length === 1 ? (balances[0] ?? null) : null;

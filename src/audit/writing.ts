@@ -61,6 +61,15 @@ export const columnsOf = (species: readonly Species[]): Columns => {
   return { of: (one) => byKey.get(one.key) ?? [], rowCount: rows.length };
 };
 
+/** The column of a term, its sign that of its side: right counts, left takes away. */
+export const signedColumn = (
+  columns: Columns,
+  { species, side }: Pick<DraftTerm, 'species' | 'side'>,
+): IntegerVector => {
+  const column = columns.of(species);
+  return side === 'right' ? column : column.map((value) => -value);
+};
+
 /** The matrix with these columns. */
 export const matrixOf = (columns: readonly IntegerVector[], rowCount: number): IntegerMatrix =>
   Array.from({ length: rowCount }, (_, row) => columns.map((column) => entry(column, row)));
