@@ -16,27 +16,38 @@ export interface Attempt {
   readonly skeleton: Equation;
   readonly medium: Medium;
   readonly loan: Loan;
+  /** What is sought. In a neutral medium written water is free here, since it may end on either side. */
   readonly unknowns: readonly Unknown[];
+  /** The same, each on the side where it is written. */
+  readonly asWritten: readonly Unknown[];
   readonly verdict: Verdict;
 }
 
 /** Lends the helpers of `medium` to `skeleton` and solves; `electron`: e^- is an unknown. */
 export const attempt = (skeleton: Equation, medium: Medium, electron: boolean): Attempt => {
   const loan = lend(medium, skeleton, electron);
-  const unknowns = unknownsOf(skeleton, { helpers: loan.helpers, electron });
-  const first: Attempt = { skeleton, medium, loan, unknowns, verdict: solve(unknowns) };
-  return medium.name === 'neutral' ? turnWater(first) : first;
+  const asWritten = unknownsOf(skeleton, { helpers: loan.helpers, electron });
+  const unknowns = medium.name === 'neutral' ? asWritten.map(freeWater) : asWritten;
+  const verdict = solve(unknowns);
+  const idle = verdict.kind === 'unique' ? idleWater({ medium, asWritten }, verdict.numbers) : -1;
+  const known: Verdict = idle === -1 ? verdict : { kind: 'idle-species', index: idle };
+  return { skeleton, medium, loan, unknowns, asWritten, verdict: known };
 };
 
-/** In a neutral medium written water may end on either side: where it cannot stand as written it is tried on the other. */
-const turnWater = (first: Attempt): Attempt => {
-  const { verdict } = first;
-  if (verdict.kind !== 'wrong-side') return first;
-  const wrong = first.unknowns[verdict.index];
-  if (wrong === undefined || !sameSpecies(wrong.species, WATER)) return first;
-  const turned: Unknown = { ...wrong, side: wrong.side === 'left' ? 'right' : 'left' };
-  const unknowns = first.unknowns.map((unknown) => (unknown === wrong ? turned : unknown));
-  return { ...first, unknowns, verdict: solve(unknowns) };
+const isWater = (unknown: Unknown): boolean => sameSpecies(unknown.species, WATER);
+
+const freeWater = (unknown: Unknown): Unknown => (isWater(unknown) ? { ...unknown, side: 'free' } : unknown);
+
+/** Freed water must still take part, as in acid or once H^+ is folded; -1 where it does or is not asked to. */
+const idleWater = (
+  { medium, asWritten }: Pick<Attempt, 'medium' | 'asWritten'>,
+  numbers: readonly bigint[],
+): number => {
+  if (medium.name !== 'neutral') return -1;
+  const folded = foldNeutral({ unknowns: asWritten, numbers }).numbers;
+  return asWritten.findIndex(
+    (unknown, index) => isWater(unknown) && unknown.side !== 'free' && numbers[index] === 0n && folded[index] === 0n,
+  );
 };
 
 /** The reaction of whole numbers for the unknowns of an attempt: folded where the medium is neutral, and recounted. */
@@ -48,15 +59,16 @@ export const finish = ({ medium, unknowns }: Attempt, numbers: readonly bigint[]
 
 /** What the reader must know of a balance: coefficients ignored, species dropped, helpers settled by preference. */
 export const notesOf = (tried: Attempt, reaction: Reaction): readonly Note[] => {
-  const takesPart = (unknown: Unknown): boolean => reaction.terms.some((term) => term.species === unknown.species);
-  const dropped = tried.unknowns.filter((one) => one.written && one.side === 'free' && !takesPart(one));
-  const settled = tried.loan.leftOut.length > 0 && tried.unknowns.some((one) => one.helper && takesPart(one));
+  const takesPart = ({ species }: Unknown): boolean => reaction.terms.some((term) => term.species === species);
+  const settled = tried.loan.leftOut.length > 0 && tried.asWritten.some((one) => one.helper && takesPart(one));
   return [
     ...coefficientNotes(tried.skeleton),
-    ...dropped.map(({ species }) => {
-      const name = plainSpecies(species);
-      return note('species-dropped', `${name} is written on both sides, comes out at 0 and is left out.`);
-    }),
+    ...tried.asWritten.filter((one) => one.written && !takesPart(one)).map(droppedNote),
     ...(settled ? [note('medium-preference', preferenceSentence(tried.medium, tried.loan))] : []),
   ];
+};
+
+const droppedNote = ({ species, side }: Unknown): Note => {
+  const why = side === 'free' ? 'is written on both sides, comes out at 0' : 'is used up as it forms';
+  return note('species-dropped', `${plainSpecies(species)} ${why} and is left out.`);
 };

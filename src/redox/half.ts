@@ -20,9 +20,9 @@ export const completeHalf = (skeleton: Equation, choice: MediumChoice, settle?: 
   chain(chooseMedium(choice, skeleton), (medium) => complete(attempt(skeleton, medium, true), settle));
 
 const complete = (tried: Attempt, settle: string | undefined): Result<HalfReaction> => {
-  const { verdict, unknowns } = tried;
+  const { verdict } = tried;
   if (verdict.kind === 'unique') return halfOf(tried, finish(tried, verdict.numbers), verdict.dimension);
-  if (verdict.kind !== 'family') return failure(explain(verdict, unknowns));
+  if (verdict.kind !== 'family') return failure(explain(verdict, tried.asWritten));
   return chain(settleHalf(tried, verdict.dimension, settle), ({ reaction, notes }) =>
     halfOf(tried, reaction, verdict.dimension, notes),
   );

@@ -66,8 +66,8 @@ const withoutElectrons = (skeleton: Equation): Result<Equation> => {
 };
 
 const balance = (tried: Attempt, settle: string | undefined, count: ElectronCount): Result<OverallBalance> => {
-  const { verdict, unknowns, medium } = tried;
-  if (verdict.kind !== 'unique' && verdict.kind !== 'family') return failure(explain(verdict, unknowns));
+  const { verdict, medium } = tried;
+  if (verdict.kind !== 'unique' && verdict.kind !== 'family') return failure(explain(verdict, tried.asWritten));
   const found = (reaction: Reaction, coupling: Coupling | null, notes: readonly Note[]): Result<OverallBalance> =>
     success({ reaction, dimension: verdict.dimension, medium, coupling }, [...notesOf(tried, reaction), ...notes]);
   if (verdict.kind === 'unique') return found(finish(tried, verdict.numbers), null, []);
