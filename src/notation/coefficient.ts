@@ -46,10 +46,15 @@ const numericValue = (match: RegExpExecArray): Rational | null => {
 
 const SUMMAND = String.raw`(?:\d+(?:\.\d+)?)?\s*U|\d+(?:\.\d+)?(?:\s*/\s*\d+)?`;
 
-const unknownPatterns = (unknowns: Unknowns): { readonly start: RegExp; readonly summand: RegExp } => {
-  const names = [...new Set([...unknowns.keys(), ...UNKNOWN_SUBSCRIPTS])]
+interface UnknownPatterns {
+  readonly start: RegExp;
+  readonly summand: RegExp;
+}
+
+const patternsOf = (unknowns: readonly string[]): UnknownPatterns => {
+  const names = unknowns
     .filter((name) => /^\p{L}+$/u.test(name))
-    .sort((a, b) => b.length - a.length)
+    .toSorted((a, b) => b.length - a.length)
     .join('|');
   const one = SUMMAND.replace('U', `(?:${names})(?:\\s*/\\s*\\d+)?`);
   const follows = String.raw`(?=\s*(?:[A-Z([{^]|e\s*[-−^⁻]))`;
@@ -61,6 +66,13 @@ const unknownPatterns = (unknowns: Unknowns): { readonly start: RegExp; readonly
     summand: new RegExp(`([-+−]?)\\s*(\\d+(?:\\.\\d+)?)?\\s*(${names})?(?:\\s*/\\s*(\\d+))?`, 'gu'),
   };
 };
+
+const USUAL_PATTERNS = patternsOf(UNKNOWN_SUBSCRIPTS);
+
+const unknownPatterns = (unknowns: Unknowns): UnknownPatterns =>
+  [...unknowns.keys()].every((name) => UNKNOWN_SUBSCRIPTS.includes(name))
+    ? USUAL_PATTERNS
+    : patternsOf([...new Set([...unknowns.keys(), ...UNKNOWN_SUBSCRIPTS])]);
 
 /** The name of an unknown that has no value, or the value of the sum. */
 const sumValue = (text: string, summand: RegExp, unknowns: Unknowns): Rational | string => {

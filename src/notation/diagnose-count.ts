@@ -41,7 +41,7 @@ export const countFault = (text: string, tokens: readonly Token[]): Fault | null
     if (isType(after, 'plus', 'minus')) continue;
     const zero = zeroFault(text, number, token, before);
     if (zero !== null) return zero;
-    if (isType(last, 'period') && after === undefined)
+    if (isType(last, 'period') && at + number.length >= tokens.length)
       return faultAt(
         text,
         'bad-count',

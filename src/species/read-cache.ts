@@ -1,5 +1,5 @@
 import { LIMITS } from '../notation/limits.ts';
-import type { KeptReading } from './read.ts';
+import type { KeptReading } from './read-species.ts';
 
 /**
  * Readings already made, the oldest use first. Reading is a pure function of its key, so that nothing can go stale, and

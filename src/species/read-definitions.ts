@@ -4,7 +4,7 @@ import { parseSpecies } from '../notation/parse-species.ts';
 import type { Fault } from '../report/fault.ts';
 import { type Result, all, chain, failure, inField, success } from '../report/result.ts';
 import type { Definitions } from './definitions.ts';
-import { type ReadingOptions, readSpecies } from './read.ts';
+import { type ReadingOptions, readSpecies } from './read-species.ts';
 import { chargeNumber } from './read-build.ts';
 import { type Species, plainCharge, plainSpecies } from './species.ts';
 

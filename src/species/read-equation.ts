@@ -7,7 +7,7 @@ import type { Fault } from '../report/fault.ts';
 import { type Result, all, chain, failure, map, success } from '../report/result.ts';
 import { codePointsBefore, shiftSpan, spanOf, wholeSpan } from '../report/span.ts';
 import type { Equation, EquationTerm } from './equation.ts';
-import { type ReadingOptions, readSpecies, spells } from './read.ts';
+import { type ReadingOptions, readSpecies, spells } from './read-species.ts';
 
 /** A fault seen from the whole text, where its part begins at UTF-16 offset `from`. */
 const shifted = (fault: Fault, text: string, from: number): Fault =>
