@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { showRational } from '../../src/exact/rational.ts';
+import { dissolvedIons } from '../../src/redox/split-dissolve.ts';
 import { ionsOfSalt } from '../../src/redox/split-salt.ts';
 import { plainSpecies } from '../../src/species/species.ts';
 import { plain } from '../support/plain.ts';
@@ -42,10 +43,61 @@ describe('the ions of a salt', () => {
     expect(shown(salt)).toBe(ions);
   });
 
-  it.each(['H2O', 'NH3', 'CH4', 'SO2', 'Fe2O3', 'Cl2', 'MnO2', 'C2H5OH', 'Fe^2+', 'As2S3'])(
-    'are not sought in %s',
-    (text) => {
-      expect(shown(text)).toBeNull();
-    },
-  );
+  it.each([
+    'H2O',
+    'NH3',
+    'CH4',
+    'SO2',
+    'Fe2O3',
+    'Cl2',
+    'MnO2',
+    'SO3',
+    'CuO',
+    'LiCoO2',
+    'CoO2',
+    'C2H5OH',
+    'Fe^2+',
+    'As2S3',
+  ])('are not sought in %s', (text) => {
+    expect(shown(text)).toBeNull();
+  });
+});
+
+describe('what dissolves', () => {
+  // from memory: rules of solubility and the strong acids
+  it.each([
+    'NaCl',
+    'K2Cr2O7',
+    'FeSO4',
+    'HNO3',
+    'H2SO4',
+    'HCl',
+    'KOH',
+    'Ba(OH)2',
+    'Pb(NO3)2',
+    'CuCl2',
+    'ZnSO4',
+    'Na2S',
+    'HClO4',
+  ])('%s does', (text) => {
+    expect(dissolvedIons(plain(text))).not.toBeNull();
+  });
+
+  it.each([
+    'AgCl',
+    'PbSO4',
+    'Hg2Cl2',
+    'FeS',
+    'Fe(OH)3',
+    'H2S',
+    'CH3COOH',
+    'H3PO4',
+    'H2O2',
+    'BaSO4',
+    'CuI',
+    'Fe2O3',
+    'H2C2O4',
+  ])('%s does not, or stays whole', (text) => {
+    expect(dissolvedIons(plain(text))).toBeNull();
+  });
 });
