@@ -1,0 +1,96 @@
+import { showRational } from '../exact/rational.ts';
+import type { Note } from '../report/note.ts';
+import { type Result, chain, success } from '../report/result.ts';
+import { ALONGSIDE_NAMES, type Companion, companionsOf, partsOf, splitsCurrent } from './alongside.ts';
+import { type Quantity, readWanted, showQuantities } from './answered.ts';
+import { budgetsOf } from './budget.ts';
+import { deriveAll } from './derivation.ts';
+import { checkEnough } from './enough.ts';
+import { readGiven, speaksOfTank } from './given.ts';
+import { amountNotes } from './notes.ts';
+import { type Problem, electronsPerMole, setUp } from './problem.ts';
+import { QUANTITY_NAMES, type QuantityName } from './quantities.ts';
+import { readStack } from './stack.ts';
+import { withUnitArea } from './unit-area.ts';
+import type { AmountsAnswer, AmountsRequest, DerivedQuantity, Working } from './working.ts';
+
+const namesShown = ({ derived, problem, request }: Working): ReadonlySet<QuantityName> => {
+  const shown = QUANTITY_NAMES.filter((name) => derived.known.has(name) && !derived.assumed.has(name));
+  const asksShare = request.given['share'] !== undefined || request.want?.['share'] !== undefined;
+  const share =
+    shown.includes('efficiency') && (asksShare || problem.circuit.kind === 'electrode' || splitsCurrent(problem));
+  const volume = request.want?.['volume'] !== undefined;
+  return new Set([...shown, ...(share ? ['share' as const] : []), ...(volume ? ['volume' as const] : [])]);
+};
+
+const showAsked = (working: Working): Readonly<Record<string, Quantity>> => {
+  const { derived, units, request } = working;
+  const efficiency = derived.known.get('efficiency');
+  const known = efficiency === undefined ? derived.known : new Map([...derived.known, ['share', efficiency] as const]);
+  return showQuantities(known, namesShown(working), units, request.correlations ?? []);
+};
+
+const showCompanion = (
+  { units, request }: Working,
+  { known, shared }: Companion,
+): Readonly<Record<string, Quantity>> => {
+  const names = new Set<QuantityName>([...ALONGSIDE_NAMES, ...(shared ? (['efficiency', 'share'] as const) : [])]);
+  const efficiency = known.get('efficiency');
+  const all = efficiency === undefined ? known : new Map([...known, ['share', efficiency] as const]);
+  return showQuantities(all, names, units, request.correlations ?? []);
+};
+
+const stepsOf = ({ derived }: Working): readonly DerivedQuantity[] =>
+  derived.steps.flatMap(({ name, relation }) => {
+    const quantity = QUANTITY_NAMES.find((one) => one === name);
+    return quantity === undefined ? [] : [{ quantity, relation: relation.formula }];
+  });
+
+const answerFrom = (working: Working): AmountsAnswer => {
+  const { problem, companions, request } = working;
+  const shown = showAsked(working);
+  return {
+    quantities: shown,
+    alongside: Object.fromEntries(companions.map((one) => [one.stake.name, showCompanion(working, one)])),
+    electronsPerMole: Object.fromEntries(electronsPerMole(problem).map(([name, value]) => [name, showRational(value)])),
+    derived: stepsOf(working),
+    ...(request.budget === true ? { budgets: budgetsOf(working.derived.known, Object.keys(shown)) } : {}),
+  };
+};
+
+const workOut = (request: AmountsRequest, problem: Problem): Result<Working> => {
+  const given = readGiven(request.given, problem.weigh(problem.asked.species));
+  const units = readWanted(request.want ?? {});
+  const series = readStack(request);
+  return chain(given, (values) =>
+    chain(units, (answerUnits) =>
+      chain(series, (factor) =>
+        chain(deriveAll(problem, values, factor), (solved) => {
+          const derived = withUnitArea(solved);
+          const parts = partsOf(problem, derived);
+          const companions = companionsOf(problem, derived, parts, speaksOfTank(request.given));
+          return success({ request, problem, given: values, derived, parts, companions, units: answerUnits });
+        }),
+      ),
+    ),
+  );
+};
+
+/**
+ * What Faraday's law makes of what was given, for one species of a half-reaction, of reactions in parallel at an
+ * electrode or of a cell: everything that follows, in the units wanted, with standard uncertainties (first order, JCGM
+ * 100:2008), and the same for every other species for the same charge.
+ *
+ * Faults, with the field of the ask: `unknown-quantity`, `unknown-unit`, `empty`, `too-long`, `bad-ask`,
+ * `not-enough-given`, `contradiction`. A fault in `species` spans the whole name.
+ */
+export const computeAmounts = (request: AmountsRequest): Result<AmountsAnswer> =>
+  chain(setUp(request.circuit, request.species), (problem) =>
+    chain(workOut(request, problem), (working) => {
+      const answer = answerFrom(working);
+      return chain(checkEnough(working, answer), () => {
+        const notes: readonly Note[] = amountNotes(working, answer);
+        return success(answer, notes);
+      });
+    }),
+  );

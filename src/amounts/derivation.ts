@@ -1,0 +1,180 @@
+import { type Note, note } from '../report/note.ts';
+import { type Result, chain, failure, success } from '../report/result.ts';
+import { wholeSpan } from '../report/span.ts';
+import { gasKind } from './gases.ts';
+import type { Given } from './given.ts';
+import { type Measured, exactly } from './measured.ts';
+import { type Problem, allowsDefault, constantsOf, writtenEfficiency } from './problem.ts';
+import { QUANTITIES, isQuantityName } from './quantities.ts';
+import {
+  FLOW_RELATIONS,
+  type Relation,
+  type RelationChoice,
+  type VariableName,
+  speciesRelations,
+} from './relations.ts';
+import { type Check, type Derivation, type Known, checksOf, compareValues, derive } from './solver.ts';
+
+/** All that follows from what was given, and what was taken for granted on the way. */
+export interface Derived {
+  readonly known: Known;
+  readonly steps: readonly Derivation[];
+  readonly relations: readonly Relation[];
+  /** Names whose value nobody gave: no blank, a dry gas, 100 %. */
+  readonly assumed: ReadonlySet<VariableName>;
+}
+
+const valueOf = (given: readonly Given[], name: VariableName): number | undefined =>
+  given.find((one) => one.name === name)?.measured.value;
+
+/**
+ * Which way the concentration of a tank goes. What is used up falls. A metal that is made is counted as what leaves the
+ * solution, anything else that is made rises, unless both concentrations say otherwise.
+ */
+const tankDirection = (problem: Problem, given: readonly Given[]): 'falls' | 'rises' => {
+  if (problem.equivalence.sign < 0) return 'falls';
+  const from = valueOf(given, 'from');
+  const to = valueOf(given, 'to');
+  if (from !== undefined && to !== undefined) return to > from ? 'rises' : 'falls';
+  const { composition, charge } = problem.asked.species;
+  return composition.size === 1 && charge.equals(0) ? 'falls' : 'rises';
+};
+
+const volumeOf = (problem: Problem, given: readonly Given[]): RelationChoice['volume'] => {
+  const has = (name: VariableName): boolean => given.some((one) => one.name === name);
+  if (has('from') || has('to')) return tankDirection(problem, given);
+  if (gasKind(problem.asked.species) !== 'no-gas') return 'gas';
+  return has('volume') ? 'falls' : 'none';
+};
+
+const relationsFor = (problem: Problem, given: readonly Given[], series: Measured): readonly Relation[] => {
+  const areal = !given.some(({ name }) => name === 'blank') && series.value === 1;
+  return [...FLOW_RELATIONS, ...speciesRelations({ volume: volumeOf(problem, given), areal })];
+};
+
+/** Two values for one quantity, as faults and notes name them. */
+const disagreement = (one: Given, other: string, found: Measured, unit: string): Result<never> =>
+  failure({
+    code: 'contradiction',
+    message: `${one.field} is ${show(one.measured)} ${unit}, but ${other} gives ${show(found)} ${unit}`,
+    field: one.field,
+    ...(one.text === '' ? {} : { span: wholeSpan(one.text) }),
+    hint: 'Correct one of them, or leave one out and it is derived.',
+  });
+
+const show = (measured: Measured): string => String(Number(measured.value.toPrecision(7)));
+
+/** Base unit of a quantity in words of faults; a hidden one is named by its formula alone. */
+const BASE_UNITS: Partial<Record<VariableName, string>> = {
+  charge: 'C',
+  current: 'A',
+  current_density: 'A/m^2',
+  area: 'm^2',
+  time: 's',
+  amount: 'mol',
+  mass: 'kg',
+  volume: 'm^3',
+  temperature: 'K',
+  pressure: 'Pa',
+  density: 'kg/m^3',
+  thickness: 'm',
+  voltage: 'V',
+  energy: 'J',
+  mass_per_charge: 'kg/C',
+  charge_per_mass: 'C/kg',
+  energy_per_mass: 'J/kg',
+};
+
+/** One value per variable; a second one for the same variable (efficiency and share, charge and record) must agree. */
+const gather = (start: Known, given: readonly Given[]): Result<Known> => {
+  const known = new Map(start);
+  const notes: Note[] = [];
+  for (const one of given) {
+    const before = known.get(one.name);
+    if (before === undefined) {
+      known.set(one.name, one.measured);
+      continue;
+    }
+    if (!compareValues(before, one.measured).agrees)
+      return disagreement(one, 'another part of the ask', before, BASE_UNITS[one.name] ?? '');
+    notes.push(note('surplus-agrees', `${one.field} agrees with what else says so`));
+  }
+  return success(known, notes);
+};
+
+const contradicted = (check: Check, given: readonly Given[]): Result<never> => {
+  const involved = given.filter(({ measured }) =>
+    [...measured.slopes.keys()].some((own) => check.sources.includes(own)),
+  );
+  const named = involved.find(({ name }) => name === check.name) ?? involved.at(-1);
+  const what = isQuantityName(check.name) ? QUANTITIES[check.name].name : check.name;
+  const unit = BASE_UNITS[check.name] ?? '';
+  const known = `${show(check.known)} ${unit}`.trim();
+  const found = `${show(check.found)} ${unit}`.trim();
+  return failure({
+    code: 'contradiction',
+    message: `${check.relation.formula}: ${what} is ${known} one way and ${found} the other`,
+    ...(named === undefined ? { field: 'given' } : { field: named.field }),
+    ...(named === undefined || named.text === '' ? {} : { span: wholeSpan(named.text) }),
+    hint: `Given are ${involved.map(({ field }) => field).join(', ')}: correct one of them, or leave one out.`,
+  });
+};
+
+const judge = (derived: Derived, given: readonly Given[]): Result<Derived> => {
+  const checks = checksOf(derived.known, derived.relations);
+  const failed = checks.find(({ agrees }) => !agrees);
+  if (failed !== undefined) return contradicted(failed, given);
+  const formulas = [...new Set(checks.map(({ relation }) => relation.formula))];
+  const notes = formulas.map((formula) =>
+    note('surplus-agrees', `more was given than needed, and it agrees: ${formula}`),
+  );
+  return success(derived, notes.slice(0, 1));
+};
+
+/** Concentrations that go the wrong way: what is used up cannot rise. */
+const checkTank = (problem: Problem, given: readonly Given[]): Result<null> => {
+  const from = valueOf(given, 'from');
+  const to = given.find(({ name }) => name === 'to');
+  if (problem.equivalence.sign >= 0 || from === undefined || to === undefined || to.measured.value <= from)
+    return success(null);
+  return failure({
+    code: 'contradiction',
+    message: `${problem.asked.name} is used up, yet its concentration rises`,
+    field: to.field,
+    span: wholeSpan(to.text),
+    hint: 'from is the concentration at the start, to the one at the end.',
+  });
+};
+
+const WHOLE = exactly(1);
+const NONE = exactly(0);
+
+const solve = (problem: Problem, start: Known, relations: readonly Relation[]): Derived => {
+  const assumed = new Set<VariableName>();
+  const known = new Map(start);
+  for (const name of ['blank', 'vapour_pressure'] as const) {
+    if (known.has(name)) continue;
+    known.set(name, NONE);
+    assumed.add(name);
+  }
+  const first = derive(known, relations);
+  if (first.known.has('efficiency') || !allowsDefault(problem))
+    return { known: first.known, steps: first.derived, relations, assumed };
+  assumed.add('efficiency');
+  const second = derive(new Map([...first.known, ['efficiency', WHOLE]]), relations);
+  return { known: second.known, steps: [...first.derived, ...second.derived], relations, assumed };
+};
+
+/**
+ * Derives all that follows for the species asked. `series` multiplies the charge (cells in series, bypass). Notes:
+ * `surplus-agrees`. Fault: `contradiction` with both values, at one of the quantities that disagree.
+ */
+export const deriveAll = (problem: Problem, given: readonly Given[], series: Measured): Result<Derived> => {
+  const start = new Map(constantsOf(problem, series));
+  const written = writtenEfficiency(problem);
+  if (written !== undefined) start.set('efficiency', written);
+  const relations = relationsFor(problem, given, series);
+  return chain(checkTank(problem, given), () =>
+    chain(gather(start, given), (known) => judge(solve(problem, known, relations), given)),
+  );
+};

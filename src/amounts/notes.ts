@@ -1,0 +1,91 @@
+import { type Note, note } from '../report/note.ts';
+import type { AmountsAnswer, Working } from './working.ts';
+import { idleGivens } from './enough.ts';
+import { gasKind } from './gases.ts';
+import { PER_AREA } from './unit-area.ts';
+
+const ROUNDING = 1e-9;
+
+const when = (holds: boolean, code: Note['code'], message: string): readonly Note[] =>
+  holds ? [note(code, message)] : [];
+
+const shareNotes = ({ problem, derived, parts }: Working): readonly Note[] => {
+  const efficiency = derived.known.get('efficiency');
+  const found = derived.steps.some(({ name }) => name === 'efficiency');
+  const assumed = derived.assumed.has('efficiency');
+  const electrode = problem.circuit.kind === 'electrode';
+  return [
+    ...when(
+      electrode && found,
+      'share-found',
+      `the share of the reaction of ${problem.asked.name} was found from what was measured`,
+    ),
+    ...when(parts.rest !== null, 'share-assigned', 'the other reaction takes the rest of the current'),
+    ...when(assumed && derived.known.has('amount'), 'efficiency-assumed', 'no efficiency is known: 100 % was taken'),
+    ...when(
+      efficiency !== undefined && efficiency.value > 1 + ROUNDING,
+      'efficiency-over-100',
+      'the current efficiency comes out over 100 %: look at the balance, the record and the reactions',
+    ),
+  ];
+};
+
+const volumesShown = (
+  { problem, companions }: Working,
+  answer: AmountsAnswer,
+): readonly { name: string; assumed: boolean }[] =>
+  [problem.asked, ...companions.map(({ stake }) => stake)]
+    .filter(({ name }) => {
+      const quantities = name === problem.asked.name ? answer.quantities : answer.alongside[name];
+      return quantities?.['volume'] !== undefined;
+    })
+    .map(({ name, species }) => ({ name, assumed: gasKind(species) === 'assumed' }));
+
+const gasNotes = (working: Working, answer: AmountsAnswer): readonly Note[] => {
+  const { derived } = working;
+  if (derived.known.has('drop') || !derived.known.has('dry')) return [];
+  const volumes = volumesShown(working, answer);
+  const assumed = volumes.filter((one) => one.assumed).map(({ name }) => name);
+  const dry = derived.assumed.has('vapour_pressure') && volumes.length > 0;
+  return [
+    ...when(assumed.length > 0, 'gas-assumed', `without a state, ${assumed.join(', ')} was taken as a gas`),
+    ...when(dry, 'dry-gas', 'no vapour pressure was given: the gas was taken as dry'),
+  ];
+};
+
+const areaNotes = ({ derived }: Working): readonly Note[] => {
+  const unit = derived.steps.some(({ relation }) => relation.formula === PER_AREA);
+  const free = derived.known.has('thickness') && !derived.known.has('area');
+  return [
+    ...when(unit, 'per-area', 'no area was given: the thickness is that of the mass on 1 m^2'),
+    ...when(free && !unit, 'per-area', 'no area was given: the thickness follows from the current density'),
+  ];
+};
+
+const summedNote = ({ problem }: Working): readonly Note[] => {
+  const several = problem.stakes.filter(({ parts }) => parts.length > 1).map(({ name }) => name);
+  return when(several.length > 0, 'summed', `in several reactions, and added up: ${several.join(', ')}`);
+};
+
+const weightNotes = ({ problem }: Working): readonly Note[] => {
+  const weightless = problem.stakes.filter(({ species }) => problem.weigh(species) === undefined);
+  const names = weightless.map(({ name }) => name).join(', ');
+  return when(weightless.length > 0, 'no-molar-mass', `no standard atomic weight, hence no mass: ${names}`);
+};
+
+const idleNotes = (working: Working): readonly Note[] => {
+  const unit = working.derived.steps.some(({ relation }) => relation.formula === PER_AREA);
+  const idle = idleGivens(working).filter(({ name }) => !(unit && name === 'density'));
+  const names = idle.map(({ field }) => field).join(', ');
+  return when(idle.length > 0, 'given-unused', `not used, for want of other quantities: ${names}`);
+};
+
+/** What the reader of an answer must know. */
+export const amountNotes = (working: Working, answer: AmountsAnswer): readonly Note[] => [
+  ...shareNotes(working),
+  ...summedNote(working),
+  ...gasNotes(working, answer),
+  ...areaNotes(working),
+  ...weightNotes(working),
+  ...idleNotes(working),
+];

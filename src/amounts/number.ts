@@ -1,0 +1,58 @@
+import { type Rational, denominatorOf, numeratorOf, rational, rationalFromText } from '../exact/rational.ts';
+
+/** A decimal number as written, with the uncertainty in brackets after its last digits if there is one. */
+export interface WrittenNumber {
+  readonly value: Rational;
+  /** Standard uncertainty from `2.000(4)`; null where none is written. */
+  readonly uncertainty: Rational | null;
+  /** One unit in the last written digit. */
+  readonly lastDigit: Rational;
+}
+
+const BLANK = '[ \\u00a0\\u2009\\u202f]';
+const WHOLE = `\\d{1,3}(?:${BLANK}\\d{3})+(?!\\d)|\\d+`;
+
+/**
+ * A number at the start of a text: groups of three digits, a decimal point, an uncertainty in brackets, a power of
+ * ten as `e3`, `x10^3` or `× 10³`. Groups: sign, whole part, decimals, uncertainty, exponent, exponent in superscript.
+ */
+export const NUMBER_PATTERN = new RegExp(
+  `([+−-]?)(${WHOLE})?(?:\\.(\\d*))?(?:\\((\\d+(?:\\.\\d+)?)\\))?` +
+    '(?:[eE]([+−-]?\\d{1,3})(?![\\d.])|\\s*[x×*·]\\s*10(?:\\^([+−-]?\\d{1,3})|([⁺⁻]?[⁰¹²³⁴-⁹]{1,3})))?',
+  'uy',
+);
+
+const SUPERSCRIPTS = '⁰¹²³⁴⁵⁶⁷⁸⁹';
+const plainDigits = (text: string): string =>
+  [...text.replaceAll('−', '-').replaceAll('⁻', '-').replaceAll('⁺', '')]
+    .map((sign) => (SUPERSCRIPTS.includes(sign) ? String(SUPERSCRIPTS.indexOf(sign)) : sign))
+    .join('');
+
+const tenTo = (power: number): Rational =>
+  power < 0 ? rational(1n, 10n ** BigInt(-power)) : rational(10n ** BigInt(power));
+
+const MOST_DIGITS = 60;
+
+/** Brackets hold digits of the last places, `2.000(4)` is 0.004; with a point they hold the value, `20.0(1.2)`. */
+const bracketed = (text: string, lastDigit: Rational): Rational =>
+  text.includes('.') ? rationalFromText(text) : rationalFromText(text).mul(lastDigit);
+
+/** The number that a match of `NUMBER_PATTERN` spells; undefined for no digits or an absurd length. */
+export const numberFromMatch = (match: RegExpExecArray): WrittenNumber | undefined => {
+  const [, sign = '', whole = '', decimals = '', uncertainty, ...exponents] = match;
+  const digits = whole.replace(/\D/gu, '');
+  const exponent = Number(plainDigits(exponents.find((text) => text !== undefined) ?? '0'));
+  if (digits + decimals === '' || digits.length + decimals.length > MOST_DIGITS) return undefined;
+  if (Math.abs(exponent) > MOST_DIGITS) return undefined;
+  const size = rationalFromText(`${digits === '' ? '0' : digits}.${decimals}`).mul(tenTo(exponent));
+  const lastDigit = tenTo(exponent - decimals.length);
+  return {
+    value: sign === '' || sign === '+' ? size : size.neg(),
+    uncertainty:
+      uncertainty === undefined ? null : bracketed(uncertainty, tenTo(-decimals.length)).mul(tenTo(exponent)),
+    lastDigit,
+  };
+};
+
+/** The nearest float of an exact number. */
+export const toFloat = (value: Rational): number => Number(numeratorOf(value)) / Number(denominatorOf(value));

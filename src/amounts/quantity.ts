@@ -1,0 +1,228 @@
+import { type Rational, ONE, ZERO, isZero, rationalFromText } from '../exact/rational.ts';
+import { type Note, note } from '../report/note.ts';
+import { type Result, chain, failure, success, withNotes } from '../report/result.ts';
+import { type Span, shiftSpan, spanOf, wholeSpan } from '../report/span.ts';
+import { type Dimension, NUMBER, TEMPERATURE, sameDimension } from './dimension.ts';
+import { type WrittenNumber, NUMBER_PATTERN, numberFromMatch, toFloat } from './number.ts';
+import { type UnitValue, readUnitText } from './unit-expression.ts';
+
+/** What a quantity text may measure: its name in faults, the dimensions it may have, a unit to propose. */
+export interface Measurand {
+  readonly name: string;
+  readonly dimensions: readonly Dimension[];
+  readonly example: string;
+  /** True where a number without a unit says enough: 0.96. */
+  readonly bare?: true;
+}
+
+/** A quantity as read: SI base units throughout; a temperature in kelvins. */
+export interface ReadQuantity {
+  readonly exact: Rational;
+  readonly value: number;
+  /** Standard uncertainty; 0 where none is written. */
+  readonly uncertainty: number;
+  /** One unit in the last written digit. */
+  readonly lastDigit: number;
+  readonly dimension: Dimension;
+}
+
+/** A number and its unit inside the text; places are UTF-16 offsets. */
+interface Segment {
+  readonly number: WrittenNumber;
+  readonly unitText: string;
+  readonly at: number;
+  readonly unitAt: number;
+  readonly end: number;
+}
+
+const LONGEST = 200;
+const PLUS_MINUS = /±|\+\/[-−]|\+-/u;
+/** A unit after its number: a unit of time straight before the next digit (1h30min), else up to the next number. */
+const UNIT_TEXT = /\s*(?:(min|d|h|s)(?=\d)|(.*?)(?=\s+[+−-]?\.?\d|$))\s*/uy;
+
+const badNumber = (text: string, from: number, to: number): Result<never> => {
+  const hint = /\d,\d/u.test(text)
+    ? 'Write the decimal sign as a point and separate thousands by blanks: 1 250.5 A.'
+    : 'Write a number and its unit, as in 250 A, 1 h 30 min, 96 %, 2.000(4) A or 2.000 A ± 0.004 A.';
+  return failure({ code: 'bad-ask', message: 'this is no quantity', span: spanOf(text, from, to), hint });
+};
+
+const numberAt = (text: string, at: number): { readonly number: WrittenNumber; readonly end: number } | undefined => {
+  NUMBER_PATTERN.lastIndex = at;
+  const match = NUMBER_PATTERN.exec(text);
+  const number = match === null ? undefined : numberFromMatch(match);
+  return match === null || number === undefined ? undefined : { number, end: at + match[0].length };
+};
+
+/**
+ * One segment from offset `at`.   1 h 30 min
+ *                                     ^      */
+const segmentAt = (text: string, at: number): Segment | undefined => {
+  const found = numberAt(text, at);
+  if (found === undefined) return undefined;
+  UNIT_TEXT.lastIndex = found.end;
+  const match = UNIT_TEXT.exec(text);
+  const unitText = (match?.[1] ?? match?.[2] ?? '').trim();
+  const unitAt = text.indexOf(unitText, found.end);
+  return { number: found.number, unitText, at, unitAt, end: found.end + (match?.[0].length ?? 0) };
+};
+
+const segmentsOf = (text: string): Result<readonly Segment[]> => {
+  const segments: Segment[] = [];
+  let at = text.length - text.trimStart().length;
+  do {
+    const segment = segmentAt(text, at);
+    if (segment === undefined || /^[,;]/u.test(segment.unitText)) return badNumber(text, at, text.length);
+    segments.push(segment);
+    at = segment.end;
+  } while (at < text.length);
+  return success(segments);
+};
+
+const wrongUnit = (measurand: Measurand, unitText: string, span: Span): Result<never> =>
+  failure({
+    code: 'unknown-unit',
+    message:
+      unitText === '' ? `the unit of ${measurand.name} is missing` : `${unitText} is no unit of ${measurand.name}`,
+    span,
+    hint: `Give it in ${measurand.example}.${unitText === 'C' ? ' Degrees Celsius are written °C.' : ''}`,
+  });
+
+/** A bare zero is zero in every unit but on a temperature scale. */
+const bareUnit = (measurand: Measurand, segments: readonly Segment[]): UnitValue | undefined => {
+  const [only, more] = segments;
+  const [dimension = NUMBER] = measurand.dimensions;
+  if (measurand.bare === true) return { dimension: NUMBER, factor: ONE, offset: ZERO };
+  if (only === undefined || more !== undefined || !isZero(only.number.value)) return undefined;
+  return sameDimension(dimension, TEMPERATURE) ? undefined : { dimension, factor: ONE, offset: ZERO };
+};
+
+const fits = (measurand: Measurand, unit: UnitValue): boolean =>
+  measurand.dimensions.some((dimension) => sameDimension(dimension, unit.dimension));
+
+const looseNote = (unitText: string): Note =>
+  note('unit-reading', `${unitText} was read as one quotient: everything after the slash divides`);
+const ppmNote = (unitText: string): Note => note('unit-reading', `${unitText} was read as a mass fraction, mg/kg`);
+
+/** The unit of a segment in the sense that fits the measurand; `at` is its place in `whole`. */
+const unitFor = (measurand: Measurand, unitText: string, whole: string, at: number): Result<UnitValue> => {
+  const span = spanOf(whole, at, at + unitText.length);
+  const readings = readUnitText(unitText);
+  if (!readings.ok) {
+    const inner = readings.fault.span;
+    return failure({ ...readings.fault, span: inner === undefined ? span : shiftSpan(inner, span.from) });
+  }
+  const index = readings.value.findIndex((unit) => fits(measurand, unit));
+  const unit = readings.value[index];
+  if (unit === undefined) return wrongUnit(measurand, unitText, span);
+  const notes = [...(index > 0 ? [looseNote(unitText)] : []), ...(unitText === 'ppm' ? [ppmNote(unitText)] : [])];
+  return success(unit, notes);
+};
+
+const inUnit = (value: Rational, unit: UnitValue): Rational => value.mul(unit.factor).add(unit.offset);
+
+interface Sum {
+  readonly exact: Rational;
+  readonly uncertainty: Rational;
+  readonly lastDigit: Rational;
+  readonly unit: UnitValue;
+  readonly unitText: string;
+  /** The value as written, for a percentage of the reading. */
+  readonly reading: Rational;
+}
+
+/** The sum of the segments, `1 h 30 min`; a unit that is missing on the last one is `borrowed`. */
+const sumOf = (measurand: Measurand, text: string, segments: readonly Segment[], borrowed: string): Result<Sum> => {
+  let sum: Sum | undefined;
+  const notes: Note[] = [];
+  for (const { number, unitText, unitAt, at, end } of segments) {
+    const written = unitText === '' ? borrowed : unitText;
+    const bare = written === '' ? bareUnit(measurand, segments) : undefined;
+    if (written === '' && bare === undefined) return wrongUnit(measurand, '', wholeSpan(text));
+    const unit = bare === undefined ? unitFor(measurand, written, text, unitText === '' ? at : unitAt) : success(bare);
+    if (!unit.ok) return unit;
+    notes.push(...unit.notes);
+    const { value } = unit;
+    if (sum !== undefined && (!sameDimension(sum.unit.dimension, value.dimension) || !isZero(value.offset)))
+      return badNumber(text, at, end);
+    const exact = inUnit(number.value, value);
+    sum = {
+      exact: sum === undefined ? exact : sum.exact.add(exact),
+      uncertainty: (number.uncertainty ?? ZERO).mul(value.factor),
+      lastDigit: number.lastDigit.mul(value.factor),
+      unit: value,
+      unitText: written,
+      reading: number.value.mul(value.factor),
+    };
+    if (segments.length > 1) sum = { ...sum, reading: sum.exact };
+  }
+  return sum === undefined ? badNumber(text, 0, text.length) : success(sum, notes);
+};
+
+const PERCENT = new Set(['%', 'percent', 'pct']);
+
+/** The size of `± …` in SI units: percent of the reading, or percentage points where the value is a percentage. */
+const spreadOf = (measurand: Measurand, sum: Sum, text: string, right: Segment): Result<Rational> => {
+  const { number, unitText, unitAt } = right;
+  if (unitText === '') return success(number.value.mul(sum.unit.factor).abs());
+  const percentage = PERCENT.has(sum.unitText);
+  if (PERCENT.has(unitText) && !percentage)
+    return success(sum.reading.mul(number.value).mul(rationalFromText('0.01')).abs());
+  const unit = unitFor(measurand, unitText, text, unitAt);
+  return chain(unit, ({ factor }) => success(number.value.mul(factor).abs()));
+};
+
+const readSpread = (measurand: Measurand, text: string, at: number, length: number): Result<Sum> => {
+  const opened = /^\s*\(/u.exec(text.slice(0, at))?.[0].length ?? 0;
+  const closing = opened > 0 ? text.indexOf(')', at) : -1;
+  // Blanks take the place of what is read elsewhere, so that every offset stays that of the whole text.
+  const blank = (from: number, to: number, of: string): string =>
+    of.slice(0, from) + ' '.repeat(to - from) + of.slice(to);
+  const bare = closing < 0 ? text : blank(closing, closing + 1, blank(0, opened, text));
+  const right = segmentsOf(blank(0, at + length, bare));
+  const left = segmentsOf(bare.slice(0, at));
+  if (!left.ok) return left;
+  if (!right.ok) return right;
+  const [spread, more] = right.value;
+  if (spread === undefined || more !== undefined) return badNumber(text, at, text.length);
+  const sum = sumOf(measurand, text, left.value, spread.unitText);
+  if (!sum.ok) return sum;
+  const size = spreadOf(measurand, sum.value, text, spread);
+  return size.ok ? withNotes(success({ ...sum.value, uncertainty: size.value }), sum.notes) : size;
+};
+
+const readSum = (measurand: Measurand, text: string): Result<Sum> => {
+  if (text.trim() === '')
+    return failure({
+      code: 'empty',
+      message: `${measurand.name} is empty`,
+      span: wholeSpan(text),
+      hint: 'Give it a value.',
+    });
+  if (text.length > LONGEST)
+    return failure({ code: 'too-long', message: 'this is too long for a quantity', span: wholeSpan(text) });
+  const sign = PLUS_MINUS.exec(text);
+  if (sign !== null) return readSpread(measurand, text, sign.index, sign[0].length);
+  return chain(segmentsOf(text), (segments) => sumOf(measurand, text, segments, ''));
+};
+
+/**
+ * Reads a quantity text: "250 A", "1 h 30 min", "96 %", "2.000(4) A", "2.000 A ± 0.004 A", "(2.000 ± 0.004) A",
+ * "2 A ± 1 %". What follows ± is one standard uncertainty: percentage points on a percentage, a fraction of the reading
+ * elsewhere, kelvins on °C. Notes: `unit-reading`. Faults, each with its place in the text: `empty`, `too-long`,
+ * `bad-ask` (no quantity), `unknown-unit` (no unit, an unknown one, one with several meanings, or of another dimension).
+ */
+export const readQuantity = (text: string, measurand: Measurand): Result<ReadQuantity> =>
+  chain(readSum(measurand, text), ({ exact, uncertainty, lastDigit, unit }) =>
+    success({
+      exact,
+      value: toFloat(exact),
+      uncertainty: toFloat(uncertainty),
+      lastDigit: toFloat(lastDigit),
+      dimension: unit.dimension,
+    }),
+  );
+
+/** The unit that `want` names for a measurand. Faults as `readQuantity`. */
+export const readWantedUnit = (text: string, measurand: Measurand): Result<UnitValue> =>
+  unitFor(measurand, text.trim(), text, text.length - text.trimStart().length);
