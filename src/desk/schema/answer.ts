@@ -90,6 +90,7 @@ const cellAuditSchema = z.strictObject({
   multipliers: z.exactOptional(z.strictObject({ anode: exactSchema, cathode: exactSchema })),
   electrons: z.strictObject({ claimed: exactSchema.nullable(), found: exactSchema.nullable() }),
   failed: z.array(z.enum(['anode', 'cathode', 'overall', 'electrons'])).readonly(),
+  electronsPerMole: z.record(z.string(), exactSchema).describe('Of each product of the overall reaction.'),
 });
 
 const quantities = z.record(z.string(), quantitySchema);
@@ -97,6 +98,10 @@ const amountsAnswer = z.strictObject({
   quantities: quantities.describe('Of the species asked.'),
   alongside: z.record(z.string(), quantities).describe('Of every other species, for the same charge.'),
   electronsPerMole: z.record(z.string(), exactSchema).describe('Moles of electrons per mole of each species.'),
+  derived: z
+    .array(z.strictObject({ quantity: z.string(), relation: z.string() }))
+    .readonly()
+    .describe('In the order of derivation: each quantity with the relation it follows from.'),
 });
 
 const kind = z.enum(ASK_KINDS);

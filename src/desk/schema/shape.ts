@@ -20,7 +20,7 @@ export const quantitySchema = z
 /** The contract's SPECIES. */
 export const speciesSchema = z
   .strictObject({
-    plain: z.string().describe('The canonical spelling without state: "Cr2O7^2-".'),
+    plain: z.string().describe('The canonical spelling, with the state where written: "Cr2O7^2-(aq)".'),
     composition: z
       .record(z.string(), exactSchema)
       .describe('Atoms of each element; a nuclide is keyed by mass number and symbol: "2H".'),

@@ -1,0 +1,48 @@
+import { type Audit, auditEquation } from '../audit/audit.ts';
+import { type CellAudit, auditCell } from '../audit/cell.ts';
+import { type MediumChoice, chooseMedium } from '../redox/choose-medium.ts';
+import type { Medium } from '../redox/medium.ts';
+import { type Result, chain, inField, map, success } from '../report/result.ts';
+import type { Equation } from '../species/equation.ts';
+import { type ReadingOptions, readEquation } from '../species/read.ts';
+import { allByRank } from './precedence.ts';
+import type { AskOf } from './schema/ask.ts';
+import { readExact, readMedium } from './settings.ts';
+
+type AuditAsk = AskOf<'audit'>;
+type EquationAsk = Extract<AuditAsk, { readonly equation: string }>;
+type CellAsk = Exclude<AuditAsk, EquationAsk>;
+
+/** In an audit a medium is only a check: left out, none is assumed. */
+const statedMedium = (choice: MediumChoice, equation: Equation): Result<Medium | undefined> =>
+  choice === undefined ? success(undefined) : chooseMedium(choice, equation);
+
+/** One equation as written: read, then audited. */
+export const auditOfEquation = (ask: EquationAsk, options: ReadingOptions): Result<Audit> =>
+  chain(inField(readEquation(ask.equation, options), 'equation'), (equation) =>
+    chain(readMedium(ask.medium, options), (choice) =>
+      chain(statedMedium(choice, equation), (medium) => inField(auditEquation(equation, medium), 'equation')),
+    ),
+  );
+
+/** The three equations of a cell and its electron number as claimed: read, then audited together. */
+export const auditOfCell = (ask: CellAsk, options: ReadingOptions): Result<CellAudit> => {
+  const texts = [ask.anode, ask.cathode, ask.overall];
+  const fields = ['anode', 'cathode', 'overall'];
+  const equations = allByRank(texts.map((text, at) => inField(readEquation(text, options), fields[at] ?? '')));
+  return chain(equations, ([anode, cathode, overall]) => {
+    if (anode === undefined || cathode === undefined || overall === undefined) throw new RangeError('three equations');
+    return chain(claimOf(ask), (claim) =>
+      chain(readMedium(ask.medium, options), (choice) =>
+        chain(statedMedium(choice, anode), (medium) =>
+          auditCell({ anode, cathode, overall, ...claim, ...(medium === undefined ? {} : { medium }) }),
+        ),
+      ),
+    );
+  });
+};
+
+const claimOf = ({ electrons }: CellAsk) =>
+  electrons === undefined
+    ? success({})
+    : map(readExact(electrons, 'electrons', '"2"'), (claimed) => ({ electrons: claimed }));

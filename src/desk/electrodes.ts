@@ -1,0 +1,107 @@
+import { type Electrodes, composeCell } from '../cell/compose.ts';
+import type { CellReaction, Electrode, ElectrodeReaction as Placed } from '../cell/cell-reaction.ts';
+import { electrodesOfDiagram } from '../cell/diagram.ts';
+import type { MediumChoice } from '../redox/choose-medium.ts';
+import type { HalfReaction } from '../redox/half-reaction.ts';
+import { completeHalf } from '../redox/half.ts';
+import type { Rational } from '../exact/rational.ts';
+import { type Result, chain, failure, inField, map, success } from '../report/result.ts';
+import type { Equation } from '../species/equation.ts';
+import { readDiagram } from '../species/diagram.ts';
+import { type ReadingOptions, readEquation } from '../species/read.ts';
+import { allByRank } from './precedence.ts';
+import type { AskedMedium, CellFields } from './schema/ask.ts';
+import { readMedium, readShare } from './settings.ts';
+
+/** A cell of two electrodes as an ask gives it. */
+export type ComposedFields = Extract<CellFields, { readonly anode: unknown }>;
+
+/** One skeleton of an ask with all that holds for it, and the fields where its parts stand. */
+export interface SkeletonFields {
+  readonly text: string;
+  readonly medium: AskedMedium | undefined;
+  readonly settle: string | undefined;
+  readonly share?: string | undefined;
+  readonly field: string;
+  readonly mediumField: string;
+}
+
+/** A skeleton that has been read and waits to be balanced. */
+export interface ReadSkeleton {
+  readonly skeleton: Equation;
+  readonly medium: MediumChoice;
+  readonly share: Rational | null;
+}
+
+/** The first step for a skeleton: its text, its helpers and its share. */
+export const readSkeleton = (fields: SkeletonFields, options: ReadingOptions): Result<ReadSkeleton> =>
+  chain(inField(readEquation(fields.text, options), fields.field), (skeleton) =>
+    chain(readMedium(fields.medium, options, fields.mediumField), (medium) =>
+      map(shareOf(fields), (share) => ({ skeleton, medium, share })),
+    ),
+  );
+
+const shareOf = ({ share, field }: SkeletonFields): Result<Rational | null> =>
+  share === undefined ? success(null) : readShare(share, `${field}.share`);
+
+/** A fault that the floor below placed in `medium`, placed where the ask gives the medium. */
+const renamed = <T>(result: Result<T>, to: string): Result<T> =>
+  result.ok || result.fault.field !== 'medium' ? result : failure({ ...result.fault, field: to });
+
+/** The second step: helpers and electrons found. */
+export const balanceSkeleton = ({ skeleton, medium }: ReadSkeleton, fields: SkeletonFields): Result<HalfReaction> =>
+  inField(renamed(completeHalf(skeleton, medium, fields.settle), fields.mediumField), fields.field);
+
+const fieldsAt = (cell: ComposedFields, electrode: Electrode): readonly SkeletonFields[] =>
+  cell[electrode].map((reaction, index) => {
+    const field = `${electrode}[${String(index)}]`;
+    const own = typeof reaction === 'string' ? { skeleton: reaction } : reaction;
+    return {
+      text: own.skeleton,
+      medium: own.medium ?? cell.medium,
+      settle: own.settle ?? cell.settle,
+      share: own.share,
+      field,
+      mediumField: own.medium === undefined ? 'medium' : `${field}.medium`,
+    };
+  });
+
+/** Both electrodes of a cell: all skeletons are read before one is balanced. */
+export const readElectrodes = (cell: ComposedFields, options: ReadingOptions): Result<Electrodes> => {
+  const anode = fieldsAt(cell, 'anode');
+  const fields = [...anode, ...fieldsAt(cell, 'cathode')];
+  return chain(allByRank(fields.map((one) => readSkeleton(one, options))), (skeletons) => {
+    const halves = skeletons.map((one, at) => placed(one, fields[at]));
+    return map(allByRank(halves), (list) => ({
+      anode: list.slice(0, anode.length),
+      cathode: list.slice(anode.length),
+    }));
+  });
+};
+
+const placed = (skeleton: ReadSkeleton, fields: SkeletonFields | undefined): Result<Placed> => {
+  if (fields === undefined) throw new RangeError('a skeleton without its fields');
+  return map(balanceSkeleton(skeleton, fields), (half) => ({ half, share: skeleton.share }));
+};
+
+/** Two electrodes to their cell reaction: read, balanced, composed. */
+export const composeFields = (cell: ComposedFields, options: ReadingOptions): Result<CellReaction> =>
+  chain(readElectrodes(cell, options), (electrodes) => composeCell(electrodes, { separator: cell.separator === true }));
+
+/** A cell diagram to its cell reaction: read, told apart into electrodes, composed. */
+export const composeDiagram = (text: string, options: ReadingOptions): Result<CellReaction> =>
+  chain(inField(readDiagram(text, options), 'diagram'), (diagram) =>
+    inField(
+      chain(electrodesOfDiagram(diagram), (electrodes) => composeCell(electrodes)),
+      'diagram',
+    ),
+  );
+
+/** A fault of a part, seen from the whole ask: `anode[0]` in `cell` is `cell.anode[0]`. */
+export const under = <T>(result: Result<T>, prefix: string): Result<T> =>
+  result.ok
+    ? result
+    : failure({
+        ...result.fault,
+        field: result.fault.field === undefined ? prefix : `${prefix}.${result.fault.field}`,
+      });
