@@ -1,0 +1,64 @@
+import { Argument, Command, type CommandUnknownOpts, Option } from '@commander-js/extra-typings';
+import { LIST_FORMATS, auditList } from './audit-list.ts';
+import {
+  balancingFields,
+  commonFields,
+  defineOption,
+  given,
+  helpersOption,
+  jsonOption,
+  mediumOption,
+  plainOption,
+  strictOption,
+  whereOption,
+} from './options.ts';
+import { type Shell, examples } from './shell.ts';
+
+/** `audit`: one equation, a whole cell, or a file of equations. */
+export const auditCommand = (shell: Shell): CommandUnknownOpts => {
+  const command = new Command('audit')
+    .description('check a hand-balanced equation, a whole cell, or a file of equations')
+    .addArgument(new Argument('[equation]', 'the equation with its coefficients: "2 H2 + O2 -> 2 H2O"'))
+    .option('--anode <EQUATION>', 'the anode line of a whole cell')
+    .option('--cathode <EQUATION>', 'its cathode line')
+    .option('--overall <EQUATION>', 'its claimed overall reaction')
+    .option('--electrons <N>', 'its claimed electron number')
+    .option(
+      '--file <FILE>',
+      'a text with one equation a line ("label: equation", # comments), or CSV; - for standard input',
+    )
+    .option('--column <NAME>', 'the file is CSV and the equations stand in this column')
+    .addOption(new Option('--format <FORMAT>', 'how a file is reported').choices(LIST_FORMATS).default('text' as const))
+    .addOption(mediumOption)
+    .addOption(helpersOption)
+    .addOption(whereOption)
+    .addOption(defineOption)
+    .addOption(strictOption)
+    .addOption(plainOption)
+    .addOption(jsonOption)
+    .addHelpText(
+      'after',
+      examples(
+        'couplet audit "MnO4^- + 8 H^+ + 5 e^- -> Mn^2+ + 3 H2O"',
+        'couplet audit --anode "Zn -> Zn^2+ + 2 e^-" --cathode "Ag^+ + e^- -> Ag" --overall "Zn + 2 Ag^+ -> Zn^2+ + 2 Ag" --electrons 2',
+        'couplet audit --file equations.txt --format markdown',
+        'couplet audit --file results.csv --column equation --format ndjson',
+        'cat equations.txt | couplet audit --file -',
+      ),
+    );
+  return command.action(async (equation, options) => {
+    const { anode, cathode, overall, electrons, file, column, format } = options;
+    const { medium } = balancingFields(options);
+    const fields = given({ medium, ...commonFields(options) });
+    const whole = given({ anode, cathode, overall, electrons });
+    const ways = [equation, file, Object.keys(whole).length > 0 ? whole : undefined].filter((way) => way !== undefined);
+    if (ways.length !== 1) command.error('Give an equation, or --anode, --cathode and --overall, or --file.');
+    if (file !== undefined) {
+      shell.finish(
+        await auditList({ path: file, column, format: options.json === true ? 'ndjson' : format, fields }, shell.world),
+      );
+      return;
+    }
+    await shell.ask({ ask: 'audit', ...given({ equation }), ...whole, ...fields }, options);
+  });
+};

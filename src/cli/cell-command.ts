@@ -1,0 +1,61 @@
+import { Command, type CommandUnknownOpts } from '@commander-js/extra-typings';
+import {
+  anodeMediumOption,
+  anodeOption,
+  cathodeMediumOption,
+  cathodeOption,
+  cellFields,
+  diagramOption,
+  missingOfCell,
+  separatorOption,
+} from './electrode-option.ts';
+import {
+  balancingFields,
+  commonFields,
+  defineOption,
+  helpersOption,
+  jsonOption,
+  mediumOption,
+  plainOption,
+  settleOption,
+  strictOption,
+  whereOption,
+} from './options.ts';
+import { type Shell, examples } from './shell.ts';
+
+/** `cell`: two electrodes, or a diagram, to the overall reaction and its electron number. */
+export const cellCommand = (shell: Shell): CommandUnknownOpts => {
+  const command = new Command('cell')
+    .description('compose the overall reaction of a cell and its electron number')
+    .addOption(anodeOption)
+    .addOption(cathodeOption)
+    .addOption(mediumOption)
+    .addOption(helpersOption)
+    .addOption(anodeMediumOption)
+    .addOption(cathodeMediumOption)
+    .addOption(separatorOption)
+    .addOption(diagramOption)
+    .addOption(settleOption)
+    .addOption(whereOption)
+    .addOption(defineOption)
+    .addOption(strictOption)
+    .addOption(plainOption)
+    .addOption(jsonOption)
+    .addHelpText(
+      'after',
+      examples(
+        'couplet cell --anode "H2O -> O2" --cathode "Cu^2+ -> Cu" --medium acid',
+        'couplet cell --anode "OH^- -> O2" --cathode "Zn(OH)4^2- -> Zn @ 92 %" --cathode "H2O -> H2 @ 8 %" --medium base',
+        'couplet cell --anode "Cl^- -> Cl2" --cathode "H2O -> H2" --cathode-medium base --separator',
+        'couplet cell --diagram "Zn | Zn^2+ || Cu^2+ | Cu"',
+      ),
+    );
+  return command.action((options) => {
+    const missing = missingOfCell(options);
+    if (missing !== null) command.error(missing);
+    return shell.ask(
+      { ask: 'cell', ...cellFields(options), ...balancingFields(options), ...commonFields(options) },
+      options,
+    );
+  });
+};

@@ -1,0 +1,61 @@
+import { Command, type CommandUnknownOpts } from '@commander-js/extra-typings';
+import { amountsCommand } from './amounts-command.ts';
+import { auditCommand } from './audit-command.ts';
+import { halfCommand, redoxCommand } from './balancing-commands.ts';
+import { batchCommand, sheetCommand } from './file-commands.ts';
+import { cellCommand } from './cell-command.ts';
+import { equationCommand, speciesCommand } from './reading-commands.ts';
+import { type Shell, examples } from './shell.ts';
+
+const VERSION = '0.1.0';
+
+const AFTER = `${examples(
+  'couplet half "MnO4^- -> Mn^2+" --medium acid',
+  'couplet cell --anode "H2O -> O2" --cathode "Cu^2+ -> Cu"',
+  'couplet audit "2 H2 + O2 -> 2 H2O"',
+  'couplet sheet fixtures/tern-quay.yaml',
+)}
+Exit codes: 0 answered; 1 a fault, or an audit that is unbalanced; 2 the command itself was wrong.
+Charges are written with a caret: Cu^2+, SO4^2-; the electron is e^-. couplet COMMAND --help shows more.
+`;
+
+/** The line and its errors go to the world; nothing ends the process. */
+const bound = (command: CommandUnknownOpts, { world }: Shell): CommandUnknownOpts =>
+  command
+    .exitOverride()
+    .showHelpAfterError('Add --help for the options and examples.')
+    .configureOutput({
+      writeOut: (text) => void world.out(text),
+      writeErr: (text) => {
+        world.err(text);
+      },
+      getOutHelpWidth: () => 100,
+      getErrHelpWidth: () => 100,
+      getOutHasColors: () => false,
+      getErrHasColors: () => false,
+    });
+
+/** All commands. */
+export const program = (shell: Shell): CommandUnknownOpts => {
+  const root = new Command('couplet')
+    .description(
+      'Balances electrode reactions exactly, composes cells, audits equations, and finds charge, mass and gas.',
+    )
+    .version(VERSION, '--version', 'print the version')
+    .helpOption('--help', 'show this help')
+    .addHelpText('after', AFTER);
+  bound(root, shell);
+  const commands = [
+    halfCommand(shell),
+    redoxCommand(shell),
+    cellCommand(shell),
+    auditCommand(shell),
+    amountsCommand(shell),
+    speciesCommand(shell),
+    equationCommand(shell),
+    sheetCommand(shell),
+    batchCommand(shell),
+  ];
+  for (const command of commands) root.addCommand(bound(command.helpOption('--help', 'show this help'), shell));
+  return root.helpCommand(false);
+};

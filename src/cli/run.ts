@@ -1,0 +1,40 @@
+import { CommanderError } from '@commander-js/extra-typings';
+import { BrokenList } from './equation-list.ts';
+import { program } from './program.ts';
+import type { Shell } from './shell.ts';
+import { answerAsk } from './outcome.ts';
+import { type ExitCode, type World, UnreadableFile } from './world.ts';
+
+/** Help and version end a command well; everything else that commander ends is a wrong command. */
+const codeOf = (problem: unknown, world: World): ExitCode => {
+  if (problem instanceof CommanderError) return problem.exitCode === 0 ? 0 : 2;
+  if (problem instanceof UnreadableFile || problem instanceof BrokenList) {
+    world.err(`${problem.message}\n`);
+    return 2;
+  }
+  world.err(`The program broke: ${problem instanceof Error ? problem.message : String(problem)}. Please report it.\n`);
+  return 1;
+};
+
+/**
+ * The command line: `argv` without the program's own name. Standard output carries answers only.
+ * Gives 0 where it was answered, 1 for a fault or an unbalanced audit, 2 where the command itself was wrong.
+ */
+export const run = async (argv: readonly string[], world: World): Promise<ExitCode> => {
+  let code: ExitCode = 0;
+  const shell: Shell = {
+    world,
+    finish: (outcome) => {
+      code = outcome;
+    },
+    ask: async (fields, showing) => {
+      code = await answerAsk(fields, showing, world);
+    },
+  };
+  try {
+    await program(shell).parseAsync([...argv], { from: 'user' });
+    return code;
+  } catch (problem) {
+    return codeOf(problem, world);
+  }
+};

@@ -1,0 +1,54 @@
+/** What the command line touches of its surroundings, so that it is tested without a process. */
+export interface World {
+  /** Standard output; resolves when more may be written. */
+  readonly out: (text: string) => Promise<void>;
+  /** Standard error. */
+  readonly err: (text: string) => void;
+  /** Standard input. */
+  readonly input: AsyncIterable<Uint8Array>;
+  /** The bytes of a file; fails as Node does where it cannot be read. */
+  readonly open: (path: string) => AsyncIterable<Uint8Array>;
+  /** True where standard output is a terminal: it gets Unicode, a pipe gets plain text. */
+  readonly terminal: boolean;
+  /** True where colour is wanted: a terminal, and NO_COLOR not set. */
+  readonly colour: boolean;
+}
+
+/** 0 answered; 1 a fault, or an audit that is `unbalanced`; 2 the command itself was wrong. */
+export type ExitCode = 0 | 1 | 2;
+
+/** A file that could not be read, in words for the person at the keyboard. */
+export class UnreadableFile extends Error {}
+
+const WHY: Readonly<Record<string, string>> = {
+  ENOENT: 'there is no such file',
+  EISDIR: 'it is a folder',
+  EACCES: 'reading it is not permitted',
+};
+
+const codeOf = (problem: unknown): string =>
+  typeof problem === 'object' && problem !== null && 'code' in problem ? String(problem.code) : '';
+
+/** The bytes of `path`, or of standard input for "-". Throws `UnreadableFile`. */
+export const bytesOf = async function* (world: World, path: string): AsyncGenerator<Uint8Array> {
+  try {
+    yield* path === '-' ? world.input : world.open(path);
+  } catch (problem) {
+    const code = codeOf(problem);
+    if (code === '') throw problem;
+    throw new UnreadableFile(`${path} cannot be read: ${WHY[code] ?? code}.`);
+  }
+};
+
+/** The whole text of `path`, or of standard input for "-". Throws `UnreadableFile`, also where it is not UTF-8. */
+export const textOf = async (world: World, path: string): Promise<string> => {
+  const decoder = new TextDecoder('utf-8', { fatal: true });
+  let text = '';
+  try {
+    for await (const chunk of bytesOf(world, path)) text += decoder.decode(chunk, { stream: true });
+    return text + decoder.decode();
+  } catch (problem) {
+    if (problem instanceof TypeError) throw new UnreadableFile(`${path} cannot be read: it is not UTF-8 text.`);
+    throw problem;
+  }
+};
