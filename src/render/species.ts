@@ -6,8 +6,7 @@ import { quantityText } from './figure.ts';
 import type { Look } from './look.ts';
 import { speciesText } from './spelling.ts';
 
-const spelled = (species: ShownSpecies, look: Look): string =>
-  speciesText(species.plain, look) + (species.state === null ? '' : `(${species.state})`);
+const spelled = (species: ShownSpecies, look: Look): string => speciesText(species.plain, look);
 
 const atoms = (species: ShownSpecies): string =>
   Object.entries(species.composition)

@@ -1,0 +1,55 @@
+import { excerpt } from '../report/excerpt.ts';
+import type { Fault, ShownCoupling } from '../report/fault.ts';
+import { columns, indented } from './columns.ts';
+import type { Look } from './look.ts';
+import { reactionText, speciesText } from './spelling.ts';
+
+const MOST = 8;
+
+const couplingRow = (coupling: ShownCoupling, look: Look): readonly string[] => [
+  reactionText((coupling.overall ?? coupling.reaction)?.plain ?? '', look),
+  `${coupling.electrons} e-`,
+  `--settle ${JSON.stringify(coupling.assume)}`,
+];
+
+const list = (head: string, rows: readonly (readonly string[])[], look: Look): readonly string[] => {
+  const shown = columns(rows.slice(0, MOST), ['left', 'right', 'left']);
+  const more = rows.length > MOST ? [`and ${String(rows.length - MOST)} more`] : [];
+  return rows.length === 0 ? [] : [look.paint.faint(head), ...indented([...shown, ...more])];
+};
+
+/** What a fault carries besides its sentence: the readings to choose from, the ways to settle it, how it would balance. */
+const particulars = (fault: Fault, look: Look): readonly string[] => {
+  switch (fault.code) {
+    case 'several-readings':
+      return list(
+        'write one of these',
+        fault.readings.map((reading) => [speciesText(reading, look)]),
+        look,
+      );
+    case 'several-balances':
+      return fault.couplings.length > 0
+        ? list(
+            'settle it with one of these',
+            fault.couplings.map((one) => couplingRow(one, look)),
+            look,
+          )
+        : list(
+            'each of these balances',
+            fault.family.map((one) => [reactionText(one.plain, look)]),
+            look,
+          );
+    case 'wrong-side':
+      return list('as it would balance', [[reactionText(fault.reaction.plain, look)]], look);
+    case 'no-electrons':
+      return list('as it balances', [[reactionText(fault.reaction.plain, look)]], look);
+    case 'not-enough-given':
+      return list('give one of these', [[fault.missing.join(', ')]], look);
+    default:
+      return [];
+  }
+};
+
+/** A fault for a person: the place with carets, the sentence, the hint, and what else it carries. */
+export const renderFault = (fault: Fault, text: string | null, look: Look): string =>
+  `${[excerpt(fault, text), ...indented(particulars(fault, look))].join('\n')}\n`;
