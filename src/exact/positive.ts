@@ -52,8 +52,10 @@ export const nonNegativeWith = (
  * sum of the solutions found is strictly positive.
  */
 export const idleColumns = (strict: IntegerMatrix, free: IntegerMatrix): readonly number[] => {
+  const width = widthOf(strict);
+  if (atLeast(strict, free, new Array<bigint>(width).fill(1n)).kind === 'solvable') return [];
   const live = new Set<number>();
-  return range(widthOf(strict)).filter((column) => {
+  return range(width).filter((column) => {
     if (live.has(column)) return false;
     const found = nonNegativeWith(strict, free, column);
     found?.strict.forEach((value, index) => {

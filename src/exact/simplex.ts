@@ -24,16 +24,22 @@ interface Tableau {
  * (Farkas' lemma: A. Schrijver, Theory of Linear and Integer Programming, 1986, section 7.3).
  *
  * First phase of the simplex method: minimise the sum of artificial variables a >= 0 in S B y + a = S b, S the signs
- * that make S b >= 0. Rows stay whole, since an equation may be scaled by any positive number. Bland's rule (Math. Oper.
- * Res. 2 (1977) 103), the least index in and the least index out, cannot cycle, so the loop ends. At the end the dual
- * values y* = 1 - cost[a] satisfy y* S B <= 0 and y* S b = the least sum; u = -y* S.
+ * that make S b >= 0. Rows stay whole, since an equation may be scaled by any positive number. While the sum falls the
+ * steepest column enters; once a step leaves it as it was Bland's rule (Math. Oper. Res. 2 (1977) 103), the least index
+ * in and the least index out, which cannot cycle, rules until it falls again. A vertex never comes back after a fall, so
+ * the loop ends, when the sum is 0 or when nothing lowers it. Then the dual values y* = 1 - cost[a] satisfy
+ * y* S B <= 0 and y* S b = the least sum; u = -y* S.
  */
 export const solveNonNegative = (matrix: IntegerMatrix, right: IntegerVector, width: number): Feasibility => {
   const tableau = startTableau(matrix, right, width);
-  for (let column = entering(tableau); column !== undefined; column = entering(tableau)) {
-    pivotOn(tableau, leaving(tableau, column), column);
-  }
   const last = width + matrix.length + 1;
+  let column = steepest(tableau);
+  while (column !== undefined && entry(tableau.cost, last) !== 0n) {
+    const row = leaving(tableau, column);
+    const falls = entry(tableau.rows[row] ?? [], last) > 0n;
+    pivotOn(tableau, row, column);
+    column = falls ? steepest(tableau) : entering(tableau);
+  }
   return entry(tableau.cost, last) === 0n ? solutionIn(tableau, last) : weightsIn(tableau, right);
 };
 
@@ -63,6 +69,15 @@ const startTableau = (matrix: IntegerMatrix, right: IntegerVector, width: number
 const entering = ({ cost, width }: Tableau): number | undefined => {
   for (let column = 0; column < width; column += 1) if (entry(cost, column) < 0n) return column;
   return undefined;
+};
+
+/** The column with the most negative cost; of equals the first. */
+const steepest = ({ cost, width }: Tableau): number | undefined => {
+  let best: number | undefined;
+  for (let column = 0; column < width; column += 1) {
+    if (entry(cost, column) < (best === undefined ? 0n : entry(cost, best))) best = column;
+  }
+  return best;
 };
 
 /** The row that bounds the rise of `column` first; of equals the one with the least basic index. */
