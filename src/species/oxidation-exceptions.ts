@@ -12,9 +12,10 @@ const BY_COMPOSITION = `
   RuS2 0: Ru 2, S -1; OsS2 0: Os 2, S -1; CuFeS2 0: Cu 1, Fe 3, S -2; CuFeO2 0: Cu 1, Fe 3, O -2;
   Cu2ZnSnS4 0: Cu 1, Zn 2, Sn 4, S -2; Cu2FeSnS4 0: Cu 1, Fe 2, Sn 4, S -2; MnFe2O4 0: Mn 2, Fe 3, O -2;
   AgN3 0: Ag 1, N -1/3; CuN3 0: Cu 1, N -1/3; TlN3 0: Tl 1, N -1/3; NH4N3 0: N -3 x1, N -1/3 x3, H 1;
+  CuFe2S3 0: Cu 1, Fe 5/2, S -2; WC 0: W 4, C -4;
   Ag2C2 0: Ag 1, C -1; Cu2C2 0: Cu 1, C -1; CrO8 -3: Cr 5, O -1; O2PtF6 0: O 1/2, Pt 5, F -1;
   NO2Cl 0: N 5, O -2, Cl -1; ClCN 0: C 4, N -3, Cl -1; BrCN 0: C 4, N -3, Br -1; ICN 0: C 4, N -3, I -1;
-  SiHCl3 0: Si 4, H -1, Cl -1; SiH2Cl2 0: Si 4, H -1, Cl -1; SiH3Cl 0: Si 4, H -1, Cl -1;
+  C2N2S2 0: C 4, N -3, S -1; SiHCl3 0: Si 4, H -1, Cl -1; SiH2Cl2 0: Si 4, H -1, Cl -1; SiH3Cl 0: Si 4, H -1, Cl -1;
   H2NSO3 -1: H 1, N -3, S 6, O -2; H3NSO3 0: H 1, N -3, S 6, O -2;
   Fe7C18N18 0: Fe 3 x4, Fe 2 x3, C 2, N -3; Fe5C12N12 0: Fe 2 x3, Fe 3 x2, C 2, N -3;
   KFe2C6N6 0: K 1, Fe 2 x1, Fe 3 x1, C 2, N -3; NaFe2C6N6 0: Na 1, Fe 2 x1, Fe 3 x1, C 2, N -3;
@@ -28,7 +29,7 @@ const BY_COMPOSITION = `
 const BY_SPELLING = `
   ONOO -1: N 3, O -2 x1, O -1 x2; OONO -1: N 3, O -2 x1, O -1 x2;
   CH3COOOH 0: C 0, H 1, O -2 x1, O -1 x2; CH3CO3H 0: C 0, H 1, O -2 x1, O -1 x2;
-  CH3NO2 0: C -2, H 1, N 3, O -2; C6H5NO2 0: C -2/3, H 1, N 3, O -2; C6H5NO 0: C -2/3, H 1, N 1, O -2;
+  CH3SSCH3 0: C -2, H 1, S -1; CH3NO2 0: C -2, H 1, N 3, O -2; C6H5NO2 0: C -2/3, H 1, N 3, O -2; C6H5NO 0: C -2/3, H 1, N 1, O -2;
   C6H5NHOH 0: C -2/3, H 1, N -1, O -2`;
 
 const readSites = (text: string, counts: ReadonlyMap<string, Rational>): readonly Site[] =>

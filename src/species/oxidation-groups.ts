@@ -23,7 +23,7 @@ const OXOANIONS = `
   -1 NH2SO3 SO3NH2; -2 S2O8; -2 S4O6; -2 S3O6; -2 S5O6; -2 S2O7; -2 S2O6; -2 S2O5; -2 S2O4; -2 S2O3; -2 SO5; -2 SO4;
   -2 SO3; -2 SeO4; -2 SeO3; -2 TeO4; -2 TeO3; -6 TeO6; -2 Cr2O7; -2 CrO4; -2 MoO4; -2 WO4; -3 VO4; -5 P3O10; -4 P2O7;
   -3 PO4; -2 HPO3; -1 H2PO2 PO2H2; -3 AsO4; -3 AsO3; -2 B4O7; -3 BO3; -4 SiO4; -2 SiO3; -1 BF4; -1 PF6; -1 AsF6;
-  -1 SbF6; -2 SiF6; -1 BH4; 1 NH4; 1 N2H5`;
+  -1 SbF6; -2 SiF6; -1 BH4; 1 NH4; 1 N2H5; 2 N2H6`;
 
 const SALT_IONS = `
   -1 NO2; -1 SCN NCS CNS; -1 SeCN NCSe; -1 OCN NCO CNO; -1 CN NC; -2 C2O4; -2 CO3; -1 HCOO HCO2 CHO2;
@@ -32,7 +32,7 @@ const SALT_IONS = `
 
 const BRACKETED = `
   -1 ClO; -1 BrO; -1 IO; -1 NH2; -1 N3; -2 O2; 0 CO; 0 NH3; 0 N2H4; 0 N2; 0 C2H8N2; 0 C4H13N3; 0 C6H18N4; 0 C5H5N;
-  0 C10H8N2; 0 C12H8N2; 0 CH4N2S; 0 C2H3N; 0 C6H15NO3; 0 C2H6OS; 0 CH4O; 0 C2H6O; 0 H2O`;
+  0 C10H8N2; 0 C12H8N2; 0 CH4N2S; 0 CH4N2O; 0 C2H3N; 0 C6H15NO3; 0 C2H6OS; 0 CH4O; 0 C2H6O; 0 H2O`;
 
 const readGroups = (table: string, spelled: boolean, inSaltsOnly: boolean): readonly KnownGroup[] =>
   table.split(';').map((entry) => {

@@ -1,49 +1,9 @@
 import { electronegativity } from '../elements/electronegativity.ts';
-import { type Rational, ZERO, isWhole, isZero, rational, signOf } from '../exact/rational.ts';
-import { withPeroxo } from './oxidation-peroxo.ts';
+import { isZero } from '../exact/rational.ts';
+import { close } from './oxidation-close.ts';
 import { chargeOf, type Site } from './oxidation-site.ts';
-import {
-  anionNumber,
-  boundsOf,
-  commonNumbers,
-  fixedNumber,
-  isHalogen,
-  isHydrideFormer,
-  isMetal,
-} from './oxidation-table.ts';
-
-/** Atoms that share a charge, with what the spelling tells about them. */
-export interface Bag {
-  readonly counts: ReadonlyMap<string, Rational>;
-  readonly charge: Rational;
-  /** Halogens that are spelled in front of oxygen (ClO3): they are not halide. */
-  readonly oxoHalogens: ReadonlySet<string>;
-  /** Known ions or ligands were taken out: H is then acidic first, and carbonyl metals may be negative. */
-  readonly stripped: boolean;
-  readonly carbonyl: boolean;
-}
-
-/** What is settled so far. Over the open elements, the sum of number times count must come to `rest`. */
-interface State {
-  readonly bag: Bag;
-  readonly sites: readonly Site[];
-  readonly open: ReadonlyMap<string, Rational>;
-  readonly rest: Rational;
-}
-
-const assign = (state: State, element: string, number: bigint): State => {
-  const count = state.open.get(element);
-  if (count === undefined || state.open.size < 2) return state;
-  const open = new Map(state.open);
-  open.delete(element);
-  const site = { element, number: rational(number), count };
-  return { ...state, open, sites: [...state.sites, site], rest: state.rest.sub(count.mul(site.number)) };
-};
-
-const assignAll = (state: State, numbers: Iterable<readonly [string, bigint]>): State =>
-  [...numbers].reduce((next, [element, number]) => assign(next, element, number), state);
-
-const openElements = (state: State): readonly string[] => [...state.open.keys()];
+import { type Bag, type State, assign, assignAll, has, openElements } from './oxidation-state.ts';
+import { anionNumber, commonNumbers, fixedNumber, isHalogen, isHydrideFormer, isMetal } from './oxidation-table.ts';
 
 /** F -1, then groups 1 and 2 and aluminium, then hydrogen, then oxygen -2: each only beside other open elements. */
 const assignUsual = (state: State, hydrogen: bigint): State => {
@@ -66,8 +26,6 @@ const BESIDE_CARBON: readonly (readonly [string, bigint])[] = [
   ['Si', 4n],
 ];
 
-const has = (state: State, element: string): boolean => state.bag.counts.has(element);
-
 /** Sulfur beside C, H and O is thiol, sulfoxide, sulfone or sulfonate, and a sum formula does not tell which. */
 const isSulfurOpen = (state: State): boolean => has(state, 'S') && has(state, 'H') && has(state, 'O');
 
@@ -78,7 +36,7 @@ const assignCarbon = (state: State): State => {
   return assignAll(state, [...BESIDE_CARBON, ...phosphorus]);
 };
 
-/** Elements that stay anions when a more electronegative anion is already there (CuAs in Cu3AsS4 is not arsenide). */
+/** Elements that stay anions when a more electronegative anion is already there (As in Cu3AsS4 is no arsenide). */
 const ALWAYS_ANIONS: ReadonlySet<string> = new Set(['N', 'S', 'Se', 'Cl', 'Br', 'I']);
 
 const mostElectronegative = (elements: readonly string[]): string | undefined =>
@@ -117,60 +75,6 @@ const assignSingle = (state: State): State =>
     }),
   );
 
-/** Every choice of common numbers for the open elements that closes the charge. */
-const closings = (state: State): readonly (readonly Site[])[] => {
-  const [next, ...others] = state.open;
-  if (next === undefined) return isZero(state.rest) ? [state.sites] : [];
-  const [element, count] = next;
-  return commonNumbers(element).flatMap((value) => {
-    const site: Site = { element, number: rational(value), count };
-    const rest = state.rest.sub(count.mul(site.number));
-    return closings({ ...state, open: new Map(others), sites: [...state.sites, site], rest });
-  });
-};
-
-const MOST_OPEN = 4;
-
-const closeByTable = (state: State): readonly Site[] | undefined => {
-  if (state.open.size > MOST_OPEN) return undefined;
-  const [only, ...others] = closings(state);
-  return others.length > 0 ? undefined : only;
-};
-
-/** Carbonyl metals go down to -4 (Fe(CO)4^2-). */
-const lowestOf = (state: State, element: string): number =>
-  state.bag.carbonyl && isMetal(element) ? -4 : boundsOf(element).lowest;
-
-/** A metal left over beside hydride is no compound of whole numbers but an alloy with hydrogen in it: LaNi5H6, PdH0.6. */
-const isAlloyHydride = (state: State, element: string, average: Rational): boolean =>
-  isMetal(element) && !isWhole(average) && state.sites.some((site) => site.element === 'H' && signOf(site.number) < 0n);
-
-/** In a compound with several anions a metal must come out at a common number: FeAsS gives 5 for Fe, which is none. */
-const isPlausible = (state: State, element: string, average: Rational): boolean => {
-  if (isAlloyHydride(state, element, average)) return false;
-  const anions = state.sites.filter((site) => !isMetal(site.element) && site.number.compare(ZERO) < 0);
-  if (has(state, 'O') || !isMetal(element) || anions.length < 2 || !isWhole(average)) return true;
-  return commonNumbers(element).some((number) => average.equals(number)) || state.bag.stripped;
-};
-
-/** The last open element takes the average that closes the charge, within its bounds. */
-const closeByAverage = (state: State, element: string, count: Rational): readonly Site[] | undefined => {
-  const average = state.rest.div(count);
-  const { highest } = boundsOf(element);
-  if (average.compare(lowestOf(state, element)) < 0 || !isPlausible(state, element, average)) return undefined;
-  if (average.compare(highest) <= 0) return [...state.sites, { element, number: average, count }];
-  const oxygens = state.sites.find((site) => site.element === 'O')?.count;
-  if (oxygens === undefined) return undefined;
-  const sites = withPeroxo(element, count, average, BigInt(highest), oxygens);
-  return sites === undefined ? undefined : [...state.sites.filter((site) => site.element !== 'O'), ...sites];
-};
-
-const close = (state: State): readonly Site[] | undefined => {
-  const [last, ...others] = state.open;
-  if (last === undefined) return isZero(state.rest) ? state.sites : undefined;
-  return others.length > 0 ? closeByTable(state) : closeByAverage(state, ...last);
-};
-
 const STEPS: readonly ((state: State) => State)[] = [
   assignCarbon,
   assignAnions,
@@ -208,12 +112,3 @@ export const solveBag = (bag: Bag): readonly Site[] | undefined => {
   }
   return undefined;
 };
-
-/** A bag with no spelling to look at. */
-export const bagOf = (counts: ReadonlyMap<string, Rational>, charge: Rational): Bag => ({
-  counts,
-  charge,
-  oxoHalogens: new Set(),
-  stripped: false,
-  carbonyl: false,
-});

@@ -3,8 +3,9 @@ import type { Formula, Member, Part } from '../notation/formula.ts';
 import { exceptionOf, spelledExceptionOf } from './oxidation-exceptions.ts';
 import type { KnownGroup } from './oxidation-groups.ts';
 import { type Allowed, elementCounts, takeGroups } from './oxidation-match.ts';
-import { bagOf, solveBag } from './oxidation-rules.ts';
+import { solveBag } from './oxidation-rules.ts';
 import { chargeOf, merged, repeated, type Site } from './oxidation-site.ts';
+import { bagOf } from './oxidation-state.ts';
 import { isMetal } from './oxidation-table.ts';
 import { type Species, isElectron } from './species.ts';
 
