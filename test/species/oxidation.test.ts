@@ -114,7 +114,9 @@ describe('laws of oxidation numbers', () => {
 
   it('number times count comes to the charge, for any formula that is decided', () => {
     fc.assert(
-      fc.property(atoms, charge, (formula, z) => { expectLaw(plain(formula + z)); }),
+      fc.property(atoms, charge, (formula, z) => {
+        expectLaw(plain(formula + z));
+      }),
       { numRuns: 600 },
     );
   });
