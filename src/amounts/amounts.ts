@@ -10,6 +10,8 @@ import { readGiven, speaksOfTank } from './given.ts';
 import { amountNotes } from './notes.ts';
 import { type Problem, electronsPerMole, setUp } from './problem.ts';
 import { QUANTITY_NAMES, type QuantityName } from './quantities.ts';
+import { FARADAY_FORMULA } from './relations.ts';
+import type { Derivation } from './solver.ts';
 import { readStack } from './stack.ts';
 import { withUnitArea } from './unit-area.ts';
 import type { AmountsAnswer, AmountsRequest, DerivedQuantity, Working } from './working.ts';
@@ -40,10 +42,14 @@ const showCompanion = (
   return showQuantities(all, names, units, request.correlations ?? []);
 };
 
+/** A step through a hidden quantity is shown as the relation it belongs to: no blank, one cell, Faraday's law. */
+const shownFormula = ({ relation, name }: Derivation): string =>
+  relation.step === true && name === 'charge' ? FARADAY_FORMULA : relation.formula;
+
 const stepsOf = ({ derived }: Working): readonly DerivedQuantity[] =>
-  derived.steps.flatMap(({ name, relation }) => {
-    const quantity = QUANTITY_NAMES.find((one) => one === name);
-    return quantity === undefined ? [] : [{ quantity, relation: relation.formula }];
+  derived.steps.flatMap((step) => {
+    const quantity = QUANTITY_NAMES.find((one) => one === step.name);
+    return quantity === undefined ? [] : [{ quantity, relation: shownFormula(step) }];
   });
 
 const answerFrom = (working: Working): AmountsAnswer => {

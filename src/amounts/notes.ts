@@ -2,6 +2,7 @@ import { type Note, note } from '../report/note.ts';
 import type { AmountsAnswer, Working } from './working.ts';
 import { idleGivens } from './enough.ts';
 import { gasKind } from './gases.ts';
+import type { VariableName } from './relations.ts';
 import { PER_AREA } from './unit-area.ts';
 
 const ROUNDING = 1e-9;
@@ -73,9 +74,15 @@ const weightNotes = ({ problem }: Working): readonly Note[] => {
   return when(weightless.length > 0, 'no-molar-mass', `no standard atomic weight, hence no mass: ${names}`);
 };
 
-const idleNotes = (working: Working): readonly Note[] => {
-  const unit = working.derived.steps.some(({ relation }) => relation.formula === PER_AREA);
-  const idle = idleGivens(working).filter(({ name }) => !(unit && name === 'density'));
+/** What only other species make use of, or the thickness on one square metre. */
+const usedElsewhere = (working: Working, answer: AmountsAnswer): readonly VariableName[] => [
+  ...(working.derived.steps.some(({ relation }) => relation.formula === PER_AREA) ? (['density'] as const) : []),
+  ...(volumesShown(working, answer).length > 0 ? (['temperature', 'pressure', 'vapour_pressure'] as const) : []),
+];
+
+const idleNotes = (working: Working, answer: AmountsAnswer): readonly Note[] => {
+  const elsewhere = usedElsewhere(working, answer);
+  const idle = idleGivens(working).filter(({ name }) => !elsewhere.includes(name));
   const names = idle.map(({ field }) => field).join(', ');
   return when(idle.length > 0, 'given-unused', `not used, for want of other quantities: ${names}`);
 };
@@ -87,5 +94,5 @@ export const amountNotes = (working: Working, answer: AmountsAnswer): readonly N
   ...gasNotes(working, answer),
   ...areaNotes(working),
   ...weightNotes(working),
-  ...idleNotes(working),
+  ...idleNotes(working, answer),
 ];

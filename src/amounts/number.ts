@@ -24,9 +24,10 @@ export const NUMBER_PATTERN = new RegExp(
 
 const SUPERSCRIPTS = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 const plainDigits = (text: string): string =>
-  [...text.replaceAll('−', '-').replaceAll('⁻', '-').replaceAll('⁺', '')]
-    .map((sign) => (SUPERSCRIPTS.includes(sign) ? String(SUPERSCRIPTS.indexOf(sign)) : sign))
-    .join('');
+  text
+    .replace(/[−⁻]/gu, '-')
+    .replace(/⁺/gu, '')
+    .replace(/[⁰¹²³⁴-⁹]/gu, (digit) => String(SUPERSCRIPTS.indexOf(digit)));
 
 const tenTo = (power: number): Rational =>
   power < 0 ? rational(1n, 10n ** BigInt(-power)) : rational(10n ** BigInt(power));
@@ -39,7 +40,7 @@ const bracketed = (text: string, lastDigit: Rational): Rational =>
 
 /** The number that a match of `NUMBER_PATTERN` spells; undefined for no digits or an absurd length. */
 export const numberFromMatch = (match: RegExpExecArray): WrittenNumber | undefined => {
-  const [, sign = '', whole = '', decimals = '', uncertainty, ...exponents] = match;
+  const [, sign = '', whole = '', decimals = '', uncertainty, ...exponents] = match as readonly (string | undefined)[];
   const digits = whole.replace(/\D/gu, '');
   const exponent = Number(plainDigits(exponents.find((text) => text !== undefined) ?? '0'));
   if (digits + decimals === '' || digits.length + decimals.length > MOST_DIGITS) return undefined;

@@ -89,12 +89,11 @@ const wrongUnit = (measurand: Measurand, unitText: string, span: Span): Result<n
   });
 
 /** A bare zero is zero in every unit but on a temperature scale. */
-const bareUnit = (measurand: Measurand, segments: readonly Segment[]): UnitValue | undefined => {
-  const [only, more] = segments;
+const bareUnit = (measurand: Measurand, { number }: Segment, alone: boolean): UnitValue | undefined => {
   const [dimension = NUMBER] = measurand.dimensions;
   if (measurand.bare === true) return { dimension: NUMBER, factor: ONE, offset: ZERO };
-  if (only === undefined || more !== undefined || !isZero(only.number.value)) return undefined;
-  return sameDimension(dimension, TEMPERATURE) ? undefined : { dimension, factor: ONE, offset: ZERO };
+  if (!alone || !isZero(number.value) || sameDimension(dimension, TEMPERATURE)) return undefined;
+  return { dimension, factor: ONE, offset: ZERO };
 };
 
 const fits = (measurand: Measurand, unit: UnitValue): boolean =>
@@ -131,30 +130,47 @@ interface Sum {
   readonly reading: Rational;
 }
 
-/** The sum of the segments, `1 h 30 min`; a unit that is missing on the last one is `borrowed`. */
+/** The unit of a segment: its own, the one borrowed from after ±, or none where a bare number says enough. */
+const segmentUnit = (
+  measurand: Measurand,
+  text: string,
+  segment: Segment,
+  alone: boolean,
+  borrowed: string,
+): Result<UnitValue> => {
+  const own = segment.unitText !== '';
+  const written = own ? segment.unitText : borrowed;
+  if (written !== '') return unitFor(measurand, written, text, own ? segment.unitAt : segment.at);
+  const bare = bareUnit(measurand, segment, alone);
+  return bare === undefined ? wrongUnit(measurand, '', wholeSpan(text)) : success(bare);
+};
+
+const addSegment = (sum: Sum | undefined, { number }: Segment, unit: UnitValue, unitText: string): Sum => {
+  const exact = inUnit(number.value, unit);
+  return {
+    exact: sum === undefined ? exact : sum.exact.add(exact),
+    uncertainty: (number.uncertainty ?? ZERO).mul(unit.factor),
+    lastDigit: number.lastDigit.mul(unit.factor),
+    unit,
+    unitText,
+    reading: sum === undefined ? number.value.mul(unit.factor) : sum.exact.add(exact),
+  };
+};
+
+/** Only like adds to like, `1 h 30 min`, and degrees on a scale do not add at all. */
+const addsUp = (sum: Sum | undefined, unit: UnitValue): boolean =>
+  sum === undefined || (sameDimension(sum.unit.dimension, unit.dimension) && isZero(unit.offset));
+
+/** The sum of the segments; a unit that is missing is `borrowed` from after ±. */
 const sumOf = (measurand: Measurand, text: string, segments: readonly Segment[], borrowed: string): Result<Sum> => {
   let sum: Sum | undefined;
   const notes: Note[] = [];
-  for (const { number, unitText, unitAt, at, end } of segments) {
-    const written = unitText === '' ? borrowed : unitText;
-    const bare = written === '' ? bareUnit(measurand, segments) : undefined;
-    if (written === '' && bare === undefined) return wrongUnit(measurand, '', wholeSpan(text));
-    const unit = bare === undefined ? unitFor(measurand, written, text, unitText === '' ? at : unitAt) : success(bare);
+  for (const segment of segments) {
+    const unit = segmentUnit(measurand, text, segment, segments.length === 1, borrowed);
     if (!unit.ok) return unit;
+    if (!addsUp(sum, unit.value)) return badNumber(text, segment.at, segment.end);
     notes.push(...unit.notes);
-    const { value } = unit;
-    if (sum !== undefined && (!sameDimension(sum.unit.dimension, value.dimension) || !isZero(value.offset)))
-      return badNumber(text, at, end);
-    const exact = inUnit(number.value, value);
-    sum = {
-      exact: sum === undefined ? exact : sum.exact.add(exact),
-      uncertainty: (number.uncertainty ?? ZERO).mul(value.factor),
-      lastDigit: number.lastDigit.mul(value.factor),
-      unit: value,
-      unitText: written,
-      reading: number.value.mul(value.factor),
-    };
-    if (segments.length > 1) sum = { ...sum, reading: sum.exact };
+    sum = addSegment(sum, segment, unit.value, segment.unitText === '' ? borrowed : segment.unitText);
   }
   return sum === undefined ? badNumber(text, 0, text.length) : success(sum, notes);
 };

@@ -57,9 +57,12 @@ export const FLOW_RELATIONS: readonly Relation[] = [
   relation('sum', 'p(dry) = p - p_w', { dry: -1, pressure: 1, vapour_pressure: -1 }, true),
 ];
 
+/** Faraday's law of electrolysis, as derivations show it. */
+export const FARADAY_FORMULA = 'n = η Q |ν| / (z F)';
+
 /** Faraday's law and what follows from the amount and mass of one species. */
 const SPECIES_RELATIONS: readonly Relation[] = [
-  relation('product', 'n = η Q |ν| / (z F)', { amount: -1, efficiency: 1, net: 1, faraday: -1 }),
+  relation('product', FARADAY_FORMULA, { amount: -1, efficiency: 1, net: 1, faraday: -1 }),
   relation('product', 'm = n M', { mass: -1, amount: 1, molar_mass: 1 }),
   relation('product', 'm / Q = η M |ν| / (z F)', { mass_per_charge: -1, efficiency: 1, molar_mass: 1, faraday: -1 }),
   relation('product', 'Q / m = 1 / (m / Q)', { charge_per_mass: 1, mass_per_charge: 1 }),

@@ -43,7 +43,7 @@ const unknownUnit = (name: string, span: Span): Fault => {
 };
 
 const digitsOf = (text: string): number =>
-  Number([...text].map((digit) => (SUPERSCRIPTS.includes(digit) ? SUPERSCRIPTS.indexOf(digit) : digit)).join(''));
+  Number(text.replace(/[⁰¹²³⁴-⁹]/gu, (digit) => String(SUPERSCRIPTS.indexOf(digit))));
 
 const unitPiece = (text: string, at: number): Piece | undefined => {
   const whole = unitNamed(text);
@@ -103,7 +103,7 @@ const multiply = (left: UnitValue, right: UnitValue, power: number): UnitValue =
 
 interface Reading {
   readonly value: UnitValue;
-  /** The piece after the last one read. */
+  /** The piece at which reading stopped: the unit itself, or the bracket that closes. */
   readonly next: number;
 }
 
@@ -114,37 +114,48 @@ const failAt = (text: string, piece: Piece | undefined, message: string): Result
 };
 
 /**
- * Reads factors up to a closing bracket or the end. `over` stands for the sign of the next factor's power.
+ * The first operator, closing bracket or end that has no unit before it.
+ *   g / * h
+ *       ^    */
+const misplaced = (pieces: readonly Piece[]): number =>
+  [...pieces, undefined].findIndex((piece, index) => {
+    const before = pieces[index - 1]?.kind;
+    const complete = before === 'unit' || before === 'close';
+    return piece?.kind === 'unit' || piece?.kind === 'open' ? false : !complete;
+  });
+
+/** Whether the next factor divides: in the strict manner a slash holds for one factor, in the loose one for all. */
+const divides = (kind: 'times' | 'over', manner: Manner, before: boolean): boolean =>
+  kind === 'over' || (manner === 'loose' && before);
+
+/**
+ * Reads factors up to a closing bracket or the end; `over` tells whether the next factor divides.
  *   g / ( A h ) kg^-1
  *       ^ next: a slash was just seen
  */
 const readProduct = (text: string, pieces: readonly Piece[], from: number, manner: Manner): Result<Reading> => {
   let value = PLAIN;
   let over = false;
-  let awaiting = true;
   let at = from;
   for (; at < pieces.length; at += 1) {
     const piece = pieces[at];
     if (piece === undefined || piece.kind === 'close') break;
     if (piece.kind === 'over' || piece.kind === 'times') {
-      if (awaiting && at !== from) return failAt(text, piece, 'a unit is missing here');
-      if (piece.kind === 'over' || manner === 'strict') over = piece.kind === 'over';
-      awaiting = true;
+      over = divides(piece.kind, manner, over);
       continue;
     }
-    const factor = piece.kind === 'unit' ? success(readUnit(piece)) : readBracket(text, pieces, at, manner);
+    const factor = piece.kind === 'unit' ? success(readUnit(piece, at)) : readBracket(text, pieces, at, manner);
     if (!factor.ok) return factor;
-    at = factor.value.next > at ? factor.value.next : at;
+    at = factor.value.next;
     value = multiply(value, factor.value.value, over ? -1 : 1);
-    if (manner === 'strict') over = false;
-    awaiting = false;
+    over = manner === 'loose' && over;
   }
-  return awaiting ? failAt(text, pieces[at], 'a unit is missing here') : success({ value, next: at });
+  return success({ value, next: at });
 };
 
-const readUnit = ({ unit, power }: Extract<Piece, { kind: 'unit' }>): Reading => ({
+const readUnit = ({ unit, power }: Extract<Piece, { kind: 'unit' }>, at: number): Reading => ({
   value: multiply(PLAIN, unit, power),
-  next: -1,
+  next: at,
 });
 
 const readBracket = (text: string, pieces: readonly Piece[], at: number, manner: Manner): Result<Reading> => {
@@ -172,6 +183,8 @@ export const readUnitText = (text: string): Result<readonly UnitValue[]> => {
   if (named !== undefined) return success([named]);
   const pieces = piecesOf(text);
   if (!pieces.ok) return pieces;
+  const gap = misplaced(pieces.value);
+  if (gap >= 0) return failAt(text, pieces.value[gap], 'a unit is missing here');
   const strict = readWhole(text, pieces.value, 'strict');
   const loose = readWhole(text, pieces.value, 'loose');
   if (!strict.ok) return strict;
