@@ -1,16 +1,14 @@
 import { type Ledger, ledgerOf } from '../balance/ledger.ts';
-import { speciesMatrix } from '../balance/matrix.ts';
 import type { Reaction } from '../balance/reaction.ts';
 import { residualOf } from '../balance/recount.ts';
 import { gcdOf } from '../exact/integer.ts';
-import { rankOf } from '../exact/matrix.ts';
 import { type Rational, isWhole, numeratorOf, rational } from '../exact/rational.ts';
 import type { Medium } from '../redox/medium.ts';
 import { type Note, note } from '../report/note.ts';
 import { type Result, success } from '../report/result.ts';
 import type { Equation } from '../species/equation.ts';
-import { sameSpecies } from '../species/species.ts';
 import { changesOf, editOf } from './changes.ts';
+import { dimensionOf } from './dimension.ts';
 import { findingsOf } from './findings.ts';
 import { type Repair, repairsOf } from './repairs.ts';
 import { type Draft, draftOf, reactionOf } from './writing.ts';
@@ -57,14 +55,6 @@ export const auditEquation = (equation: Equation, medium?: Medium): Result<Audit
 /** `residual` in the order of `ledger`: elements as they appear, the charge last. */
 const inOrder = (residual: ReadonlyMap<string, Rational>, ledger: Ledger): ReadonlyMap<string, Rational> =>
   new Map([...ledger.keys()].flatMap((label) => [...residual].filter(([other]) => other === label)));
-
-/** Distinct written species minus the rank of their elements and charges: how many balances are free. */
-export const dimensionOf = (draft: Draft): number => {
-  const distinct = draft.filter(
-    ({ species }, index) => draft.findIndex((other) => sameSpecies(other.species, species)) === index,
-  );
-  return distinct.length - rankOf(speciesMatrix(distinct.map(({ species }) => species)).rows);
-};
 
 const commonFactor = (draft: Draft): bigint =>
   draft.every(({ coefficient }) => isWhole(coefficient))

@@ -2,6 +2,8 @@ import type { Medium } from '../redox/medium.ts';
 import { type Note, note } from '../report/note.ts';
 import { type Species, isElectron, plainSpecies, sameSpecies } from '../species/species.ts';
 import { isHydroxide, isProton } from './helper-ions.ts';
+import { dimensionOf } from './dimension.ts';
+import { redoxChangeOf } from './redox-change.ts';
 import type { Draft } from './writing.ts';
 
 /** What is known of an equation when its findings are drawn up. */
@@ -17,6 +19,7 @@ export const findingsOf = (draft: Draft, standing: Standing, medium: Medium | un
   ...mediumClash(draft, medium),
   ...bothSides(draft),
   ...states(draft),
+  ...redox(draft, standing),
 ];
 
 const commonFactor = ({ verdict }: Standing): readonly Note[] =>
@@ -67,7 +70,23 @@ const states = (draft: Draft): readonly Note[] => {
   return [...missing, ...clashes(matter)];
 };
 
+/** A change of state alone, Br2(l) -> Br2(aq), is no clash. */
 const clashes = (matter: readonly Species[]): readonly Note[] => {
+  if (matter.every((one) => one.key === matter[0]?.key)) return [];
   const twice = matter.find((one) => matter.some((other) => other.key === one.key && !sameSpecies(one, other)));
   return twice === undefined ? [] : [note('states-differ', `${plainSpecies(twice)} is written in two states.`)];
 };
+
+/** Electrons beside an oxidation and a reduction, or neither in an equation that conserves. */
+const redox = (draft: Draft, { verdict }: Standing): readonly Note[] => {
+  if (verdict === 'unbalanced') return [];
+  const electrons = draft.some(({ species }) => isElectron(species));
+  const change = redoxChangeOf(draft);
+  if (electrons && change === 'both' && balancesWithout(draft)) {
+    return [note('electrons-left', 'Electrons are left though something is oxidised and something reduced.')];
+  }
+  return !electrons && change === 'none' ? [note('not-redox', 'Nothing is oxidised or reduced.')] : [];
+};
+
+/** True where the species balance without electrons, alone or in part: then an overall reaction is written. */
+const balancesWithout = (draft: Draft): boolean => dimensionOf(draft.filter(({ species }) => !isElectron(species))) > 0;
