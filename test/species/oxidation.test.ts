@@ -1,8 +1,10 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { type Rational, ZERO, showRational } from '../../src/exact/rational.ts';
+import { EXCEPTIONS } from '../../src/species/oxidation-exceptions.ts';
 import { KNOWN_GROUPS } from '../../src/species/oxidation-groups.ts';
 import { type OxidationNumbers, oxidationNumbers } from '../../src/species/oxidation.ts';
+import { chargeOf } from '../../src/species/oxidation-site.ts';
 import type { Species } from '../../src/species/species.ts';
 import { plain } from '../support/plain.ts';
 import { readTable } from '../support/table.ts';
@@ -119,6 +121,12 @@ describe('laws of oxidation numbers', () => {
       }),
       { numRuns: 600 },
     );
+  });
+
+  it('every listed species comes to its charge', () => {
+    for (const [key, sites] of EXCEPTIONS) {
+      expect([key, showRational(chargeOf(sites))]).toEqual([key, key.split(' ^')[1]]);
+    }
   });
 
   it('every known ion and ligand is decided by itself', () => {
