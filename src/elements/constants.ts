@@ -19,6 +19,3 @@ export const FARADAY: Rational = ELEMENTARY_CHARGE.mul(AVOGADRO);
 
 /** Molar gas constant R = N_A k in J/(mol K), exact: 8.31446261815324. */
 export const GAS_CONSTANT: Rational = AVOGADRO.mul(BOLTZMANN);
-
-/** 0 °C in kelvins, exact by the definition of the Celsius temperature. */
-export const ZERO_CELSIUS: Rational = rational(27_315n, 100n);
