@@ -64,9 +64,9 @@ export const EDIT_COSTS = {
   /** The same where other numbers balance without electrons: an overall reaction needs none. */
   electronsAddedThoughSolvable: 2.4,
   electronsDropped: 1.1,
-  termDropped: 2.2,
+  termDropped: 1.7,
   /** Per unit of charge or atom by which a species changes, after the first. */
-  perFurtherUnit: 0.05,
+  perFurtherUnit: 0.08,
   /** A solid, a liquid or a gas becomes an ion. */
   ionInBulk: 1,
   /** Taken off where an element of single atoms is written as dissolved: its charge was left out. */
