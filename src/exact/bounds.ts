@@ -10,7 +10,7 @@ export interface Bounds {
   readonly digits: number;
 }
 
-/** A second or two of work, and some tens of megabytes at most. */
+/** A second or two of work; tens of megabytes, or a few hundred where every number is as long as the bound allows. */
 export const USUAL_BOUNDS: Bounds = { vectors: 5_000, steps: 20_000_000, digits: 1_000 };
 
 /** A search that went beyond a bound; `limit` names it: "5000 vectors". */
