@@ -17,12 +17,18 @@ species -> substance                     {% ([substance]) => build.species(subst
 substance -> formula                     {% ([parts]) => build.substance(parts, null) %}
            | formula charge              {% ([parts, charge]) => build.substance(parts, charge) %}
            | %electron charge            {% ([, charge]) => build.substance(null, charge) %}
+           | %dot formula                {% ([dot, parts]) => build.radical(dot, parts, null) %}
+           | formula %dot                {% ([parts, dot]) => build.radical(dot, parts, null) %}
+           | formula %dot charge         {% ([parts, dot, charge]) => build.radical(dot, parts, charge) %}
+           | formula "^" %dot charge     {% ([parts, , dot, charge]) => build.radical(dot, parts, charge) %}
+           | formula "^" "{" %dot signed "}" {% ([parts, , , dot, charge]) => build.radical(dot, parts, charge) %}
 
 # Adducts: CuSO4*5H2O
 formula -> members                       {% ([members]) => build.firstPart(members) %}
          | formula separator multiplied  {% ([before, separator, part]) => build.nextPart(before, separator, part) %}
 
 separator -> _ %adduct _                 {% ([, token]) => token %}
+           | _ %dot _                    {% ([, token]) => token %}
            | _ %period _                 {% ([, token]) => token %}
 
 multiplied -> members                    {% ([members]) => build.part(null, members) %}

@@ -102,6 +102,13 @@ export const substance = (parts: Chain<PartSyntax> | null, charge: ChargeSyntax 
   parts,
   charge,
   state: null,
+  radical: null,
+});
+
+/** A formula with the dot of a radical. */
+export const radical = (dot: Token, parts: Chain<PartSyntax>, charge: ChargeSyntax | null): SpeciesSyntax => ({
+  ...substance(parts, charge),
+  radical: dot,
 });
 
 /** The species with its state. */

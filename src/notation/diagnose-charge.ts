@@ -29,11 +29,12 @@ const zeroCharge = (text: string, tokens: readonly Token[]): Fault | null => {
   return faultAt(text, 'bad-charge', placeOf(zero), 'a charge of 0 is not written', 'leave the charge out');
 };
 
-const caretFault = (text: string, tokens: readonly Token[], at: number): Fault | null => {
-  const written = chargeAt(tokens, at);
-  const place = placeOf(written[0] ?? (tokens[at] as Token), written.at(-1));
+const caretFault = (text: string, tokens: readonly Token[], caret: Token): Fault | null => {
+  const written = chargeAt(tokens, tokens.indexOf(caret));
+  const place = placeOf(caret, written.at(-1));
   if (written.length === 1) return faultAt(text, 'bad-charge', place, 'a charge was expected after ^', HINT);
   if (!written.some(isSign)) return faultAt(text, 'bad-charge', place, 'this charge has no sign', HINT);
+  if (/^\^\d*[+-]+$/u.test(text.slice(place.from, place.to))) return null;
   return faultAt(text, 'bad-charge', place, 'this is no charge', HINT);
 };
 
@@ -44,10 +45,19 @@ export const chargeFault = (text: string, tokens: readonly Token[]): Fault | nul
   const electron = tokens[0];
   if (isType(electron, 'electron') && tokens.length === 1)
     return faultAt(text, 'bad-charge', placeOf(electron), 'the electron is written with its charge', 'write e^-');
-  const caret = tokens.findIndex(({ type }) => type === 'caret');
-  if (caret >= 0) return caretFault(text, tokens, caret);
+  const caret = tokens.find(({ type }) => type === 'caret');
+  if (caret !== undefined) return caretFault(text, tokens, caret);
   const sign = tokens.find(isSign);
   if (sign === undefined) return null;
   const written = chargeAt(tokens, tokens.indexOf(sign));
-  return faultAt(text, 'bad-charge', placeOf(sign, written.at(-1)), 'this is no charge', HINT);
+  const place = placeOf(sign, written.at(-1));
+  return tokens[0] === sign || place.to === text.length
+    ? faultAt(text, 'bad-charge', place, 'this is no charge', HINT)
+    : faultAt(
+        text,
+        'bad-charge',
+        place,
+        'the formula goes on behind this charge',
+        'a charge comes last, before the state',
+      );
 };

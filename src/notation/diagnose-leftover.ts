@@ -1,13 +1,17 @@
 import type { Token } from 'moo';
 import type { Fault, PlainFaultCode } from '../report/fault.ts';
-import { faultAt, placeOf } from './place.ts';
+import { faultAt, isType, placeOf } from './place.ts';
 
 /** What a token that fits nowhere is called, its code, and what was expected. */
 const LEFTOVERS: ReadonlyMap<string, readonly [PlainFaultCode, string, string]> = new Map([
-  ['space', ['unknown-character', 'a space stands inside the formula', 'write the formula without spaces']],
+  [
+    'space',
+    ['unknown-character', 'a space stands inside the formula', 'leave it out, or put a plus between two species'],
+  ],
   ['state', ['bracket', 'the state comes last', 'put the state after formula and charge']],
   ['arrowMark', ['unknown-character', 'an arrow for gas or precipitate comes last', 'write a state: (g) or (s)']],
   ['adduct', ['bad-count', 'a formula was expected on both sides of the dot', 'write adducts as CuSO4*5H2O']],
+  ['dot', ['bad-count', 'a formula was expected on both sides of the dot', 'write adducts as CuSO4*5H2O']],
   ['period', ['bad-count', 'a formula or digits were expected after the period', 'write adducts as CuSO4*5H2O']],
   ['slash', ['bad-count', 'a fraction stands in brackets', 'write (1/2)']],
   [
@@ -23,7 +27,8 @@ const LEFTOVERS: ReadonlyMap<string, readonly [PlainFaultCode, string, string]> 
 
 /** The fault of the token at `stop`, or of the last one where the text ends too soon. */
 export const leftover = (text: string, tokens: readonly Token[], stop: number): Fault => {
-  const token = tokens[Math.min(stop, tokens.length - 1)] ?? tokens[0];
+  const at = Math.min(stop, tokens.length - 1);
+  const token = (isType(tokens[at - 1], 'space') ? tokens[at - 1] : tokens[at]) ?? tokens[0];
   const place = token === undefined ? { from: 0, to: text.length } : placeOf(token);
   const [code, message, hint] = LEFTOVERS.get(token?.type ?? '') ?? [
     'bad-count',

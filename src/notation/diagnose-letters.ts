@@ -29,12 +29,22 @@ const strange = (tokens: readonly Token[]): number =>
       (isType(token, 'unknown', 'electron') && isType(tokens[at + 1], 'unknown', 'electron')),
   );
 
+/** `(graphite)`, `(solid)`: a word in round brackets behind a formula is meant as a state. */
+const isState = (tokens: readonly Token[], [first, last]: readonly [Token, Token]): boolean =>
+  tokens[tokens.indexOf(first) - 1]?.type === 'roundOpen' &&
+  ['roundClose', 'stray'].includes(tokens[tokens.indexOf(last) + 1]?.type ?? '') &&
+  isLower(first);
+
+const STATE_HINT = 'states are (s), (l), (g), (aq), (cr), (am); a remark goes behind one, as in (s, graphite)';
+
 /** The first letters that are no element, with the elements they may stand for; null where there are none. */
 export const letterFault = (text: string, tokens: readonly Token[]): Fault | null => {
   const run = runAround(tokens, strange(tokens));
   if (run === null) return null;
   const place = placeOf(...run);
   const letters = text.slice(place.from, place.to);
+  if (isState(tokens, run))
+    return faultAt(text, 'unknown-element', place, `no state is written (${letters})`, STATE_HINT);
   const hint = didYouMean(nearestElements(letters)) ?? 'symbols have one capital letter and at most one small one';
   return faultAt(text, 'unknown-element', place, `no element has the symbol ${letters}`, hint);
 };

@@ -10,12 +10,14 @@ export const LIMITS = {
   digits: 40,
   /** Ways to read one spelling; beyond them it is `too-hard`. */
   readings: 64,
+  /** Signs in a charge of signs alone: Fe+++. */
+  signRun: 9,
   /** Places in one species where digits and a period can be taken in two ways: each doubles the readings. */
   doubtfulPeriods: 5,
   /** Plus signs inside one species (charges, subscripts such as 2n+2). */
   plusSigns: 12,
   /** Plus signs in a row of terms without spaces that may be charges as well. */
-  doubtfulSigns: 200,
+  doubtfulSigns: 100,
   /** Placements of plus signs that are told apart; two are enough to refuse. */
   placements: 4,
   /** Species readings kept for reuse, and the length of a text worth keeping. */

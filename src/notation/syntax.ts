@@ -66,4 +66,6 @@ export interface SpeciesSyntax {
   readonly parts: Chain<PartSyntax> | null;
   readonly charge: ChargeSyntax | null;
   readonly state: Token | null;
+  /** The dot of a radical, O2•-: a remark. */
+  readonly radical: Token | null;
 }

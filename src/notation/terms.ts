@@ -26,14 +26,21 @@ const plusSignsOf = (side: string): readonly number[] => {
  *         ^            ^           ^
  */
 const mustSeparate = (side: string, at: number): boolean => {
+  if (endsCharge(side, at)) return isSpaced(side, at);
   const before = side[at - 1] ?? ' ';
   const rest = side.slice(at + 1, at + 40);
-  const spaced = /\s/u.test(before) && /^\s/u.test(rest);
+  const spaced = isSpaced(side, at);
   const formulaFollows = /^\s*(?:[A-Z[]|e[-−^⁻])/u.test(rest) && before !== '^' && before !== '{';
   const numberFollows =
     /^\s*[\d½¼¾⅓⅔]/u.test(rest) && /[A-Za-z)\]}]/u.test(before) && /^\s*[\d./\s½¼¾⅓⅔]+[A-Z[(e]/u.test(rest);
   return spaced || formulaFollows || (numberFollows && !/[xyznm]/u.test(before));
 };
+
+/** The sign of a charge behind a caret: Fe^2+. */
+const endsCharge = (side: string, at: number): boolean => /\^\d*$/u.test(side.slice(Math.max(0, at - 8), at));
+
+const isSpaced = (side: string, at: number): boolean =>
+  /\s/u.test(side[at - 1] ?? ' ') && /^(?:\s|$)/u.test(side.slice(at + 1, at + 2));
 
 /** Doubtful plus signs between two that must separate, and the stretch they stand in. */
 interface Chunk extends Place {
@@ -75,6 +82,7 @@ const waysOf = (side: string, chunk: Chunk, reads: (term: string) => boolean): r
 /** Where nothing reads: a doubtful plus belongs to a charge before another plus or the end, else it separates. */
 const fallback = (side: string, chunk: Chunk): readonly Place[] => {
   const cuts = chunk.doubtful.filter((at) => {
+    if (endsCharge(side, at)) return false;
     const next = side.slice(at + 1, chunk.to);
     return !/^\s*(?:\+|$|[)}\]])/u.test(next) && !/^\s*\(/u.test(next);
   });
@@ -86,16 +94,15 @@ const fallback = (side: string, chunk: Chunk): readonly Place[] => {
  * whether a text is a term. Where no placement reads, the likeliest is given: its terms say what is wrong.
  */
 export const placementsOf = (side: string, reads: (term: string) => boolean): Placements => {
-  let placements: readonly (readonly Place[])[] = [[]];
+  let placements: readonly Place[][] = [[]];
   for (const chunk of chunksOf(side)) {
     if (chunk.doubtful.length > LIMITS.doubtfulSigns) return 'too-many';
     const ways = chunk.doubtful.length === 0 ? [[{ from: chunk.from, to: chunk.to }]] : waysOf(side, chunk, reads);
-    const tried = ways.length === 0 ? [fallback(side, chunk)] : ways;
-    placements = placements
-      .flatMap((before) =>
-        tried.map((way) => (tried.length === 1 && before.length > 0 ? before.concat(way) : [...before, ...way])),
-      )
-      .slice(0, LIMITS.placements);
+    const [way = fallback(side, chunk), ...others] = ways;
+    // One way is the rule: it is put behind what is there, without a copy of the terms before it.
+    if (others.length === 0) for (const placement of placements) placement.push(...way);
+    else
+      placements = placements.flatMap((before) => ways.map((each) => [...before, ...each])).slice(0, LIMITS.placements);
   }
   return placements;
 };

@@ -1,4 +1,5 @@
 import { type Place, arrowsIn, pointsLeft, startsOf } from '../notation/arrows.ts';
+import { type SpanOfPlace, spansIn } from '../notation/code-points.ts';
 import { coefficientOf } from '../notation/coefficient.ts';
 import { LIMITS } from '../notation/limits.ts';
 import { faultAt } from '../notation/place.ts';
@@ -42,7 +43,12 @@ const missingTerm = (text: string, place: Place): Fault => {
   );
 };
 
-const readTerm = (text: string, place: Place, options: ReadingOptions): Result<EquationTerm> => {
+const readTerm = (
+  text: string,
+  place: Place,
+  spanOfPlace: SpanOfPlace,
+  options: ReadingOptions,
+): Result<EquationTerm> => {
   const { from, to } = trimmed(text, place);
   if (from === to) return failure(missingTerm(text, place));
   const term = text.slice(from, to);
@@ -56,7 +62,7 @@ const readTerm = (text: string, place: Place, options: ReadingOptions): Result<E
       coefficient: value,
       coefficientWritten: length > 0,
       species: reading.value.species,
-      span: spanOf(text, from, to),
+      span: spanOfPlace({ from, to }),
     },
     reading.notes,
   );
@@ -99,7 +105,10 @@ const readSide = (
   }
   const [way = []] = ways;
   if (ways.length > 1) return failure(severalPlacements(text, side, ways));
-  return all(way.map(({ from, to }) => readTerm(text, { from: side.from + from, to: side.from + to }, options)));
+  const spanOfPlace = spansIn(text);
+  return all(
+    way.map(({ from, to }) => readTerm(text, { from: side.from + from, to: side.from + to }, spanOfPlace, options)),
+  );
 };
 
 /** Beginnings of the arrow with which the term before it reads; all of them where none does. */

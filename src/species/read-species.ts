@@ -74,6 +74,8 @@ const notesOn = (text: string, ranking: Ranking, chosen: Reading): readonly Note
     const taken = `${text.trim()} was read as ${plainSpecies(chosen.species)}`;
     notes.push(note('reading-chosen', `${taken}: ${ranking.because ?? ''}; it could also be ${others.join(' or ')}`));
   }
+  if (chosen.syntax.radical !== null)
+    notes.push(note('remark-dropped', `the dot of a radical in ${text.trim()} was dropped`));
   const remark = remarkOf(chosen.syntax.state);
   if (remark !== null)
     notes.push(note('remark-dropped', `the remark ${remark} after ${plainSpecies(chosen.species)} was dropped`));
