@@ -44,3 +44,13 @@ export const amountsOf = (
     given,
     ...rest,
   });
+
+/** A half-reaction, or reactions in parallel apart by ' || ' with shares after ' @ '. */
+export const circuitOf = (text: string): Circuit => {
+  if (!text.includes(' || ')) return halfCircuit(text);
+  const reactions = text.split(' || ').map((one): readonly [string, string?] => {
+    const [half = '', share] = one.split(' @ ');
+    return share === undefined ? [half] : [half, share];
+  });
+  return electrodeCircuit(...reactions);
+};
