@@ -47,15 +47,22 @@ interface Chunk extends Place {
   readonly doubtful: readonly number[];
 }
 
+/** The stretches between the signs that must separate, in one pass over the signs. */
 const chunksOf = (side: string): readonly Chunk[] => {
   const masked = withoutRemarks(side);
-  const signs = plusSignsOf(masked);
-  const certain = signs.filter((at) => mustSeparate(masked, at));
-  const starts = [0, ...certain.map((at) => at + 1)];
-  return starts.map((from, index) => {
-    const to = certain[index] ?? side.length;
-    return { from, to, doubtful: signs.filter((at) => at >= from && at < to) };
-  });
+  const chunks: Chunk[] = [];
+  let from = 0;
+  let doubtful: number[] = [];
+  for (const at of [...plusSignsOf(masked), side.length]) {
+    if (at < side.length && !mustSeparate(masked, at)) {
+      doubtful.push(at);
+      continue;
+    }
+    chunks.push({ from, to: at, doubtful });
+    from = at + 1;
+    doubtful = [];
+  }
+  return chunks;
 };
 
 /** Ways to cut one chunk so that each piece reads. Piece after piece from the left; `LIMITS.placements` ways are enough. */
