@@ -2,7 +2,7 @@ import { speciesMatrix } from '../balance/matrix.ts';
 import type { Numbers } from '../balance/solve.ts';
 import type { Unknown } from '../balance/unknowns.ts';
 import { type IntegerVector, nullSpace, range } from '../exact/matrix.ts';
-import { isElectron, plainSpecies } from '../species/species.ts';
+import { type Species, isElectron, plainSpecies } from '../species/species.ts';
 
 /** A balance and the assumption, in words, that singles it out. */
 export interface Assumed {
@@ -24,8 +24,8 @@ const MOST_GIVEN = 12;
 /**
  * The balances that `dimension` - 1 simple conditions single out and in which every species with a side takes part on
  * it. Conditions, the first tried first: an unwritten helper takes no part (a later one before an earlier one, so that
- * the order of the list is its preference); two products, or two reactants, go one to one; of a couple, the reactant
- * gives its product one to one.
+ * the order of the list is its preference); a reactant gives a product one to one, of a couple or of two forms of an
+ * element; two products, or two reactants, go one to one, those of like elements first.
  */
 export const assumedBalances = (unknowns: readonly Unknown[], dimension: number): readonly Assumed[] => {
   const { rows } = speciesMatrix(unknowns.map((unknown) => unknown.species));
@@ -52,35 +52,54 @@ export const onTheirSides = (unknowns: readonly Unknown[], line: Numbers): Numbe
 };
 
 interface Standing {
-  readonly name: string;
+  readonly species: Species;
   readonly index: number;
 }
 
 const conditionsOn = (unknowns: readonly Unknown[]): readonly Condition[] => {
   const standing = (side: Unknown['side']): readonly Standing[] =>
-    unknowns.flatMap((one, index) =>
-      one.side === side && !isElectron(one.species) ? [{ name: plainSpecies(one.species), index }] : [],
+    unknowns.flatMap(({ species, side: own }, index) =>
+      own === side && !isElectron(species) ? [{ species, index }] : [],
     );
-  const row = (a: number, b: number | null, sign: bigint): IntegerVector =>
-    range(unknowns.length).map((index) => (index === a ? 1n : index === b ? sign : 0n));
+  const row = (a: Standing, b: Standing | null, sign: bigint): IntegerVector =>
+    range(unknowns.length).map((index) => (index === a.index ? 1n : index === b?.index ? sign : 0n));
   const pairs = (all: readonly Standing[], verb: string): readonly Condition[] =>
-    all.flatMap((a, at) =>
-      all
-        .slice(at + 1)
-        .map((b) => ({ words: `${a.name} and ${b.name} ${verb} one to one`, row: row(a.index, b.index, -1n) })),
-    );
-  const without = standing('free').toReversed();
+    pairsOf(all).map(([a, b]) => ({
+      words: `${plainSpecies(a.species)} and ${plainSpecies(b.species)} ${verb} one to one`,
+      row: row(a, b, -1n),
+    }));
   const [reactants, products] = [standing('left'), standing('right')];
-  const couples = reactants.flatMap((a) =>
-    products.map((b) => ({ words: `1 ${a.name} gives 1 ${b.name}`, row: row(a.index, b.index, 1n) })),
-  );
+  const isCouple = reactants.length === 1 && products.length === 1;
+  const couples = reactants.flatMap((a) => products.map((b): readonly [Standing, Standing] => [a, b]));
+  const likely = couples.filter(([a, b]) => isCouple || areForms(a.species, b.species));
   return [
-    ...without.map(({ name, index }) => ({ words: `${name} takes no part`, row: row(index, null, 0n) })),
+    ...standing('free')
+      .toReversed()
+      .map((a) => ({ words: `${plainSpecies(a.species)} takes no part`, row: row(a, null, 0n) })),
+    ...likely.map(([a, b]) => ({
+      words: `1 ${plainSpecies(a.species)} gives 1 ${plainSpecies(b.species)}`,
+      row: row(a, b, 1n),
+    })),
     ...pairs(products, 'form'),
     ...pairs(reactants, 'are used'),
-    ...(couples.length === 1 ? couples : []),
   ].slice(0, MOST_CONDITIONS);
 };
+
+/** Two forms of one element: O3 and O2. */
+const areForms = (a: Species, b: Species): boolean => a.composition.size === 1 && unlike(a, b) === 0;
+
+/** Elements that only one of the two holds. */
+const unlike = (a: Species, b: Species): number => {
+  const [first, second] = [[...a.composition.keys()], [...b.composition.keys()]];
+  const shared = first.filter((element) => b.composition.has(element)).length;
+  return first.length + second.length - 2 * shared;
+};
+
+/** All pairs, those of like elements first: NO and NO2 before NO and Cu(NO3)2. */
+const pairsOf = (all: readonly Standing[]): readonly (readonly [Standing, Standing])[] =>
+  all
+    .flatMap((a, at) => all.slice(at + 1).map((b): readonly [Standing, Standing] => [a, b]))
+    .toSorted(([a, b], [c, d]) => unlike(a.species, b.species) - unlike(c.species, d.species));
 
 /** The first `most` ways to choose `count` of `items`, in their order. */
 const choices = <T>(items: readonly T[], count: number, most: number): readonly (readonly T[])[] => {

@@ -1,7 +1,7 @@
 import { explain } from '../balance/explain.ts';
 import { type Reaction, showReaction } from '../balance/reaction.ts';
 import type { Numbers } from '../balance/solve.ts';
-import { type Rational, showRational } from '../exact/rational.ts';
+import { type Rational, isZero, showRational } from '../exact/rational.ts';
 import type { Note } from '../report/note.ts';
 import { type Result, chain, failure, success } from '../report/result.ts';
 import type { Equation } from '../species/equation.ts';
@@ -9,8 +9,10 @@ import { isElectron } from '../species/species.ts';
 import { assumedBalances } from './assume.ts';
 import { type Attempt, attempt, finish, notesOf } from './attempt.ts';
 import { type MediumChoice, chooseMedium } from './choose-medium.ts';
+import { exchangedElectrons } from './exchange.ts';
 import type { Medium } from './medium.ts';
 import { nameCouplings } from './name-coupling.ts';
+import { type PairHalves, halvesOfPair } from './pair-halves.ts';
 import { pairHalves } from './pairs.ts';
 import { settled, severalBalances } from './several.ts';
 
@@ -20,7 +22,7 @@ export interface Coupling {
   readonly overall: Reaction;
   /** Exchanged between the halves at the scale of `overall`. */
   readonly electrons: Rational;
-  /** Each whole and primitive, with its electrons; null where a ratio was assumed. */
+  /** Each whole and primitive, with its electrons; null where they are not known. */
   readonly halves: { readonly oxidation: Reaction; readonly reduction: Reaction } | null;
 }
 
@@ -33,25 +35,15 @@ export interface OverallBalance {
   readonly coupling: Coupling | null;
 }
 
-/** What an overall reaction exchanges, where its halves are not known; undefined where that cannot be told. */
-export type ElectronCount = (reaction: Reaction) => Rational | undefined;
-
 /**
  * The overall reaction of a redox skeleton. `settle` is the `assume` text of one of the couplings that
- * `several-balances` gave; `countElectrons` serves couplings without halves, which are left out without it.
+ * `several-balances` gave.
  * Faults: `unknown-medium`, `bad-ask` (e^- written, both H^+ and OH^- without a medium, unknown assumption),
  * `missing-element`, `several-balances` (or `too-hard`), `no-balance`, `wrong-side`, `idle-species`.
  */
-export const balanceOverall = (
-  skeleton: Equation,
-  choice: MediumChoice,
-  settle?: string,
-  countElectrons?: ElectronCount,
-): Result<OverallBalance> =>
+export const balanceOverall = (skeleton: Equation, choice: MediumChoice, settle?: string): Result<OverallBalance> =>
   chain(withoutElectrons(skeleton), () =>
-    chain(chooseMedium(choice, skeleton), (medium) =>
-      balance(attempt(skeleton, medium, false), settle, countElectrons ?? ((): undefined => undefined)),
-    ),
+    chain(chooseMedium(choice, skeleton), (medium) => balance(attempt(skeleton, medium, false), settle)),
   );
 
 const withoutElectrons = (skeleton: Equation): Result<Equation> => {
@@ -65,13 +57,13 @@ const withoutElectrons = (skeleton: Equation): Result<Equation> => {
   });
 };
 
-const balance = (tried: Attempt, settle: string | undefined, count: ElectronCount): Result<OverallBalance> => {
+const balance = (tried: Attempt, settle: string | undefined): Result<OverallBalance> => {
   const { verdict, medium } = tried;
   if (verdict.kind !== 'unique' && verdict.kind !== 'family') return failure(explain(verdict, tried.asWritten));
   const found = (reaction: Reaction, coupling: Coupling | null, notes: readonly Note[]): Result<OverallBalance> =>
     success({ reaction, dimension: verdict.dimension, medium, coupling }, [...notesOf(tried, reaction), ...notes]);
   if (verdict.kind === 'unique') return found(finish(tried, verdict.numbers), null, []);
-  const couplings = couplingsOf(tried, verdict.dimension, count);
+  const couplings = couplingsOf(tried, verdict.dimension);
   if (settle === undefined) return severalBalances(tried, verdict.dimension, couplings.map(showCoupling));
   return chain(
     settled(couplings, settle, (one) => one.overall),
@@ -79,27 +71,33 @@ const balance = (tried: Attempt, settle: string | undefined, count: ElectronCoun
   );
 };
 
-/** Each way of pairing one oxidation with one reduction; where there is none, simple ratios. */
-const couplingsOf = (tried: Attempt, dimension: number, count: ElectronCount): readonly Coupling[] => {
+/** Each way of pairing one oxidation with one reduction; where there is none, simple assumptions. */
+const couplingsOf = (tried: Attempt, dimension: number): readonly Coupling[] => {
   const paired = pairedCouplings(tried);
   if (paired.length > 0) return paired;
   return assumedBalances(tried.unknowns, dimension).flatMap(({ assume, numbers }) => {
     const overall = finish(tried, numbers);
-    const electrons = count(overall);
-    return electrons === undefined ? [] : [{ assume, overall, electrons, halves: null }];
+    const electrons = exchangedElectrons(overall);
+    return electrons === undefined || isZero(electrons) ? [] : [{ assume, overall, electrons, halves: null }];
   });
 };
 
 const pairedCouplings = (tried: Attempt): readonly Coupling[] => {
-  const pairing = pairHalves(tried.unknowns);
-  const names = nameCouplings(pairing);
-  const reaction = (numbers: Numbers): Reaction => finish({ ...tried, unknowns: pairing.unknowns }, numbers);
-  return pairing.pairs.map((pair, index) => ({
+  const { unknowns } = tried;
+  const pairs = pairHalves(unknowns).map((pair) => ({ pair, halves: halvesOfPair(unknowns, pair) }));
+  const names = nameCouplings(unknowns, pairs);
+  return pairs.map(({ pair, halves }, index) => ({
     assume: names[index] ?? '',
-    overall: reaction(pair.overall),
+    overall: finish(tried, pair.numbers),
     electrons: pair.electrons,
-    halves: { oxidation: reaction(pair.oxidation), reduction: reaction(pair.reduction) },
+    halves: reactionsOf(tried, halves),
   }));
+};
+
+const reactionsOf = (tried: Attempt, { unknowns, oxidation, reduction }: PairHalves): Coupling['halves'] => {
+  if (oxidation === null || reduction === null) return null;
+  const reaction = (numbers: Numbers): Reaction => finish({ ...tried, unknowns }, numbers);
+  return { oxidation: reaction(oxidation), reduction: reaction(reduction) };
 };
 
 const showCoupling = (coupling: Coupling): Parameters<typeof severalBalances>[2][number] => ({

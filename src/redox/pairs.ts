@@ -1,119 +1,137 @@
-import { elementaryBalances } from '../balance/elementary.ts';
-import { pickColumns, speciesMatrix } from '../balance/matrix.ts';
+import { speciesMatrix } from '../balance/matrix.ts';
 import type { Numbers } from '../balance/solve.ts';
 import type { Unknown } from '../balance/unknowns.ts';
-import { gcd, gcdOf, lcm, magnitude } from '../exact/integer.ts';
-import { primitiveVector, range, rankOf } from '../exact/matrix.ts';
-import { type Rational, rational } from '../exact/rational.ts';
-import { ELECTRON, sameSpecies } from '../species/species.ts';
-import { PROTON } from './media.ts';
+import { gcdOf } from '../exact/integer.ts';
+import { type IntegerMatrix, nullSpace, primitiveVector } from '../exact/matrix.ts';
+import { type Rational, ZERO, denominatorOf, numeratorOf, rational, signOf } from '../exact/rational.ts';
+import { isElectron } from '../species/species.ts';
+import { onTheirSides } from './assume.ts';
+import {
+  type Label,
+  type Labelled,
+  type Transition,
+  countOf,
+  distinctLabels,
+  labelRows,
+  labelsOfAll,
+} from './labels.ts';
+import type { Change, MeasuredChange, Pair } from './pair.ts';
+import { usualFirst } from './usual-first.ts';
 
-/** One oxidation with one reduction, and the overall numbers that they add up to. */
-export interface Pair {
-  /** Of `unknowns`, whole and primitive. */
-  readonly oxidation: Numbers;
-  readonly reduction: Numbers;
-  readonly overall: Numbers;
-  /** Exchanged at the scale of `overall`. */
-  readonly electrons: Rational;
-}
-
-/** Pairs with the unknowns that their numbers belong to: those of the skeleton, H^+ if it is passed on, the electron. */
-export interface Pairing {
-  readonly unknowns: readonly Unknown[];
-  readonly pairs: readonly Pair[];
-}
-
-/** Pairs of halves looked at. */
-const MOST_PAIRS = 20_000;
+/** Pairs of changes that are tried. */
+const MOST_TRIES = 4_000;
 
 /**
- * Every way to pair one oxidation with one reduction so that each species of the skeleton takes part on its side. The
- * halves are the elementary balances with an electron: none can lose a species. Where the medium lends no H^+ the two
- * halves may still hand it to one another, as those of a molecular skeleton do; it must then cancel.
- * The pairs come in the order of `usualFirst`; none where the halves are too many to list.
+ * Every way to pair the oxidation of one reactant with the reduction of one reactant in which each species of a skeleton
+ * takes part on its side, the chemist's usual answer first (`usualFirst`). Besides elements and charge each oxidation
+ * number of each element is conserved but for the changes that the pair assumes; the pair counts where that, or with it
+ * that all of a partner's atoms of a changing number change, leaves one balance. In a half at least one element changes, each of its oxidation numbers to one other. None where convention does
+ * not decide the oxidation numbers.
  */
-export const pairHalves = (skeletonUnknowns: readonly Unknown[]): Pairing => {
-  const passesProton = !skeletonUnknowns.some((unknown) => sameSpecies(unknown.species, PROTON));
-  const base = passesProton ? [...skeletonUnknowns, lent(PROTON)] : skeletonUnknowns;
-  const unknowns = [...base, electron('free')];
-  const [oxidations, reductions] = [halves(base, 'right'), halves(base, 'left')];
-  const pairs: Pair[] = [];
-  if (oxidations.length * reductions.length > MOST_PAIRS) return { unknowns, pairs };
-  for (const oxidation of oxidations) {
-    for (const reduction of reductions) {
-      const pair = join(oxidation, reduction);
-      const proton = passesProton ? pair.overall[base.length - 1] : 0n;
-      if (proton === 0n && covers(unknowns, pair) && usesIndependent(unknowns, pair)) pairs.push(pair);
-    }
+export const pairHalves = (unknowns: readonly Unknown[]): readonly Pair[] => {
+  const labelled = labelsOfAll(unknowns.map(({ species }) => species));
+  if (labelled === undefined) return [];
+  const changes = changesOf(unknowns, labelled);
+  const order = usualFirst(unknowns, labelled);
+  const found = new Map<string, Pair>();
+  for (const [one, other] of inPairs(changes)) {
+    const pair = balancePair(unknowns, labelled, one, other);
+    const name = pair?.numbers.join() ?? '';
+    const known = found.get(name);
+    if (pair !== undefined && (known === undefined || order(pair, known) < 0)) found.set(name, pair);
   }
-  return { unknowns, pairs: usualFirst(unknowns, pairs) };
+  return [...found.values()].toSorted(order);
 };
 
-const lent = (species: Unknown['species']): Unknown => ({ species, side: 'free', written: false, helper: true });
-
-const electron = (side: Unknown['side']): Unknown => ({ species: ELECTRON, side, written: false, helper: false });
-
-/** Elementary balances with the electron on `side`: on the left a reduction, on the right an oxidation. */
-const halves = (base: readonly Unknown[], side: 'left' | 'right'): readonly Numbers[] => {
-  const found = elementaryBalances([...base, electron(side)]);
-  return found.kind === 'too-hard' ? [] : found.balances.filter((numbers) => numbers.at(-1) !== 0n);
+/** Changes of each reactant to oxidation numbers that some product has. */
+const changesOf = (unknowns: readonly Unknown[], labelled: readonly Labelled[]): readonly Change[] => {
+  const targets = distinctLabels(labelled.filter((_, index) => unknowns[index]?.side !== 'left'));
+  return unknowns.flatMap((unknown, index) => {
+    if (unknown.side === 'right' || isElectron(unknown.species)) return [];
+    const own = (labelled[index] ?? []).map(({ label }) => label);
+    return subsets(own, targets).map((transitions): Change => ({ index, transitions }));
+  });
 };
 
-/**
- * With electron numbers p of the oxidation and q of the reduction, g their greatest common divisor:
- *     overall = (q/g) oxidation + (p/g) reduction,   electrons = lcm(p, q),   both over the content of the overall numbers
- */
-const join = (oxidation: Numbers, reduction: Numbers): Pair => {
-  const [p, q] = [magnitude(oxidation.at(-1) ?? 0n), magnitude(reduction.at(-1) ?? 0n)];
-  const g = gcd(p, q);
-  const sum = oxidation.map((value, index) => (q / g) * value + (p / g) * (reduction[index] ?? 0n));
-  const content = gcdOf(sum);
-  return {
-    oxidation,
-    reduction,
-    overall: primitiveVector(sum),
-    electrons: rational(lcm(p, q), content === 0n ? 1n : content),
-  };
+/** For each label stay, or go to one target of its element; all stay is no change. */
+const subsets = (own: readonly Label[], targets: readonly Label[]): readonly (readonly Transition[])[] => {
+  let found: readonly (readonly Transition[])[] = [[]];
+  for (const from of own) {
+    const ways = targets.filter((to) => to.element === from.element && to.name !== from.name);
+    const steps = ways.map((to): Transition => ({ from, to, given: to.number.sub(from.number) }));
+    found = found.flatMap((before) => [before, ...steps.map((step) => [...before, step])]);
+  }
+  return found.filter((transitions) => transitions.length > 0);
 };
 
-/** Every species with a side takes part; the halves keep sides, so their sum does. */
-const covers = (unknowns: readonly Unknown[], { overall }: Pair): boolean =>
-  unknowns.every(({ side }, index) => side === 'free' || overall[index] !== 0n);
-
-/** The free species that the two halves use do not depend on one another: H^+ in one and OH^- in the other is no pair. */
-const usesIndependent = (unknowns: readonly Unknown[], { oxidation, reduction }: Pair): boolean => {
-  const used = range(unknowns.length).filter(
-    (index) => unknowns[index]?.side === 'free' && (oxidation[index] !== 0n || reduction[index] !== 0n),
+/** Two changes, those of fewest transitions first; not two that move the same label to the same target. */
+const inPairs = (changes: readonly Change[]): readonly (readonly [Change, Change])[] => {
+  const pairs = changes.flatMap((one, index) =>
+    changes
+      .slice(index + 1)
+      .flatMap((other): readonly (readonly [Change, Change])[] =>
+        one.transitions.some((a) =>
+          other.transitions.some((b) => a.from.name === b.from.name && a.to.name === b.to.name),
+        )
+          ? []
+          : [[one, other]],
+      ),
   );
-  const { rows } = speciesMatrix(unknowns.map((unknown) => unknown.species));
-  return rankOf(pickColumns(rows, used)) === used.length;
+  const size = ([one, other]: readonly [Change, Change]): number => one.transitions.length + other.transitions.length;
+  return pairs.toSorted((a, b) => size(a) - size(b)).slice(0, MOST_TRIES);
+};
+
+const balancePair = (
+  unknowns: readonly Unknown[],
+  labelled: readonly Labelled[],
+  one: Change,
+  other: Change,
+): Pair | undefined => {
+  const transitions = [...one.transitions, ...other.transitions];
+  const width = unknowns.length + transitions.length;
+  const { rows } = speciesMatrix(unknowns.map(({ species }) => species));
+  const joined = [...rows.map((row) => [...row, ...transitions.map(() => 0n)]), ...labelRows(labelled, transitions)];
+  const whole = wholeRows(unknowns.length, labelled, [one, other]);
+  const line = onlyVector(joined, width) ?? onlyVector([...joined, ...whole], width);
+  if (line === undefined) return undefined;
+  const numbers = onTheirSides(unknowns, line.slice(0, unknowns.length));
+  if (numbers === undefined) return undefined;
+  // what moves follows the sign and, since numbers of their own are made primitive, the content of the species' part
+  const scale = gcdOf(numbers) * (numbers.every((value, index) => value === line[index]) ? 1n : -1n);
+  const moved = line.slice(unknowns.length).map((value) => rational(value, scale));
+  if (moved.some((value) => signOf(value) <= 0n)) return undefined;
+  const at = one.transitions.length;
+  const measured = [
+    { ...one, moved: moved.slice(0, at) },
+    { ...other, moved: moved.slice(at) },
+  ].toSorted((a, b) => electronsGiven(b).compare(electronsGiven(a)));
+  const [oxidation, reduction] = measured;
+  if (oxidation === undefined || reduction === undefined) return undefined;
+  const electrons = electronsGiven(oxidation);
+  return signOf(electrons) === 0n ? undefined : { oxidation, reduction, numbers: primitiveVector(numbers), electrons };
+};
+
+/** The vector that spans the null space of `rows`, if one does. */
+const onlyVector = (rows: IntegerMatrix, width: number): Numbers | undefined => {
+  const [line, second] = nullSpace(rows, width);
+  return second === undefined ? line : undefined;
 };
 
 /**
- * The chemist's usual answer first: the pair whose larger half has the fewest written species (a couple of one reactant
- * and one product before anything else), then the fewest written species in both, then the fewest electrons exchanged,
- * then the smallest numbers.
+ * Where the labels alone leave the pair open, all that may change in a partner does: of reactant j, n atoms of a label in
+ * one formula unit,   moved + n nu_j = 0.
  */
-const usualFirst = (unknowns: readonly Unknown[], pairs: readonly Pair[]): readonly Pair[] => {
-  const size = (half: Numbers): number =>
-    unknowns.filter((unknown, index) => unknown.written && half[index] !== 0n).length;
-  const keys = (pair: Pair): readonly number[] => {
-    const [a, b] = [size(pair.oxidation), size(pair.reduction)];
-    return [
-      Math.max(a, b),
-      a + b,
-      pair.electrons.valueOf(),
-      Number(pair.overall.reduce((s, v) => s + magnitude(v), 0n)),
-    ];
-  };
-  const byKeys = (a: Pair, b: Pair): number => {
-    const other = keys(b);
-    return (
-      keys(a)
-        .map((value, at) => value - (other[at] ?? 0))
-        .find((difference) => difference !== 0) ?? 0
-    );
-  };
-  return pairs.toSorted(byKeys);
+const wholeRows = (count: number, labelled: readonly Labelled[], changes: readonly Change[]): IntegerMatrix => {
+  const steps = changes.flatMap(({ index, transitions }) => transitions.map(({ from }) => ({ index, from })));
+  return steps.map(({ index, from }, at) => {
+    const atoms = countOf(labelled[index] ?? [], from);
+    const row = new Array<bigint>(count + steps.length).fill(0n);
+    row[index] = numeratorOf(atoms);
+    row[count + at] = denominatorOf(atoms);
+    return row;
+  });
 };
+
+/** Electrons that a change gives; negative where it takes them. In a pair the two sums are opposite. */
+const electronsGiven = ({ transitions, moved }: MeasuredChange): Rational =>
+  transitions.reduce((sum, { given }, at) => sum.add(given.mul(moved[at] ?? ZERO)), ZERO);
