@@ -5,11 +5,12 @@ import { type ReadingOptions, readEquation, readSpecies } from '../species/read.
 import { type SkeletonFields, balanceSkeleton, composeDiagram, composeFields, readSkeleton } from './electrodes.ts';
 import { type Addressee, type Reply, CONTRACT, addresseeOf, distinctNotes, faulted } from './envelope.ts';
 import { auditOfCell, auditOfEquation } from './audits.ts';
+import { cautionsOfCell, cautionsOfCircuit, cautionsOfHalf } from './cautions.ts';
 import { readCircuit } from './amounts.ts';
 import { allByRank } from './precedence.ts';
 import { readAsk } from './read-ask.ts';
 import type { Answer } from './schema/answer.ts';
-import type { Ask, AskOf } from './schema/ask.ts';
+import type { Ask, AskOf, CellFields } from './schema/ask.ts';
 import { readSettings } from './settings.ts';
 import { showAudit, showCellAudit } from './show/audit.ts';
 import { showCell, showHalf } from './show/reactions.ts';
@@ -26,7 +27,7 @@ const skeletonFields = ({ skeleton, medium, settle }: AskOf<'half'> | AskOf<'red
 /** text -> species -> composition, molar mass, oxidation numbers */
 const answerSpecies = (ask: AskOf<'species'>, options: ReadingOptions): Result<Reply> =>
   chain(inField(readSpecies(ask.text, options), 'text'), (reading) =>
-    map(showReading(reading), (answer) => ({ ask: 'species', answer })),
+    map(showReading(reading), (answer) => ({ ask: 'species', answer, cautions: [] })),
   );
 
 /** text -> species and coefficients, nothing balanced */
@@ -34,27 +35,39 @@ const answerEquation = (ask: AskOf<'equation'>, options: ReadingOptions): Result
   map(inField(readEquation(ask.text, options), 'text'), (equation) => ({
     ask: 'equation',
     answer: showEquation(equation),
+    cautions: [],
   }));
 
 /** text -> skeleton -> half-reaction */
 const answerHalf = (ask: AskOf<'half'>, options: ReadingOptions): Result<Reply> => {
   const fields = skeletonFields(ask);
   return chain(readSkeleton(fields, options), (skeleton) =>
-    map(balanceSkeleton(skeleton, fields), (half) => ({ ask: 'half', answer: showHalf(half) })),
+    map(balanceSkeleton(skeleton, fields), (half) => ({
+      ask: 'half',
+      answer: showHalf(half),
+      cautions: cautionsOfHalf(half),
+    })),
   );
 };
+
+/** null: the ask does not say whether something keeps the electrolytes apart. */
+const dividedOf = (cell: CellFields): boolean | null => ('separator' in cell ? (cell.separator ?? null) : null);
 
 /** texts -> skeletons -> half-reactions -> cell reaction */
 const answerCell = (ask: AskOf<'cell'>, options: ReadingOptions): Result<Reply> => {
   const cell = 'diagram' in ask ? composeDiagram(ask.diagram, options) : composeFields(ask, options);
-  return map(cell, (composed) => ({ ask: 'cell', answer: showCell(composed) }));
+  return map(cell, (composed) => ({
+    ask: 'cell',
+    answer: showCell(composed),
+    cautions: cautionsOfCell(composed, dividedOf(ask)),
+  }));
 };
 
 /** text -> equation as written -> ledger, verdict, repairs; of a whole cell for each part, then all together */
 const answerAudit = (ask: AskOf<'audit'>, options: ReadingOptions): Result<Reply> =>
   'equation' in ask
-    ? map(auditOfEquation(ask, options), (audit) => ({ ask: 'audit', answer: showAudit(audit) }))
-    : map(auditOfCell(ask, options), (audit) => ({ ask: 'audit', answer: showCellAudit(audit) }));
+    ? map(auditOfEquation(ask, options), (audit) => ({ ask: 'audit', answer: showAudit(audit), cautions: [] }))
+    : map(auditOfCell(ask, options), (audit) => ({ ask: 'audit', answer: showCellAudit(audit), cautions: [] }));
 
 /** texts -> reactions with their electron numbers -> what Faraday's law makes of what is given */
 const answerAmounts = (ask: AskOf<'amounts'>, options: ReadingOptions): Result<Reply> => {
@@ -66,6 +79,7 @@ const answerAmounts = (ask: AskOf<'amounts'>, options: ReadingOptions): Result<R
         map(computeAmounts({ circuit: through, species, given: ask.given, ...wanted(ask) }), (amounts) => ({
           ask: 'amounts',
           answer: amounts,
+          cautions: cautionsOfCircuit(through),
         })),
       ),
     ),
@@ -108,7 +122,7 @@ const sealed = (addressee: Addressee, result: Result<Reply>): Answer => {
   if (!result.ok) return faulted(addressee, result.fault);
   const { id } = addressee;
   const envelope = { ...(id === undefined ? {} : { id }), contract: CONTRACT } as const;
-  return { ...envelope, ...result.value, ok: true, notes: distinctNotes(result.notes), cautions: [] };
+  return { ...envelope, ...result.value, ok: true, notes: distinctNotes(result.notes) };
 };
 
 /**

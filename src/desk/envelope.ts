@@ -36,5 +36,5 @@ export const distinctNotes = (notes: readonly Note[]): readonly Note[] =>
 
 /** What an answer of one kind carries besides its envelope. */
 export type Reply = {
-  [Kind in AskKind]: Pick<Extract<Answer, { readonly ok: true; readonly ask: Kind }>, 'ask' | 'answer'>;
+  [Kind in AskKind]: Pick<Extract<Answer, { readonly ok: true; readonly ask: Kind }>, 'ask' | 'answer' | 'cautions'>;
 }[AskKind];

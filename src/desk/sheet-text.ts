@@ -125,7 +125,7 @@ const placer =
 
 /** A map or list spans many lines: only its first is underlined. */
 const firstLine = (text: string, span: Span): Span => {
-  const points = [...text];
+  const points = Array.from(text);
   const feed = points.indexOf('\n', span.from);
   return feed === -1 || feed >= span.to ? span : { from: span.from, to: Math.max(feed, span.from + 1) };
 };

@@ -83,9 +83,12 @@ const productOf = ({ product }: SheetTank, { answer: cell }: CellReply): string 
   return product ?? terms.find((term) => !term.nu.startsWith('-') && term.species !== 'e^-')?.species ?? '';
 };
 
-const givenOf = ({ label, product, note, weighed, ...quantities }: SheetRun): object => {
-  void [label, product, note];
-  return { ...quantities, ...(weighed === undefined ? {} : { mass: weighed }) };
+/** What belongs to a run and not to the law. */
+const BESIDES = new Set(['label', 'product', 'note', 'weighed']);
+
+const givenOf = (run: SheetRun): object => {
+  const quantities = Object.entries(run).filter(([name]) => !BESIDES.has(name));
+  return { ...Object.fromEntries(quantities), ...(run.weighed === undefined ? {} : { mass: run.weighed }) };
 };
 
 /** Fields of the ask as the sheet calls them: `given.current` is `current`, `given.mass` is `weighed`. */
@@ -94,8 +97,7 @@ const sheetField = (fault: Fault): Fault => {
     .replace(/^given\.mass$/, 'weighed')
     .replace(/^given\.?/, '')
     .replace(/^species$/, 'product');
-  const { field: _, ...rest } = fault;
-  return field === '' ? rest : { ...rest, field };
+  return { ...fault, field };
 };
 
 const amountsOf = (head: SheetHead, tank: SheetTank, species: string, given: object): Answer =>
