@@ -2,7 +2,7 @@ import { answerSheet } from '../desk/sheet.ts';
 import type { SheetAnswer, SheetFault, TankAnswer } from '../desk/sheet.ts';
 import { renderFault } from '../render/fault.ts';
 import type { Look } from '../render/look.ts';
-import { renderFoot, renderHead, renderTank } from '../render/sheet.ts';
+import { renderCautions, renderFoot, renderHead, renderTank } from '../render/sheet.ts';
 import { lookFor } from './look.ts';
 import type { Showing } from './outcome.ts';
 import { type ExitCode, type World, textOf } from './world.ts';
@@ -22,6 +22,8 @@ const showPages = async (sheet: SheetAnswer, text: string, look: Look, world: Wo
     if (!('fault' in tank)) await world.out(`${renderTank(tank, look)}\n`);
     for (const { name, fault } of faultsOf(tank)) world.err(`${name}\n${renderFault(fault, text, look)}\n`);
   }
+  const cautions = renderCautions(sheet, look);
+  if (cautions !== '') await world.out(`${cautions}\n`);
   await world.out(renderFoot(sheet));
 };
 

@@ -40,7 +40,7 @@ const repairLines = (repair: Repair, at: number, look: Look): readonly string[] 
 
 /** The verdict on one equation, its ledger and its repairs, the likeliest first. */
 export const equationAuditBlocks = (audit: EquationAuditAnswer, equation: string, look: Look): Blocks => [
-  [`${look.paint.strong(equation)}`],
+  [look.paint.strong(equation)],
   labelled([['verdict', { text: audit.verdict, paint: () => verdictText(audit.verdict, look) }]], look),
   ledgerLines(audit.ledger, look, audit.residual),
   ...audit.repairs.map((repair, at) => repairLines(repair, at, look)),

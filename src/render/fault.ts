@@ -1,5 +1,5 @@
 import { excerpt } from '../report/excerpt.ts';
-import type { Fault, ShownCoupling } from '../report/fault.ts';
+import type { Fault, ShownCoupling, ShownReaction } from '../report/fault.ts';
 import { columns, indented } from './columns.ts';
 import type { Look } from './look.ts';
 import { reactionText, speciesText } from './spelling.ts';
@@ -20,34 +20,25 @@ const list = (head: string, rows: readonly (readonly string[])[], look: Look): r
 
 /** What a fault carries besides its sentence: the readings to choose from, the ways to settle it, how it would balance. */
 const particulars = (fault: Fault, look: Look): readonly string[] => {
-  switch (fault.code) {
-    case 'several-readings':
-      return list(
-        'write one of these',
-        fault.readings.map((reading) => [speciesText(reading, look)]),
-        look,
-      );
-    case 'several-balances':
-      return fault.couplings.length > 0
-        ? list(
-            'settle it with one of these',
-            fault.couplings.map((one) => couplingRow(one, look)),
-            look,
-          )
-        : list(
-            'each of these balances',
-            fault.family.map((one) => [reactionText(one.plain, look)]),
-            look,
-          );
-    case 'wrong-side':
-      return list('as it would balance', [[reactionText(fault.reaction.plain, look)]], look);
-    case 'no-electrons':
-      return list('as it balances', [[reactionText(fault.reaction.plain, look)]], look);
-    case 'not-enough-given':
-      return list('give one of these', [[fault.missing.join(', ')]], look);
-    default:
-      return [];
+  const one = (reaction: ShownReaction): readonly (readonly string[])[] => [[reactionText(reaction.plain, look)]];
+  if (fault.code === 'several-readings') {
+    return list(
+      'write one of these',
+      fault.readings.map((reading) => [speciesText(reading, look)]),
+      look,
+    );
   }
+  if (fault.code === 'several-balances' && fault.couplings.length > 0) {
+    return list(
+      'settle it with one of these',
+      fault.couplings.map((coupling) => couplingRow(coupling, look)),
+      look,
+    );
+  }
+  if (fault.code === 'several-balances') return list('each of these balances', fault.family.flatMap(one), look);
+  if (fault.code === 'wrong-side') return list('as it would balance', one(fault.reaction), look);
+  if (fault.code === 'no-electrons') return list('as it balances', one(fault.reaction), look);
+  return fault.code === 'not-enough-given' ? list('missing', [[fault.missing.join(', ')]], look) : [];
 };
 
 /** A fault for a person: the place with carets, the sentence, the hint, and what else it carries. */

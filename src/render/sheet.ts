@@ -6,7 +6,7 @@ import { type Cell, columns } from './columns.ts';
 import { figureOf } from './figure.ts';
 import type { Look } from './look.ts';
 import { halfRows } from './reactions.ts';
-import { cautionLines, noteLines } from './remarks.ts';
+import { gatheredCautions, noteLines } from './remarks.ts';
 import { reactionText, speciesText } from './spelling.ts';
 
 type Whole = Exclude<TankAnswer, { readonly fault: unknown }>;
@@ -48,7 +48,7 @@ const perMole = (tank: Whole, look: Look): string => {
   return productsOf(tank)
     .flatMap((species) => {
       const electrons = electronsPerMole[species];
-      return electrons === undefined ? [] : [`${electrons} mol per mol ${speciesText(species, look)}`];
+      return electrons === undefined ? [] : [`${electrons} per ${speciesText(species, look)}`];
     })
     .join(',  ');
 };
@@ -96,10 +96,10 @@ const runLines = (tank: Whole, look: Look): readonly string[] => {
   return columns([head, units, ...rows], ['left', ...head.map(() => 'right' as const)]);
 };
 
+/** Water and its ions are what is summed over reactions; they stand in no column here. */
 const notesOf = (tank: Whole): Whole['cell']['notes'] => {
-  const all = [tank.cell, ...tank.runs.flatMap((run) => ('fault' in run ? [] : [run.amounts]))].flatMap(
-    ({ notes }) => notes,
-  );
+  const runs = tank.runs.flatMap((run) => ('fault' in run ? [] : run.amounts.notes));
+  const all = [...tank.cell.notes, ...runs].filter(({ code }) => code !== 'summed');
   return all.filter((one, at) => all.findIndex((other) => other.message === one.message) === at);
 };
 
@@ -109,15 +109,14 @@ export const renderTank = (tank: Whole, look: Look): string => {
   const { cell } = tank;
   const told = perMole(tank, look);
   const numbers: readonly (readonly [string, string])[] = [
-    ['electrons', `${cell.answer.electrons} for the overall reaction`],
-    ...(told === '' ? [] : [['', told] as const]),
+    ['electrons', cell.answer.electrons],
+    ...(told === '' ? [] : [['per mole', told] as const]),
   ];
   return `${head}\n${page([
     reactionLines(cell.answer, look),
     labelled(numbers, look),
     runLines(tank, look),
     noteLines(notesOf(tank), look),
-    cautionLines(cell.cautions, look),
   ])}`;
 };
 
@@ -127,6 +126,13 @@ export const renderHead = ({ plant, about }: SheetAnswer, look: Look): string =>
     look.paint.strong(plant),
     ...(about === null ? [] : hanging('', about, look.paint.faint).map((line) => line.trim())),
   ].join('\n') + '\n';
+
+/** The cautions of all tanks, each once; "" where there are none. */
+export const renderCautions = ({ tanks }: SheetAnswer, look: Look): string => {
+  const parts = tanks.flatMap((tank) => ('fault' in tank ? [] : [{ name: tank.name, cautions: tank.cell.cautions }]));
+  const blocks = gatheredCautions(parts, look);
+  return blocks.length === 0 ? '' : `${look.paint.strong('Cautions')}\n${page(blocks)}`;
+};
 
 /** The last line of a sheet. */
 export const renderFoot = ({ plant, invented }: SheetAnswer): string =>

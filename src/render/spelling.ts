@@ -16,8 +16,14 @@ const SUPER: Readonly<Record<string, string>> = {
 };
 const SUB = '₀₁₂₃₄₅₆₇₈₉';
 
-const raised = (text: string): string => [...text].map((letter) => SUPER[letter] ?? letter).join('');
-const lowered = (text: string): string => [...text].map((digit) => SUB[Number(digit)] ?? digit).join('');
+const raised = (text: string): string =>
+  Array.from(text)
+    .map((letter) => SUPER[letter] ?? letter)
+    .join('');
+const lowered = (text: string): string =>
+  Array.from(text)
+    .map((digit) => SUB[Number(digit)] ?? digit)
+    .join('');
 
 /**
  * A canonical species in Unicode: Cr2O7^2- is Cr₂O₇²⁻. Counts with a decimal point or a slash have no Unicode

@@ -20,10 +20,10 @@ const width = (point: string): number => {
 };
 
 /** Columns that `text` takes in a terminal. */
-export const displayWidth = (text: string): number => [...text].reduce((sum, point) => sum + width(point), 0);
+export const displayWidth = (text: string): number => Array.from(text).reduce((sum, point) => sum + width(point), 0);
 
 /** `text` with everything replaced that could move a terminal's cursor or colour it. */
-export const printable = (text: string): string => [...text].map(shown).join('');
+export const printable = (text: string): string => Array.from(text).map(shown).join('');
 
 interface Line {
   readonly points: readonly string[];
@@ -38,7 +38,7 @@ const lineAt = (text: string, at: number): Line => {
   let start = 0;
   let number = 1;
   for (const line of text.split('\n')) {
-    const points = [...line];
+    const points = Array.from(line);
     if (at <= start + points.length) return { points, number, start };
     start += points.length + 1;
     number += 1;
@@ -81,7 +81,7 @@ export const excerpt = (fault: Fault, text: string | null): string => {
   const field = fault.field ?? 'ask';
   const hint = fault.hint === undefined ? [] : [`  ${printable(fault.hint)}`];
   const message = printable(fault.message);
-  if (text === null || fault.span === undefined) return [`${printable(field)}`, `  ${message}`, ...hint].join('\n');
+  if (text === null || fault.span === undefined) return [printable(field), `  ${message}`, ...hint].join('\n');
   const line = lineAt(text, fault.span.from);
   const column = fault.span.from - line.start + 1;
   const [seen, carets] = textAndCarets(line, fault.span);
