@@ -1,0 +1,77 @@
+import { type Reaction, plainReaction, showReaction } from '../balance/reaction.ts';
+import { type Rational, isZero } from '../exact/rational.ts';
+import { type Note, note } from '../report/note.ts';
+import { type Result, failure, success } from '../report/result.ts';
+import type { Medium } from './medium.ts';
+import { type SplitHalf, electronsOf, halfOfTerms } from './split-complete.ts';
+import { type OxidationChange, distinctChanges, flowsOf, increaseIn } from './split-flows.ts';
+import { type Halves, halvesOf } from './split-halves.ts';
+
+/** What is split: an overall reaction in its medium, with the halves of a coupling where one settled it. */
+export interface Unsplit {
+  readonly reaction: Reaction;
+  readonly medium: Medium;
+  /** Whole and primitive, with their electrons; null where conservation gave the reaction or a ratio settled it. */
+  readonly halves: { readonly oxidation: Reaction; readonly reduction: Reaction } | null;
+  /** Exchanged between those halves at the scale of the reaction. */
+  readonly exchanged: Rational | null;
+}
+
+/** How an overall reaction comes of an oxidation and a reduction. */
+export interface RedoxSplit {
+  /** Exchanged between the halves at the scale of the reaction; without halves the sum of all increases. */
+  readonly electrons: Rational;
+  /** Null where no two halves add up to the reaction. */
+  readonly oxidation: SplitHalf | null;
+  readonly reduction: SplitHalf | null;
+  readonly changes: readonly OxidationChange[];
+}
+
+/**
+ * The halves, the electrons and the changes of oxidation number of an overall reaction.
+ * Fault: `no-electrons` where nothing is oxidised or reduced. Notes: `halves-omitted`, `no-oxidation-numbers`.
+ */
+export const splitReaction = (unsplit: Unsplit): Result<RedoxSplit> => {
+  const { reaction, medium } = unsplit;
+  const { flows, decided } = flowsOf(reaction.terms);
+  const halves = settledHalves(unsplit) ?? halvesOf(reaction, medium);
+  const electrons = halves?.electrons ?? increaseIn(flows);
+  if (isZero(electrons)) return noElectrons(reaction, decided);
+  const split = {
+    electrons,
+    oxidation: halves?.oxidation ?? null,
+    reduction: halves?.reduction ?? null,
+    changes: distinctChanges(flows),
+  };
+  return success(split, [...(halves === null ? [halvesOmitted()] : []), ...(decided ? [] : [undecided()])]);
+};
+
+const settledHalves = ({ reaction, medium, halves, exchanged }: Unsplit): Halves | null => {
+  if (halves === null || exchanged === null) return null;
+  const order = reaction.terms.map(({ species }) => species.key);
+  const taken = (half: Reaction): SplitHalf => ({
+    half: halfOfTerms(half.terms, medium, order).half,
+    multiplier: exchanged.div(electronsOf(half.terms).abs()),
+  });
+  return { oxidation: taken(halves.oxidation), reduction: taken(halves.reduction), electrons: exchanged };
+};
+
+const noElectrons = (reaction: Reaction, decided: boolean): Result<never> => {
+  const plain = plainReaction(reaction);
+  const open = decided ? '' : ' as far as convention decides the oxidation numbers';
+  return failure({
+    code: 'no-electrons',
+    message: `Nothing is oxidised or reduced${open}: this balances as ${plain}.`,
+    hint: 'Write a product in which an element has another oxidation number.',
+    reaction: showReaction(reaction),
+  });
+};
+
+const halvesOmitted = (): Note =>
+  note('halves-omitted', 'No two half-reactions were found that add up to the overall reaction.');
+
+const undecided = (): Note =>
+  note(
+    'no-oxidation-numbers',
+    'Convention does not decide the oxidation numbers of every species: changes of their elements are left out.',
+  );
