@@ -106,6 +106,9 @@ export const solveBag = (bag: Bag): readonly Site[] | undefined => {
   if (first === undefined) return isZero(bag.charge) ? [] : undefined;
   const [element, count] = first;
   if (others.length === 0 && !bag.stripped) return [{ element, number: bag.charge.div(count), count }];
+  // beside a known ion the metals of groups 1 and 2 keep their number: K2MnO4 does not hold MnO4^-
+  const fixed = others.length === 0 ? fixedNumber(element) : undefined;
+  if (fixed !== undefined && !bag.charge.equals(count.mul(fixed))) return undefined;
   for (const hydrogen of hydrogenNumbers(bag)) {
     const sites = solveWith(bag, hydrogen);
     if (sites !== undefined && chargeOf(sites).equals(bag.charge)) return sites;
