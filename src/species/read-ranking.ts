@@ -1,7 +1,7 @@
 import type { Rational } from '../exact/rational.ts';
 import { isWhole } from '../exact/rational.ts';
 import type { Formula, Member } from '../notation/formula.ts';
-import { type SpeciesSyntax, chainItems } from '../notation/syntax.ts';
+import { type PartSyntax, type SpeciesSyntax, chainItems } from '../notation/syntax.ts';
 import { isAdductMolecule } from './adducts.ts';
 import { type Species, plainSpecies } from './species.ts';
 
@@ -43,9 +43,11 @@ const CONTESTED: ReadonlySet<string> = new Set(['I3^-', 'Br3^-', 'N3^-', 'O2^-',
 /** The digit was taken as the charge. */
 const takesCharge = (reading: Reading): boolean => reading.syntax.charge?.tight === true;
 
-/** Periods taken as the dot of an adduct. */
-const dotsOf = (reading: Reading): number =>
-  chainItems(reading.syntax.parts).filter(({ separator }) => separator?.type === 'period').length;
+/** A period with a number behind it, taken as the dot of an adduct: CuSO4.5H2O. Before a letter it can be nothing else. */
+const isDoubtfulDot = ({ separator, multiplier }: PartSyntax): boolean =>
+  separator?.type === 'period' && multiplier?.kind === 'number';
+
+const dotsOf = (reading: Reading): number => chainItems(reading.syntax.parts).filter(isDoubtfulDot).length;
 
 const lastMember = (species: Species): Member | undefined => species.parts.at(-1)?.members.at(-1);
 
@@ -81,9 +83,9 @@ const decideCharge = (charge: Reading, count: Reading, isKnown: IsKnown): Decisi
 
 /** What follows each dot is a molecule that adducts hold. */
 const isPlausibleAdduct = (reading: Reading): boolean =>
-  chainItems(reading.syntax.parts).every(({ separator }, index) => {
+  chainItems(reading.syntax.parts).every((written, index) => {
     const part = reading.species.parts[index];
-    return separator?.type !== 'period' || (part !== undefined && isAdductMolecule(part));
+    return !isDoubtfulDot(written) || (part !== undefined && isAdductMolecule(part));
   });
 
 const writesOneBeforeDot = (reading: Reading): boolean =>
