@@ -23,9 +23,9 @@ const MOST_GIVEN = 12;
 
 /**
  * The balances that `dimension` - 1 simple conditions single out and in which every species with a side takes part on
- * it. Conditions, the first tried first: an unwritten helper takes no part (a later one before an earlier one, so that
- * the order of the list is its preference); a reactant gives a product one to one, of a couple or of two forms of an
- * element; two products, or two reactants, go one to one, those of like elements first.
+ * it. Conditions, the first tried first: a reactant gives a product one to one, of a couple or of two forms of an element;
+ * an unwritten helper takes no part (a later one before an earlier one, so that the order of the list is its preference);
+ * two products, or two reactants, go one to one, those of like elements first.
  */
 export const assumedBalances = (unknowns: readonly Unknown[], dimension: number): readonly Assumed[] => {
   const { rows } = speciesMatrix(unknowns.map((unknown) => unknown.species));
@@ -73,13 +73,13 @@ const conditionsOn = (unknowns: readonly Unknown[]): readonly Condition[] => {
   const couples = reactants.flatMap((a) => products.map((b): readonly [Standing, Standing] => [a, b]));
   const likely = couples.filter(([a, b]) => isCouple || areForms(a.species, b.species));
   return [
-    ...standing('free')
-      .toReversed()
-      .map((a) => ({ words: `${plainSpecies(a.species)} takes no part`, row: row(a, null, 0n) })),
     ...likely.map(([a, b]) => ({
       words: `1 ${plainSpecies(a.species)} gives 1 ${plainSpecies(b.species)}`,
       row: row(a, b, 1n),
     })),
+    ...standing('free')
+      .toReversed()
+      .map((a) => ({ words: `${plainSpecies(a.species)} takes no part`, row: row(a, null, 0n) })),
     ...pairs(products, 'form'),
     ...pairs(reactants, 'are used'),
   ].slice(0, MOST_CONDITIONS);
