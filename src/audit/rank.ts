@@ -8,6 +8,7 @@ import { isHelper, isHydroxide, isProton } from './helper-ions.ts';
 import { familiarityOf } from './known.ts';
 import type { Candidate, Problem } from './problem.ts';
 import { EDIT_COSTS, IMPROBABLE, REPAIR_KINDS, RESPELLING_COSTS, type RepairKind, TIE } from './repair-kinds.ts';
+import { redoxChangeOf } from './redox-change.ts';
 import { doublings } from './scale.ts';
 import { type Draft, type DraftTerm, reactionOf } from './writing.ts';
 
@@ -80,9 +81,12 @@ const costOf = (problem: Problem, change: Change): number => {
       return dropCost(problem, change.was);
     case 'added':
       if (!isElectron(change.is.species)) return EDIT_COSTS.helperAdded;
-      return problem.solvable ? EDIT_COSTS.electronsAddedThoughSolvable : EDIT_COSTS.electronsAdded;
+      return needsNoElectrons(problem) ? EDIT_COSTS.electronsAddedInVain : EDIT_COSTS.electronsAdded;
   }
 };
+
+/** An overall reaction: its species balance without electrons, or one is oxidised while another is reduced. */
+const needsNoElectrons = ({ solvable, draft }: Problem): boolean => solvable || redoxChangeOf(draft) === 'both';
 
 const dropCost = ({ draft, medium }: Problem, { species }: DraftTerm): number => {
   if (!isHelper(species, medium)) return EDIT_COSTS.termDropped;
@@ -132,7 +136,8 @@ const isIonExchange = (was: DraftTerm, is: DraftTerm): boolean =>
 const distanceBetween = ({ species: a }: DraftTerm, { species: b }: DraftTerm): number => {
   const size = (value: Rational): number => Number(value.n) / Number(value.d);
   // a sign turned over is one slip, however large the charge
-  let sum = a.charge.equals(b.charge.neg()) ? 1 : size(a.charge.sub(b.charge));
+  const isTurned = !isZero(a.charge) && a.charge.equals(b.charge.neg());
+  let sum = isTurned ? 1 : size(a.charge.sub(b.charge));
   for (const element of new Set([...a.composition.keys(), ...b.composition.keys()])) {
     const here = a.composition.get(element) ?? ZERO;
     sum += size(here.sub(b.composition.get(element) ?? ZERO));

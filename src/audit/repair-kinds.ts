@@ -61,8 +61,8 @@ export const EDIT_COSTS = {
   /** H^+ dropped where OH^- is written too, or back. */
   oneOfBothIonsDropped: 0.25,
   electronsAdded: 1.4,
-  /** The same where other numbers balance without electrons: an overall reaction needs none. */
-  electronsAddedThoughSolvable: 2.4,
+  /** The same in an overall reaction, which needs none. */
+  electronsAddedInVain: 2.4,
   electronsDropped: 1.1,
   termDropped: 1.7,
   /** Per unit of charge or atom by which a species changes, after the first. */
