@@ -1,11 +1,18 @@
 import { computeAmounts } from '../amounts/amounts.ts';
 import type { Fault } from '../report/fault.ts';
-import { type Result, chain, failure, inField, map } from '../report/result.ts';
+import { type Result, chain, inField, map } from '../report/result.ts';
 import { type ReadingOptions, readEquation, readSpecies } from '../species/read.ts';
-import { type SkeletonFields, balanceSkeleton, composeDiagram, composeFields, readSkeleton } from './electrodes.ts';
+import {
+  type SkeletonFields,
+  balanceSkeleton,
+  balanceWhole,
+  composeDiagram,
+  composeFields,
+  readSkeleton,
+} from './electrodes.ts';
 import { type Addressee, type Reply, CONTRACT, addresseeOf, distinctNotes, faulted } from './envelope.ts';
 import { auditOfCell, auditOfEquation } from './audits.ts';
-import { cautionsOfCell, cautionsOfCircuit, cautionsOfHalf } from './cautions.ts';
+import { cautionsOfCell, cautionsOfCircuit, cautionsOfHalf, cautionsOfReaction } from './cautions.ts';
 import { readCircuit } from './amounts.ts';
 import { allByRank } from './precedence.ts';
 import { readAsk } from './read-ask.ts';
@@ -13,7 +20,7 @@ import type { Answer } from './schema/answer.ts';
 import type { Ask, AskOf, CellFields } from './schema/ask.ts';
 import { readSettings } from './settings.ts';
 import { showAudit, showCellAudit } from './show/audit.ts';
-import { showCell, showHalf } from './show/reactions.ts';
+import { showCell, showHalf, showRedox } from './show/reactions.ts';
 import { showEquation, showReading } from './show/species.ts';
 
 const skeletonFields = ({ skeleton, medium, settle }: AskOf<'half'> | AskOf<'redox'>): SkeletonFields => ({
@@ -46,6 +53,18 @@ const answerHalf = (ask: AskOf<'half'>, options: ReadingOptions): Result<Reply> 
       ask: 'half',
       answer: showHalf(half),
       cautions: cautionsOfHalf(half),
+    })),
+  );
+};
+
+/** text -> skeleton -> overall reaction -> its two halves */
+const answerRedox = (ask: AskOf<'redox'>, options: ReadingOptions): Result<Reply> => {
+  const fields = skeletonFields(ask);
+  return chain(readSkeleton(fields, options), (skeleton) =>
+    map(balanceWhole(skeleton, fields), (redox) => ({
+      ask: 'redox',
+      answer: showRedox(redox),
+      cautions: cautionsOfReaction(redox.overall, redox.medium),
     })),
   );
 };
@@ -89,9 +108,6 @@ const answerAmounts = (ask: AskOf<'amounts'>, options: ReadingOptions): Result<R
 const wanted = ({ want }: AskOf<'amounts'>): { readonly want?: Readonly<Record<string, string>> } =>
   want === undefined ? {} : { want };
 
-const notYet = (field: string): Result<never> =>
-  failure({ code: 'bad-ask', field, message: `An ask with ${field} cannot be answered yet.` });
-
 const reply = (ask: Ask, options: ReadingOptions): Result<Reply> => {
   switch (ask.ask) {
     case 'species':
@@ -101,7 +117,7 @@ const reply = (ask: Ask, options: ReadingOptions): Result<Reply> => {
     case 'half':
       return answerHalf(ask, options);
     case 'redox':
-      return notYet('skeleton');
+      return answerRedox(ask, options);
     case 'cell':
       return answerCell(ask, options);
     case 'audit':

@@ -4,6 +4,7 @@ import { electrodesOfDiagram } from '../cell/diagram.ts';
 import type { MediumChoice } from '../redox/choose-medium.ts';
 import type { HalfReaction } from '../redox/half-reaction.ts';
 import { completeHalf } from '../redox/half.ts';
+import { type RedoxReaction, balanceRedox } from '../redox/redox.ts';
 import type { Rational } from '../exact/rational.ts';
 import { type Result, chain, failure, inField, map, success } from '../report/result.ts';
 import type { Equation } from '../species/equation.ts';
@@ -48,7 +49,11 @@ const shareOf = ({ share, field }: SkeletonFields): Result<Rational | null> =>
 const renamed = <T>(result: Result<T>, to: string): Result<T> =>
   result.ok || result.fault.field !== 'medium' ? result : failure({ ...result.fault, field: to });
 
-/** The second step: helpers and electrons found. */
+/** The second step for a redox skeleton: helpers found, split into its halves. */
+export const balanceWhole = ({ skeleton, medium }: ReadSkeleton, fields: SkeletonFields): Result<RedoxReaction> =>
+  inField(renamed(balanceRedox(skeleton, medium, fields.settle), fields.mediumField), fields.field);
+
+/** The second step for a half-reaction: helpers and electrons found. */
 export const balanceSkeleton = ({ skeleton, medium }: ReadSkeleton, fields: SkeletonFields): Result<HalfReaction> =>
   inField(renamed(completeHalf(skeleton, medium, fields.settle), fields.mediumField), fields.field);
 

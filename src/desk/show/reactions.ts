@@ -2,9 +2,10 @@ import { ledgerOf, showLedger } from '../../balance/ledger.ts';
 import { showReaction } from '../../balance/reaction.ts';
 import type { CellReaction, WeightedHalf } from '../../cell/cell-reaction.ts';
 import { showRational } from '../../exact/rational.ts';
+import type { RedoxReaction } from '../../redox/redox.ts';
 import type { HalfReaction } from '../../redox/half-reaction.ts';
 import { plainSpecies } from '../../species/species.ts';
-import type { CellAnswer } from '../schema/answer.ts';
+import type { CellAnswer, RedoxAnswer } from '../schema/answer.ts';
 import type { ShownHalf, ShownScaledHalf } from '../schema/shape.ts';
 import { showMedium } from './species.ts';
 
@@ -46,4 +47,22 @@ export const showCell = (cell: CellReaction): CellAnswer => ({
           to,
         })),
       }),
+});
+
+/** The answer to an ask of kind `redox`. */
+export const showRedox = ({
+  overall,
+  electrons,
+  dimension,
+  oxidation,
+  reduction,
+  changes,
+}: RedoxReaction): RedoxAnswer => ({
+  overall: showReaction(overall),
+  electrons: showRational(electrons),
+  dimension,
+  ledger: showLedger(ledgerOf(overall)),
+  ...(oxidation === null ? {} : { oxidation: showWeighted(oxidation) }),
+  ...(reduction === null ? {} : { reduction: showWeighted(reduction) }),
+  changes: changes.map(({ element, from, to }) => ({ element, from: showRational(from), to: showRational(to) })),
 });
