@@ -32,8 +32,9 @@ export const figureOf = ({ value, uncertainty }: Quantity): string => {
 /** "± 0.00003" in the digits of the figure, "" where nothing is known. */
 export const uncertaintyOf = ({ value, uncertainty }: Quantity): string => {
   if (uncertainty === undefined || uncertainty === 0) return '';
-  if (isExtreme(value) || isExtreme(uncertainty)) return `± ${uncertainty.toExponential(1)}`;
-  return `± ${fixed(uncertainty, Math.min(placesFor(uncertainty, 2), placesFor(value, 10)))}`;
+  if (isExtreme(value)) return `± ${uncertainty.toExponential(1)}`;
+  const shown = fixed(uncertainty, Math.min(placesFor(uncertainty, 2), placesFor(value, 10)));
+  return Number(shown) === 0 ? '' : `± ${shown}`;
 };
 
 /** A whole quantity in one piece: "1.185494 ± 0.000030 g/(A h)". */
