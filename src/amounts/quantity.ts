@@ -67,15 +67,16 @@ const segmentAt = (text: string, at: number): Segment | undefined => {
   return { number: found.number, unitText, at, unitAt, end: found.end + (match?.[0].length ?? 0) };
 };
 
-const segmentsOf = (text: string): Result<readonly Segment[]> => {
+/** The segments of `view`, which is `text` with blanks where something else was read: every offset stays. */
+const segmentsOf = (text: string, view = text): Result<readonly Segment[]> => {
   const segments: Segment[] = [];
-  let at = text.length - text.trimStart().length;
+  let at = view.length - view.trimStart().length;
   do {
-    const segment = segmentAt(text, at);
-    if (segment === undefined || /^[,;]/u.test(segment.unitText)) return badNumber(text, at, text.length);
+    const segment = segmentAt(view, at);
+    if (segment === undefined || /^[,;]/u.test(segment.unitText)) return badNumber(text, at, view.length);
     segments.push(segment);
     at = segment.end;
-  } while (at < text.length);
+  } while (at < view.length);
   return success(segments);
 };
 
@@ -195,8 +196,8 @@ const readSpread = (measurand: Measurand, text: string, at: number, length: numb
   const blank = (from: number, to: number, of: string): string =>
     of.slice(0, from) + ' '.repeat(to - from) + of.slice(to);
   const bare = closing < 0 ? text : blank(closing, closing + 1, blank(0, opened, text));
-  const right = segmentsOf(blank(0, at + length, bare));
-  const left = segmentsOf(bare.slice(0, at));
+  const right = segmentsOf(text, blank(0, at + length, bare));
+  const left = segmentsOf(text, bare.slice(0, at));
   if (!left.ok) return left;
   if (!right.ok) return right;
   const [spread, more] = right.value;
