@@ -1,26 +1,8 @@
-import { type Species, plainSpecies, sameSpecies } from '../species/species.ts';
-import { CAUTION_ROWS, type CautionRow } from './table.ts';
-import { type Place, type Trigger, parseTrigger } from './trigger.ts';
-
-/** A medium as the cautions see it. */
-export type CautionMedium = 'acid' | 'base' | 'neutral' | 'molten' | 'nonaqueous';
-
-/** What runs: the species by where they stand, and what else is known. null: the ask does not say. */
-export interface Scene {
-  readonly anode: Sides;
-  readonly cathode: Sides;
-  /** Reactants and products of the overall reaction, or of a lone half-reaction. */
-  readonly overall: Sides;
-  readonly medium: CautionMedium | null;
-  readonly mode: 'electrolysis' | 'galvanic' | 'charging' | null;
-  /** True where something keeps the two electrodes apart. */
-  readonly divided: boolean | null;
-}
-
-export interface Sides {
-  readonly reactants: readonly Species[];
-  readonly products: readonly Species[];
-}
+import { type Species, plainSpecies } from '../species/species.ts';
+import { type Rule, elementKey, elementOf, rulesFor } from './rules.ts';
+import { type Scene, WATER_MEDIA, isWatery } from './scene.ts';
+import type { Clause, Place, Trigger } from './trigger.ts';
+import { appliesSentence, conditionsPhrase, mediaPhrase, modesPhrase } from './words.ts';
 
 /** A caution with the species or elements that raised it. */
 export interface Caution {
@@ -33,125 +15,132 @@ export interface Caution {
 export const ABSENCE =
   'That no caution is shown does not mean that it is safe: local codes, the SDS and licensed practice decide.';
 
-interface Rule {
-  readonly row: CautionRow;
-  readonly trigger: Trigger;
+/** What met a part of a trigger, or undefined where nothing did. `open`: what would have to hold besides. */
+interface Met {
+  readonly because: readonly string[];
+  readonly open: readonly string[];
 }
 
-/** Read once, at the first need: the table never changes. */
-let rules: readonly Rule[] | undefined;
-const allRules = (): readonly Rule[] =>
-  (rules ??= CAUTION_ROWS.map((row) => ({ row, trigger: parseTrigger(row.trigger) })));
-
-const everyone = (scene: Scene): readonly Species[] =>
-  [scene.anode, scene.cathode, scene.overall].flatMap(({ reactants, products }) => [...reactants, ...products]);
-
-const standing = (scene: Scene, place: Place, everywhere: readonly Species[]): readonly Species[] => {
+const standing = ({ anode, cathode, overall }: Scene, place: Place): readonly Species[] => {
   switch (place) {
     case 'any':
     case 'with':
-      return everywhere;
+      return [anode, cathode, overall].flatMap(({ reactants, products }) => [...reactants, ...products]);
     case 'reactant':
-      return [scene.anode, scene.cathode, scene.overall].flatMap((sides) => sides.reactants);
+      return [anode, cathode, overall].flatMap(({ reactants }) => reactants);
     case 'product':
-      return [scene.anode, scene.cathode, scene.overall].flatMap((sides) => sides.products);
+      return [anode, cathode, overall].flatMap(({ products }) => products);
     case 'anode':
-      return [...scene.anode.reactants, ...scene.anode.products];
+      return [...anode.reactants, ...anode.products];
     case 'cathode':
-      return [...scene.cathode.reactants, ...scene.cathode.products];
+      return [...cathode.reactants, ...cathode.products];
     case 'anode_product':
-      return scene.anode.products;
+      return anode.products;
     case 'cathode_product':
-      return scene.cathode.products;
+      return cathode.products;
   }
 };
 
-/** An aqueous medium holds water whether or not a reaction uses it. */
-const holdsWater = (scene: Scene): boolean =>
-  scene.medium === 'acid' || scene.medium === 'base' || scene.medium === 'neutral';
+/** Same formula and charge, isotopes aside, and no two differing states: a missing state matches any. */
+const matches = (one: Species, wanted: Species): boolean =>
+  elementKey(one) === elementKey(wanted) && (one.state === null || wanted.state === null || one.state === wanted.state);
 
-/** The species that meet each clause, or undefined where one clause is met by none. */
-const metSpecies = (trigger: Trigger, scene: Scene, everywhere: readonly Species[]): readonly string[] | undefined => {
+/** A watery medium holds water whether or not a reaction uses it; an unknown one may. */
+const waterIn = ({ media }: Scene): Met | undefined => {
+  if (media.length > 0) return media.some(isWatery) ? { because: [], open: [] } : undefined;
+  return { because: [], open: ['where water is present'] };
+};
+
+const metClause = ({ place, species }: Clause, scene: Scene): Met | undefined => {
+  const there = standing(scene, place).filter((one) => species.some((wanted) => matches(one, wanted)));
+  if (there.length > 0) return { because: there.map(plainSpecies), open: [] };
+  return place === 'with' && species.some(({ key }) => key === 'H2O') ? waterIn(scene) : undefined;
+};
+
+const metElements = ({ elements }: Trigger, scene: Scene): Met | undefined => {
+  if (elements.length === 0) return NOTHING_ASKED;
+  const there = new Set(standing(scene, 'any').flatMap(({ composition }) => [...composition.keys()].map(elementOf)));
+  const because = elements.filter((element) => there.has(element));
+  return because.length === 0 ? undefined : { because, open: [] };
+};
+
+/** A medium that only some of the possible media are leaves a condition open; one that none is rules the row out. */
+const metMedium = ({ media }: Trigger, scene: Scene): Met | undefined => {
+  if (media.length === 0) return NOTHING_ASKED;
+  const fitting = scene.media.filter((medium) => media.includes(medium));
+  if (fitting.length < scene.media.length && fitting.length === 0) return undefined;
+  const certain = scene.media.length > 0 && fitting.length === scene.media.length;
+  return { because: [], open: certain ? [] : [mediaPhrase(fitting.length > 0 ? fitting : media)] };
+};
+
+const metMode = ({ modes }: Trigger, scene: Scene): Met | undefined => {
+  if (modes.length === 0) return NOTHING_ASKED;
+  if (scene.mode === null) return { because: [], open: [modesPhrase(modes)] };
+  return modes.includes(scene.mode) ? NOTHING_ASKED : undefined;
+};
+
+const UNDIVIDED = 'undivided-cell';
+
+const metConditions = ({ conditions }: Trigger, { divided }: Scene): Met | undefined => {
+  if (conditions.length === 0 || (divided === false && conditions.includes(UNDIVIDED))) return NOTHING_ASKED;
+  const open = divided === true ? conditions.filter((condition) => condition !== UNDIVIDED) : conditions;
+  return open.length === 0 ? undefined : { because: [], open: [conditionsPhrase(open)] };
+};
+
+const NOTHING_ASKED: Met = { because: [], open: [] };
+
+/**
+ * A row of a medium or a mode alone speaks only where the scene itself says one: it would else stand everywhere. Water
+ * of which nothing more is known may be acid, base and neutral, and says none.
+ */
+const isSaid = ({ places, elements, media, modes }: Trigger, scene: Scene): boolean =>
+  places.length + elements.length > 0 ||
+  (media.length > 0 && scene.media.length > 0 && !WATER_MEDIA.every((medium) => scene.media.includes(medium))) ||
+  (modes.length > 0 && scene.mode !== null);
+
+/** All parts of a trigger, or undefined as soon as one is not met. */
+const metTrigger = (trigger: Trigger, scene: Scene): Met | undefined => {
+  if (!isSaid(trigger, scene)) return undefined;
   const because: string[] = [];
-  for (const { place, species } of trigger.places) {
-    const there = standing(scene, place, everywhere);
-    const met = there.filter((one) => species.some((wanted) => sameSpecies(one, wanted)));
-    const water = place === 'with' && holdsWater(scene) && species.some((wanted) => wanted.formula === 'H2O');
-    if (met.length === 0 && !water) return undefined;
-    because.push(...met.map(plainSpecies));
-  }
-  return because;
-};
-
-const metElements = (trigger: Trigger, everywhere: readonly Species[]): readonly string[] | undefined => {
-  if (trigger.elements.length === 0) return [];
-  const met = trigger.elements.filter((element) => everywhere.some((species) => species.composition.has(element)));
-  return met.length === 0 ? undefined : met;
-};
-
-const spoken = (words: readonly string[]): string => {
-  const plain = words.map((word) => word.replaceAll('-', ' '));
-  return plain.length < 2 ? plain.join('') : `${plain.slice(0, -1).join(', ')} or ${plain.at(-1) ?? ''}`;
-};
-
-/** What the row needs and the scene does not say, in words; undefined where the scene says otherwise. */
-const openConditions = (trigger: Trigger, scene: Scene): readonly string[] | undefined => {
   const open: string[] = [];
-  if (trigger.media.length > 0) {
-    if (scene.medium === null) open.push(`in a medium that is ${spoken(trigger.media)}`);
-    else if (!trigger.media.includes(scene.medium)) return undefined;
+  const parts = [
+    ...trigger.places.map((clause) => () => metClause(clause, scene)),
+    () => metElements(trigger, scene),
+    () => metMedium(trigger, scene),
+    () => metMode(trigger, scene),
+    () => metConditions(trigger, scene),
+  ];
+  for (const part of parts) {
+    const met = part();
+    if (met === undefined) return undefined;
+    because.push(...met.because);
+    open.push(...met.open);
   }
-  if (trigger.modes.length > 0) {
-    if (scene.mode === null) open.push(`in ${spoken(trigger.modes)}`);
-    else if (!trigger.modes.includes(scene.mode)) return undefined;
-  }
-  const undividedOnly = trigger.conditions.length === 1 && trigger.conditions[0] === 'undivided-cell';
-  if (undividedOnly && scene.divided === true) return undefined;
-  if (trigger.conditions.length > 0 && !(undividedOnly && scene.divided === false))
-    open.push(spoken(trigger.conditions));
-  return open;
+  return { because: [...new Set(because)], open };
 };
-
-const cautionOf = ({ row, trigger }: Rule, scene: Scene, everywhere: readonly Species[]): Found | undefined => {
-  const species = metSpecies(trigger, scene, everywhere);
-  const elements = metElements(trigger, everywhere);
-  const open = openConditions(trigger, scene);
-  if (species === undefined || elements === undefined || open === undefined) return undefined;
-  const because = [...new Set([...species, ...elements])];
-  if (because.length === 0 && !isSaid(trigger, scene)) return undefined;
-  const text = open.length === 0 ? row.text : `${row.text} (Applies: ${open.join('; ')}.)`;
-  return { caution: { text, because, basis: row.basis }, gravity: gravityOf(row, open) };
-};
-
-/** A row without species or elements speaks only where the scene itself names its medium or mode. */
-const isSaid = (trigger: Trigger, scene: Scene): boolean =>
-  (trigger.media.length > 0 && scene.medium !== null) || (trigger.modes.length > 0 && scene.mode !== null);
 
 interface Found {
   readonly caution: Caution;
   readonly gravity: number;
 }
 
-/** Gases that kill or explode at once come first, then what holds as it stands, then what depends on a condition. */
-const AT_ONCE: readonly string[] = [
-  'any=CN^-(aq)|HCN(aq)',
-  'any=CN^-(aq);with=ClO^-',
-  'anode_product=Cl2(g);mode',
-  'any=ClO^-(aq)|HClO(aq);medium=acid',
-  'any=H2(g);with=O2(g)',
-  'product=H2(g);with=O2(g)',
-];
+/** What kills or explodes at once comes first; of equals, what holds as it stands before what depends on a condition. */
+const gravityOf = ({ row }: Rule, { open }: Met): number => (row.atOnce === true ? 0 : 2) + (open.length > 0 ? 1 : 0);
 
-const gravityOf = (row: CautionRow, open: readonly string[]): number => {
-  if (AT_ONCE.some((start) => row.trigger.startsWith(start))) return 0;
-  return open.length === 0 ? 1 : 2;
+const foundBy = (rule: Rule, scene: Scene): Found | undefined => {
+  const met = metTrigger(rule.trigger, scene);
+  if (met === undefined) return undefined;
+  const { text, basis } = rule.row;
+  const whole = met.open.length === 0 ? text : `${text} ${appliesSentence(met.open)}`;
+  return { caution: { text: whole, because: met.because, basis }, gravity: gravityOf(rule, met) };
 };
 
-/** The cautions that `scene` raises, once each, the gravest first; in table order where they weigh the same. */
-export const cautionsFor = (scene: Scene): readonly Caution[] => {
-  const everywhere = everyone(scene);
-  return allRules()
-    .flatMap((rule) => cautionOf(rule, scene, everywhere) ?? [])
-    .toSorted((a, b) => a.gravity - b.gravity)
+/**
+ * The cautions that `scene` raises, once each, the gravest first; in table order where they weigh the same. What a row
+ * asks and the scene leaves open (a medium, a mode, a condition) is named at the end of its text.
+ */
+export const cautionsFor = (scene: Scene): readonly Caution[] =>
+  rulesFor(standing(scene, 'any'))
+    .flatMap((rule) => foundBy(rule, scene) ?? [])
+    .sort((a, b) => a.gravity - b.gravity)
     .map(({ caution }) => caution);
-};

@@ -1,16 +1,23 @@
-import type { Result } from '../report/result.ts';
-import { type SpeciesReading, readSpecies } from '../species/read.ts';
+import { readSpecies } from '../species/read.ts';
 import type { Species } from '../species/species.ts';
+import type { CautionMedium, CautionMode } from './scene.ts';
+import { isCondition, isMedium, isMode } from './words.ts';
 
 /** What a caution can ask of the species of a cell: where one stands. */
 export type Place = 'any' | 'with' | 'reactant' | 'product' | 'anode' | 'cathode' | 'anode_product' | 'cathode_product';
 
+/** Species of which one must stand in a place. */
+export interface Clause {
+  readonly place: Place;
+  readonly species: readonly Species[];
+}
+
 /** A trigger taken apart: every list is a choice (or), all that are there must hold (and). */
 export interface Trigger {
-  readonly places: readonly { readonly place: Place; readonly species: readonly Species[] }[];
+  readonly places: readonly Clause[];
   readonly elements: readonly string[];
-  readonly media: readonly string[];
-  readonly modes: readonly string[];
+  readonly media: readonly CautionMedium[];
+  readonly modes: readonly CautionMode[];
   readonly conditions: readonly string[];
 }
 
@@ -26,18 +33,26 @@ const PLACES: readonly string[] = [
 ] satisfies readonly Place[];
 
 const isPlace = (key: string): key is Place => PLACES.includes(key);
+const isElement = (word: string): boolean => /^[A-Z][a-z]?$/.test(word);
 
 /** A table that cannot be read is a broken program, not a fault of the ask. */
-const speciesOf = (text: string): Species => {
-  const reading: Result<SpeciesReading> = readSpecies(text);
-  if (!reading.ok) throw new Error(`caution table: ${text}: ${reading.fault.message}`);
-  return reading.value.species;
+const broken = (what: string): never => {
+  throw new Error(`caution table: ${what}`);
 };
 
-/** The trigger of a row's text. The grammar stands at `CautionRow.trigger`. */
+const speciesOf = (text: string): Species => {
+  const reading = readSpecies(text);
+  return reading.ok ? reading.value.species : broken(`${text}: ${reading.fault.message}`);
+};
+
+const known = <Word extends string>(values: readonly string[], isKnown: (word: string) => word is Word): Word[] =>
+  values.map((word) => (isKnown(word) ? word : broken(`${word} is unknown`)));
+
+/** The trigger of a row's text. The grammar stands at `CautionRow.trigger`; throws on anything else. */
 export const parseTrigger = (text: string): Trigger => {
   const clauses = text.split(';').map((clause) => {
     const [key = '', values = ''] = clause.split(/=(.*)/s);
+    if (!isPlace(key) && !OTHER_KEYS.includes(key)) broken(`${key} in ${text}`);
     return { key, values: values.split('|') };
   });
   const valuesOf = (key: string): readonly string[] => clauses.find((clause) => clause.key === key)?.values ?? [];
@@ -45,9 +60,11 @@ export const parseTrigger = (text: string): Trigger => {
     places: clauses.flatMap(({ key, values }) =>
       isPlace(key) ? [{ place: key, species: values.map(speciesOf) }] : [],
     ),
-    elements: valuesOf('element'),
-    media: valuesOf('medium'),
-    modes: valuesOf('mode'),
-    conditions: valuesOf('condition'),
+    elements: known(valuesOf('element'), (word): word is string => isElement(word)),
+    media: known(valuesOf('medium'), isMedium),
+    modes: known(valuesOf('mode'), isMode),
+    conditions: known(valuesOf('condition'), (word): word is string => isCondition(word)),
   };
 };
+
+const OTHER_KEYS: readonly string[] = ['element', 'medium', 'mode', 'condition'];

@@ -1,6 +1,7 @@
 import { computeAmounts } from '../amounts/amounts.ts';
 import type { Fault } from '../report/fault.ts';
 import { type Result, chain, inField, map } from '../report/result.ts';
+import { readDiagram } from '../species/diagram.ts';
 import { type ReadingOptions, readEquation, readSpecies } from '../species/read.ts';
 import {
   type SkeletonFields,
@@ -69,8 +70,12 @@ const answerRedox = (ask: AskOf<'redox'>, options: ReadingOptions): Result<Reply
   );
 };
 
-/** null: the ask does not say whether something keeps the electrolytes apart. */
-const dividedOf = (cell: CellFields): boolean | null => ('separator' in cell ? (cell.separator ?? null) : null);
+/** True where something keeps the electrolytes apart: a separator, the bridge of a diagram. null: the ask does not say. */
+const dividedOf = (cell: CellFields, options: ReadingOptions): boolean | null => {
+  if (!('diagram' in cell)) return cell.separator ?? null;
+  const diagram = readDiagram(cell.diagram, options);
+  return diagram.ok ? diagram.value.bridge : null;
+};
 
 /** texts -> skeletons -> half-reactions -> cell reaction */
 const answerCell = (ask: AskOf<'cell'>, options: ReadingOptions): Result<Reply> => {
@@ -78,7 +83,7 @@ const answerCell = (ask: AskOf<'cell'>, options: ReadingOptions): Result<Reply> 
   return map(cell, (composed) => ({
     ask: 'cell',
     answer: showCell(composed),
-    cautions: cautionsOfCell(composed, dividedOf(ask)),
+    cautions: cautionsOfCell(composed, dividedOf(ask, options)),
   }));
 };
 
@@ -98,7 +103,7 @@ const answerAmounts = (ask: AskOf<'amounts'>, options: ReadingOptions): Result<R
         map(computeAmounts({ circuit: through, species, given: ask.given, ...wanted(ask) }), (amounts) => ({
           ask: 'amounts',
           answer: amounts,
-          cautions: cautionsOfCircuit(through),
+          cautions: cautionsOfCircuit(through, 'cell' in ask ? dividedOf(ask.cell, options) : null),
         })),
       ),
     ),

@@ -1,6 +1,7 @@
 import type { Circuit } from '../amounts/branches.ts';
 import { type Reaction, sideOf } from '../balance/reaction.ts';
-import { type CautionMedium, type Scene, type Sides, cautionsFor } from '../caution/cautions.ts';
+import { cautionsFor } from '../caution/cautions.ts';
+import { type CautionMedium, type Sides, mediaOf } from '../caution/scene.ts';
 import type { CellReaction, WeightedHalf } from '../cell/cell-reaction.ts';
 import type { HalfReaction } from '../redox/half-reaction.ts';
 import type { Medium } from '../redox/medium.ts';
@@ -17,73 +18,82 @@ const sidesOf = (...reactions: readonly Reaction[]): Sides => ({
   products: speciesOn(reactions, 'right'),
 });
 
-/** A medium as the cautions know it; null where its name does not say (a list of helpers, `none`). */
-const mediumOf = ({ name }: Medium): CautionMedium | null => {
-  if (name === 'acid' || name === 'base' || name === 'neutral') return name;
-  if (name === 'bicarbonate') return 'neutral';
-  if (name === 'ammonia') return 'nonaqueous';
-  return name?.startsWith('molten-') === true ? 'molten' : null;
-};
+/** The media of reactions that run together: what each may stand in, each once. */
+const mediaOfAll = (all: readonly (readonly CautionMedium[])[]): readonly CautionMedium[] => [...new Set(all.flat())];
 
-/** The medium that all halves share; null where they differ. */
-const sharedMedium = (halves: readonly HalfReaction[]): CautionMedium | null => {
-  const media = new Set(halves.map(({ medium }) => mediumOf(medium)));
-  const [only] = media;
-  return media.size === 1 && only !== undefined ? only : null;
-};
+const speciesOf = ({ reactants, products }: Sides): readonly Species[] => [...reactants, ...products];
 
 const NOTHING: Sides = { reactants: [], products: [] };
 
-/** The cautions of half-reactions at electrodes that need not make a whole cell. */
+const sidesOfHalf = ({ reaction, kind }: Pick<HalfReaction, 'reaction' | 'kind'>): AtElectrode => {
+  const sides = sidesOf(reaction);
+  return kind === 'oxidation' ? { anode: sides, cathode: NOTHING } : { anode: NOTHING, cathode: sides };
+};
+
+/** What stands at the anode and what at the cathode. */
+interface AtElectrode {
+  readonly anode: Sides;
+  readonly cathode: Sides;
+}
+
+/** The cautions of a half-reaction alone: an oxidation runs at an anode, a reduction at a cathode. */
 export const cautionsOfHalf = (half: HalfReaction): readonly ShownCaution[] => {
-  const sides = sidesOf(half.reaction);
-  const oxidation = half.kind === 'oxidation';
+  const overall = sidesOf(half.reaction);
   return cautionsFor({
-    anode: oxidation ? sides : NOTHING,
-    cathode: oxidation ? NOTHING : sides,
-    overall: sides,
-    medium: mediumOf(half.medium),
+    ...sidesOfHalf(half),
+    overall,
+    media: mediaOf(half.medium, speciesOf(overall)),
     mode: null,
     divided: null,
   });
 };
 
 /** The cautions of a reaction as it is, in a medium or in none that is known. */
-export const cautionsOfReaction = (reaction: Reaction, medium: Medium | null): readonly ShownCaution[] =>
-  cautionsFor({
-    anode: NOTHING,
-    cathode: NOTHING,
-    overall: sidesOf(reaction),
-    medium: medium === null ? null : mediumOf(medium),
-    mode: null,
-    divided: null,
-  });
+export const cautionsOfReaction = (reaction: Reaction, medium: Medium | null): readonly ShownCaution[] => {
+  const overall = sidesOf(reaction);
+  const media = mediaOf(medium, speciesOf(overall));
+  return cautionsFor({ anode: NOTHING, cathode: NOTHING, overall, media, mode: null, divided: null });
+};
 
 /** The cautions of a cell; `divided` as the ask says of its separator, null where it says nothing. */
 export const cautionsOfCell = (cell: CellReaction, divided: boolean | null): readonly ShownCaution[] => {
-  const reactions = (halves: readonly WeightedHalf[]): readonly Reaction[] => halves.map(({ half }) => half.reaction);
-  const scene: Scene = {
+  const halves = [...cell.anode, ...cell.cathode].map(({ half }) => half);
+  const reactions = (weighted: readonly WeightedHalf[]): readonly Reaction[] =>
+    weighted.map(({ half }) => half.reaction);
+  return cautionsFor({
     anode: sidesOf(...reactions(cell.anode)),
     cathode: sidesOf(...reactions(cell.cathode)),
     overall: sidesOf(cell.overall),
-    medium: sharedMedium([...cell.anode, ...cell.cathode].map(({ half }) => half)),
+    media: mediaOfAll(halves.map(({ medium, reaction }) => mediaOf(medium, speciesOf(sidesOf(reaction))))),
     mode: null,
     divided,
-  };
-  return cautionsFor(scene);
-};
-
-/** The cautions of what the charge of an amounts ask flows through. */
-export const cautionsOfCircuit = (circuit: Circuit): readonly ShownCaution[] => {
-  if (circuit.kind === 'cell') return cautionsOfCell(circuit.cell, null);
-  const reactions =
-    circuit.kind === 'half' ? [circuit.half.reaction] : circuit.reactions.map(({ reaction }) => reaction);
-  return cautionsFor({
-    anode: NOTHING,
-    cathode: NOTHING,
-    overall: sidesOf(...reactions),
-    medium: null,
-    mode: null,
-    divided: null,
   });
 };
+
+/** A half-reaction as it is written: electrons on the left reduce. */
+const kindOf = (reaction: Reaction): 'reduction' | 'oxidation' =>
+  sideOf(reaction, 'left').some(({ species }) => isElectron(species)) ? 'reduction' : 'oxidation';
+
+/** The cautions of what the charge of an amounts ask flows through; `divided` as in `cautionsOfCell`. */
+export const cautionsOfCircuit = (circuit: Circuit, divided: boolean | null = null): readonly ShownCaution[] => {
+  if (circuit.kind === 'cell') return cautionsOfCell(circuit.cell, divided);
+  const reactions =
+    circuit.kind === 'half' ? [circuit.half.reaction] : circuit.reactions.map(({ reaction }) => reaction);
+  const places = reactions.map((reaction) => sidesOfHalf({ reaction, kind: kindOf(reaction) }));
+  return cautionsFor({
+    anode: joined(places.map(({ anode }) => anode)),
+    cathode: joined(places.map(({ cathode }) => cathode)),
+    overall: sidesOf(...reactions),
+    media: mediaOf(
+      null,
+      reactions.flatMap((reaction) => speciesOf(sidesOf(reaction))),
+    ),
+    mode: null,
+    divided,
+  });
+};
+
+const joined = (sides: readonly Sides[]): Sides => ({
+  reactants: sides.flatMap(({ reactants }) => reactants),
+  products: sides.flatMap(({ products }) => products),
+});
