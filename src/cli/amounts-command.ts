@@ -77,9 +77,11 @@ export const amountsCommand = (shell: Shell): CommandUnknownOpts => {
     .addHelpText(
       'after',
       examples(
-        'couplet amounts --half "Cu^2+ + 2 e^- -> Cu" --species Cu --given current="250 A" --given time="6 h" --given efficiency="94 %" --want mass=kg',
+        'couplet amounts --half "Cu^2+ + 2 e^- -> Cu" --species Cu --given current="250 A" \\',
+        '                --given time="6 h" --given efficiency="94 %" --want mass=kg',
         'couplet amounts --half "Zn^2+ -> Zn @ 90 %" --half "H^+ -> H2" --species Zn --given charge="1 kA h"',
-        'couplet amounts --anode "H2O -> O2" --cathode "Cu^2+ -> Cu" --species O2 --given current="2 A" --given time="1 h" --given temperature="25 °C" --given pressure="1 bar"',
+        'couplet amounts --anode "H2O -> O2(g)" --cathode "Cu^2+ -> Cu" --species O2 --given current="2 A" \\',
+        '                --given time="1 h" --given temperature="25 °C" --given pressure="1 bar"',
       ),
     );
   return command.action((options) => {
