@@ -1,0 +1,161 @@
+import { readFileSync } from 'node:fs';
+import { describe, expect, it } from 'vitest';
+import { answerSheet } from '../../src/desk/sheet.ts';
+import type { SheetAnswer } from '../../src/desk/sheet.ts';
+import { LONGEST_SHEET } from '../../src/desk/sheet-text.ts';
+import type { Fault } from '../../src/report/fault.ts';
+
+const QUAY = readFileSync('fixtures/tern-quay.yaml', 'utf8');
+
+const sheetOf = (text: string): SheetAnswer => {
+  const read = answerSheet(text);
+  if (!read.ok) throw new Error(read.fault.message);
+  return read.value;
+};
+
+const faultOf = (text: string): Fault => {
+  const read = answerSheet(text);
+  if (read.ok) throw new Error('the sheet was answered');
+  return read.fault;
+};
+
+/** The text that a fault underlines. */
+const underlined = (text: string, { span }: Fault): string =>
+  span === undefined ? '' : Array.from(text).slice(span.from, span.to).join('');
+
+const tank = (name: string, rest = ''): string => `  - name: ${name}
+    medium: acid
+    anode: [H2O -> O2(g)]
+    cathode: [Cu^2+ -> Cu]
+${rest}`;
+
+const GOOD = tank('Good', '    runs: [{ label: r, current: 2 A, time: 1 h }]\n');
+
+describe('the sheet of Tern Quay', () => {
+  const quay = sheetOf(QUAY);
+
+  it('answers all four tanks and all their runs', () => {
+    expect(quay.tanks.map(({ name }) => name)).toEqual(['Tank A', 'Tank B', 'Tank C', 'Tank D']);
+    for (const one of quay.tanks) {
+      expect('fault' in one).toBe(false);
+      if (!('fault' in one)) expect(one.runs.some((run) => 'fault' in run)).toBe(false);
+    }
+    expect(quay.invented).toBe(true);
+  });
+
+  it.each([
+    // By hand: twice (Cu^2+ + 2 e^- -> Cu) and once (2 H2O -> O2 + 4 H^+ + 4 e^-).
+    [0, '2 Cu^2+ + 2 H2O', '4', { Cu: '2', O2: '4' }],
+    // 92 % and 8 % of 100 electrons: 46 Zn and 4 H2 against 25 O2.
+    [1, '46 Zn(OH)4^2-', '100', { Zn: '2', O2: '4', H2: '2' }],
+    [2, 'SO3^2- + 2 Ag(S2O3)2^3- + H2O', '2', { Ag: '1', 'SO4^2-': '2' }],
+    [3, 'Cl^- + H2O', '2', { 'ClO^-': '2', H2: '2' }],
+  ])('tank %i: overall reaction, electron number and electrons per mole', (at, left, electrons, perMole) => {
+    const one = quay.tanks[at];
+    if (one === undefined || 'fault' in one || 'fault' in one.yield) throw new Error('a fault');
+    expect(one.cell.answer.overall.plain.split(' -> ')[0]).toBe(left);
+    expect(one.cell.answer.electrons).toBe(electrons);
+    expect(one.yield.answer.electronsPerMole).toMatchObject(perMole);
+  });
+
+  it('makes 1.672 kg of copper on Monday', () => {
+    // 250 A * 6 h * 3600 s/h * 0.94 * 63.546 g/mol / (2 * 96485.33212 C/mol) = 1671.5 g
+    const [a] = quay.tanks;
+    if (a === undefined || 'fault' in a) throw new Error('a fault');
+    const [monday] = a.runs;
+    if (monday === undefined || 'fault' in monday) throw new Error('a fault');
+    expect(monday.amounts.answer.quantities['mass']?.unit).toBe('kg');
+    expect(monday.amounts.answer.quantities['mass']?.value).toBeCloseTo(1.67154, 4);
+  });
+});
+
+describe('a fault in one tank', () => {
+  const broken = (lines: string): string => `plant: P\ncells:\n${GOOD}${lines}${tank('Last')}`;
+
+  it.each([
+    [
+      'a wrong element',
+      tank('Bad').replace('Cu^2+ -> Cu]', 'Cu^2+ -> Cq]'),
+      'unknown-element',
+      'cells[1].cathode[0]',
+      'Cq',
+    ],
+    ['a wrong key', tank('Bad', '    purpos: x\n'), 'bad-ask', 'cells[1].purpos', 'purpos'],
+    ['a wrong medium', tank('Bad').replace('acid', 'sour'), 'unknown-medium', 'cells[1].medium', 'sour'],
+    ['a repeated name', tank('Good'), 'bad-ask', 'cells[1].name', 'name'],
+    ['an electrode that is no list', tank('Bad').replace('[H2O -> O2(g)]', 'x'), 'bad-ask', 'cells[1].anode', 'anode'],
+    ['a tank that is text', '  - just text\n', 'bad-ask', 'cells[1]', 'just text'],
+  ])('has its place and does not lose the others: %s', (_, lines, code, field, text) => {
+    const sheet = broken(lines);
+    const { tanks } = sheetOf(sheet);
+    expect(tanks.map((one) => 'fault' in one)).toEqual([false, true, false]);
+    const bad = tanks[1];
+    if (bad === undefined || !('fault' in bad)) throw new Error('no fault');
+    expect(bad.fault).toMatchObject({ code, field });
+    expect(underlined(sheet, bad.fault)).toBe(text);
+  });
+
+  it.each([
+    ['a unit', '{ label: r, current: 2 Q, time: 1 h }', 'unknown-unit', 'cells[1].runs[0].current', 'Q'],
+    ['a key', '{ label: r, curent: 2 A, time: 1 h }', 'bad-ask', 'cells[1].runs[0].curent', 'curent'],
+    ['too little', '{ label: r, current: 2 A }', 'not-enough-given', undefined, undefined],
+    ['a weight', '{ label: r, charge: 1 A h, weighed: heavy }', undefined, 'cells[1].runs[0].weighed', 'heavy'],
+    ['a product', '{ label: r, product: Ag, charge: 1 A h }', 'bad-ask', 'cells[1].runs[0].product', undefined],
+  ])('of a run has its place and loses neither tank nor other runs: %s', (_, run, code, field, text) => {
+    const sheet = broken(tank('Bad', `    runs:\n      - ${run}\n      - { label: ok, charge: 1 A h }\n`));
+    const bad = sheetOf(sheet).tanks[1];
+    if (bad === undefined || 'fault' in bad) throw new Error('the tank is lost');
+    const [first, second] = bad.runs;
+    if (first === undefined || !('fault' in first)) throw new Error('no fault');
+    expect(second !== undefined && 'amounts' in second).toBe(true);
+    if (code !== undefined) expect(first.fault.code).toBe(code);
+    if (field !== undefined) expect(first.fault.field).toBe(field);
+    if (text !== undefined) expect(underlined(sheet, first.fault)).toBe(text);
+  });
+});
+
+describe('a sheet that cannot be read', () => {
+  it.each([
+    ['a tab', 'plant: P\ncells:\n\t- name: A\n', '\t'],
+    ['a key that stands twice', `plant: P\nplant: Q\ncells:\n${GOOD}`, 'plant'],
+    ['an unknown key', `plant: P\ncolour: red\ncells:\n${GOOD}`, 'colour'],
+  ])('is a bad-ask with its place: %s', (_, text, place) => {
+    const fault = faultOf(text);
+    expect(fault.code).toBe('bad-ask');
+    expect(underlined(text, fault)).toBe(place);
+  });
+
+  it.each([
+    ['no tanks', 'plant: P\n'],
+    ['an empty list of tanks', 'plant: P\ncells: []\n'],
+    ['nothing', ''],
+    ['text', 'hello'],
+    ['a list', '- a\n- b\n'],
+    ['two documents', 'plant: P\n---\nplant: Q\n'],
+    ['an alias to nothing', 'plant: *p\ncells: []\n'],
+    ['an open quotation mark', 'plant: "P\ncells: []\n'],
+  ])('is a bad-ask: %s', (_, text) => {
+    expect(faultOf(text).code).toBe('bad-ask');
+  });
+
+  it('is not read where aliases expand without end', () => {
+    const levels = Array.from(
+      { length: 12 },
+      (_, at) => `l${String(at + 1)}: &l${String(at + 1)} [${`*l${String(at)},`.repeat(9)}]`,
+    );
+    expect(faultOf(`l0: &l0 x\n${levels.join('\n')}\n`).message).toContain('liases');
+  });
+
+  it.each([
+    ['brackets', '['.repeat(100_000)],
+    ['dashes', '- '.repeat(50_000)],
+    ['question marks', '? '.repeat(50_000)],
+    ['steps', Array.from({ length: 600 }, (_, at) => `${' '.repeat(at)}a:`).join('\n')],
+  ])('is refused where %s nest too deeply', (_, text) => {
+    expect(faultOf(text).message).toContain('deep');
+  });
+
+  it('is refused where it is too long', () => {
+    expect(faultOf('#'.repeat(LONGEST_SHEET + 1)).code).toBe('too-long');
+  });
+});
