@@ -1,10 +1,10 @@
 import type { Reaction, Term } from '../balance/reaction.ts';
-import { type Rational, ONE, isZero, signOf } from '../exact/rational.ts';
+import { type Rational, ONE, ZERO, isZero, signOf } from '../exact/rational.ts';
 import { HYDROXIDE, PROTON, WATER, mediumRow } from './media.ts';
 import type { Medium } from './medium.ts';
 import { hasTwoStates, sumOfTerms, termsOf } from './split-amounts.ts';
 import { type SplitHalf, completeTerms, electronsOf, halfOfTerms, helpersOf } from './split-complete.ts';
-import { type Component, backgroundOf, componentsOf, sidesOf } from './split-components.ts';
+import { type Background, type Component, backgroundOf, componentsOf, sidesOf } from './split-components.ts';
 import { divide } from './split-divide.ts';
 import { flowsOf } from './split-flows.ts';
 import { type IonicReaction, type Reach, ionicReaction } from './split-ionic.ts';
@@ -42,7 +42,7 @@ const ionicForms = (reaction: Reaction, medium: Medium, reach: Reach): readonly 
 const splitIonic = ({ amounts, medium }: IonicReaction): Halves | null => {
   const terms = termsOf(amounts);
   const background = backgroundOf(helpersOf(medium));
-  const { flows } = flowsOf(terms);
+  const { flows, decided } = flowsOf(terms);
   const components = componentsOf(terms, flows, { ...background, keys: new Set(medium.helpers.map(({ key }) => key)) });
   const oxidised: Term[] = [];
   const reduced: Term[] = [];
@@ -52,7 +52,17 @@ const splitIonic = ({ amounts, medium }: IonicReaction): Halves | null => {
     oxidised.push(...parts.oxidised);
     reduced.push(...parts.reduced);
   }
-  return joined(oxidised, reduced, { amounts, medium });
+  const halves = joined(oxidised, reduced, { amounts, medium });
+  const given = components.reduce((sum, component) => sum.add(givenBy(component, background)), ZERO);
+  return halves === null || !decided || halves.electrons.equals(given) ? halves : null;
+};
+
+/** Electrons that the oxidised atoms of a component give, by their oxidation numbers. */
+const givenBy = (component: Component, background: Background): Rational => {
+  const sides = sidesOf(component, background);
+  return component.flows
+    .filter((_, at) => sides[at] === 1n)
+    .reduce((sum, flow) => sum.add(flow.to.sub(flow.from).mul(flow.atoms)), ZERO);
 };
 
 interface Parts {
@@ -61,7 +71,7 @@ interface Parts {
 }
 
 /** A component goes to one half as a whole, or is divided, or exchanges no electrons and goes to neither. */
-const partsOf = (component: Component, background: Parameters<typeof divide>[2], medium: Medium): Parts | null => {
+const partsOf = (component: Component, background: Background, medium: Medium): Parts | null => {
   const completed = completeTerms(component.terms, medium);
   if (completed === null) return null;
   const sides = sidesOf(component, background);

@@ -28,15 +28,7 @@ export const ionicReaction = (reaction: Reaction, medium: Medium, reach: Reach):
     nu,
   ]);
   const amounts = foldedIons(sumOfTerms(lists));
-  return {
-    amounts,
-    medium: molecular
-      ? mediumShown(
-          lists.flatMap(([terms]) => terms),
-          medium,
-        )
-      : medium,
-  };
+  return { amounts, medium: molecular ? mediumShown(reaction, medium) : medium };
 };
 
 const portionsOf = (species: Species, reach: Reach, molecular: boolean): readonly Portion[] => {
@@ -73,9 +65,12 @@ export const foldedIons = (amounts: Amounts): Amounts => {
   ]);
 };
 
-const mediumShown = (terms: readonly Term[], medium: Medium): Medium => {
-  const has = (ion: Species): boolean => terms.some(({ species }) => species.key === ion.key);
+/** Base where hydroxide ions stand in a molecular reaction, dissolved or not, and no strong acid does; acid else. */
+const mediumShown = (reaction: Reaction, medium: Medium): Medium => {
   if (medium.name === null || medium.name.startsWith('molten')) return medium;
-  const name = has(HYDROXIDE) && !has(PROTON) ? 'base' : has(PROTON) || medium.name !== 'base' ? 'acid' : 'base';
+  const has = (ion: Species, ions: (species: Species) => readonly Portion[] | null): boolean =>
+    reaction.terms.some(({ species }) => ions(species)?.some((portion) => portion.species.key === ion.key) ?? false);
+  const acid = has(PROTON, dissolvedIons);
+  const name = !acid && (medium.name === 'base' || has(HYDROXIDE, ionsOfSalt)) ? 'base' : 'acid';
   return { name, helpers: mediumRow(name)?.helpers ?? [] };
 };

@@ -34,7 +34,7 @@ export interface RedoxSplit {
 export const splitReaction = (unsplit: Unsplit): Result<RedoxSplit> => {
   const { reaction, medium } = unsplit;
   const { flows, decided } = flowsOf(reaction.terms);
-  const halves = settledHalves(unsplit) ?? halvesOf(reaction, medium);
+  const halves = chosenHalves(unsplit, halvesOf(reaction, medium));
   const electrons = halves?.electrons ?? increaseIn(flows);
   if (isZero(electrons)) return noElectrons(reaction, decided);
   const split = {
@@ -46,8 +46,9 @@ export const splitReaction = (unsplit: Unsplit): Result<RedoxSplit> => {
   return success(split, [...(halves === null ? [halvesOmitted()] : []), ...(decided ? [] : [undecided()])]);
 };
 
-const settledHalves = ({ reaction, medium, halves, exchanged }: Unsplit): Halves | null => {
-  if (halves === null || exchanged === null) return null;
+/** A coupling's own halves count, but where those found exchange as many electrons they are ionic and are taken. */
+const chosenHalves = ({ reaction, medium, halves, exchanged }: Unsplit, found: Halves | null): Halves | null => {
+  if (halves === null || exchanged === null || found?.electrons.equals(exchanged) === true) return found;
   const order = reaction.terms.map(({ species }) => species.key);
   const taken = (half: Reaction): SplitHalf => ({
     half: halfOfTerms(half.terms, medium, order).half,
