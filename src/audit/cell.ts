@@ -1,5 +1,5 @@
 import { type Reaction, plainReaction } from '../balance/reaction.ts';
-import { type Rational, showRational, signOf } from '../exact/rational.ts';
+import { type Rational, isZero, showRational, signOf } from '../exact/rational.ts';
 import type { Medium } from '../redox/medium.ts';
 import { type Note, note } from '../report/note.ts';
 import { type Result, chain, inField, success } from '../report/result.ts';
@@ -127,7 +127,9 @@ const matchOf = (parts: Parts): Match | null => {
     versionsOf(audit).map((version) =>
       signOf(electronsGiven(version.reaction)) === -direction ? turned(version) : version,
     );
-  for (const overall of versionsOf(parts.overall)) {
+  // electrons that are left over make no overall equation, though multiples of the electrodes may add up to it
+  const whole = versionsOf(parts.overall).filter(({ reaction }) => isZero(electronsGiven(reaction)));
+  for (const overall of whole) {
     for (const anode of electrode(parts.anode, 1n)) {
       for (const cathode of electrode(parts.cathode, -1n)) {
         const combination = combinationOf(anode.reaction, cathode.reaction, overall.reaction);

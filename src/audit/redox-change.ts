@@ -1,10 +1,19 @@
 import { type Rational, ZERO, isZero, signOf } from '../exact/rational.ts';
-import { oxidationNumbers } from '../species/oxidation.ts';
-import { isElectron } from '../species/species.ts';
+import { type OxidationNumbers, oxidationNumbers } from '../species/oxidation.ts';
+import { type Species, isElectron } from '../species/species.ts';
 import type { Draft } from './writing.ts';
 
 /** What becomes of the oxidation numbers in an equation; `unknown` where convention does not decide one of them. */
 export type RedoxChange = 'none' | 'oxidation' | 'reduction' | 'both' | 'unknown';
+
+/** Numbers already found: a pure function of the species, kept as long as the species is. */
+const found = new WeakMap<Species, OxidationNumbers>();
+
+const numbersOf = (species: Species): OxidationNumbers => {
+  const known = found.get(species) ?? oxidationNumbers(species);
+  found.set(species, known);
+  return known;
+};
 
 /**
  * How the oxidation numbers change from left to right. An element whose numbers are spread otherwise, though their sum
@@ -36,15 +45,15 @@ const spreadOf = (draft: Draft): ReadonlyMap<string, ReadonlyMap<string, Spread>
   const spread = new Map<string, Map<string, Spread>>();
   for (const { species, side, coefficient } of draft) {
     if (isElectron(species)) continue;
-    const found = oxidationNumbers(species);
-    if (found.kind === 'undecided') return null;
+    const own = numbersOf(species);
+    if (own.kind === 'undecided') return null;
     const times = side === 'right' ? coefficient : coefficient.neg();
-    for (const [element, numbers] of found.numbers) {
+    for (const [element, numbers] of own.numbers) {
       const byNumber = spread.get(element) ?? new Map<string, Spread>();
       spread.set(element, byNumber);
       numbers.forEach((number, index) => {
         const key = number.toFraction();
-        const atoms = (byNumber.get(key)?.atoms ?? ZERO).add(times.mul(found.counts.get(element)?.[index] ?? ZERO));
+        const atoms = (byNumber.get(key)?.atoms ?? ZERO).add(times.mul(own.counts.get(element)?.[index] ?? ZERO));
         byNumber.set(key, { number, atoms });
       });
     }

@@ -75,7 +75,7 @@ export const EDIT_COSTS = {
 
 /** What it costs to take one species for another, by how well both are known. */
 export const RESPELLING_COSTS = {
-  common: { common: 1.5, other: 2.4 },
+  common: { common: 1.5, other: 3 },
   rare: { common: 0.5, other: 2 },
   unlisted: { common: 0.75, other: 1.8 },
   'unlisted-ion': { common: 0.12, other: 1.8 },
