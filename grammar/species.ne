@@ -76,6 +76,8 @@ decimal -> integer %period %digit        {% ([number, point, token]) => build.di
          | integer %period %zero         {% ([number, point, token]) => build.digit(build.digit(number, point), token) %}
          | %zero %period %digit          {% ([zero, point, token]) => build.digit(build.digit(build.number(zero), point), token) %}
          | %zero %period %zero           {% ([zero, point, token]) => build.digit(build.digit(build.number(zero), point), token) %}
+         | %onePoint %digit              {% ([one, token]) => build.digit(build.number(one), token) %}
+         | %onePoint %zero               {% ([one, token]) => build.digit(build.number(one), token) %}
          | decimal %digit                {% ([number, token]) => build.digit(number, token) %}
          | decimal %zero                 {% ([number, token]) => build.digit(number, token) %}
 

@@ -2,7 +2,7 @@ import type { Token } from 'moo';
 import type { Fault } from '../report/fault.ts';
 import { faultAt, isType, placeOf } from './place.ts';
 
-const DIGITS: readonly string[] = ['digit', 'zero', 'subDigit', 'subZero'];
+const DIGITS: readonly string[] = ['digit', 'zero', 'onePoint', 'subDigit', 'subZero'];
 const isDigit = (token: Token | undefined): token is Token => isType(token, ...DIGITS);
 const inNumber = (token: Token | undefined): token is Token => isDigit(token) || isType(token, 'period');
 

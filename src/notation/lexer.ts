@@ -1,4 +1,5 @@
 import moo from 'moo';
+import { SPACE_CLASS } from './spaces.ts';
 import { ELEMENTS_BY_LENGTH } from './symbols.ts';
 
 /** Superscript, subscript and fullwidth forms and the plain character that each stands for. */
@@ -36,14 +37,11 @@ export const STATES: readonly string[] = [
   'g',
 ];
 
-/** Spaces of every width that carry no meaning of their own, line ends included. */
-const SPACES = '[ \\t\\r\\n\\u00a0\\u2000-\\u200a\\u202f\\u205f\\u3000]+';
-
 const alternatives = (words: readonly string[]): string => [...words].sort((a, b) => b.length - a.length).join('|');
 
 /** Token types, tried in this order at each place. Every text lexes: what fits nowhere is a `stray`. */
 const rulesFor = (names: readonly string[], unknowns: readonly string[]): moo.Rules => ({
-  space: { match: new RegExp(SPACES, 'u'), lineBreaks: true },
+  space: { match: new RegExp(`[${SPACE_CLASS}]+`, 'u'), lineBreaks: true },
   state: {
     match: new RegExp(`\\(\\s*(?:${alternatives(STATES)})\\s*(?:,[^()]*)?\\)`, 'u'),
     lineBreaks: true,
@@ -55,6 +53,8 @@ const rulesFor = (names: readonly string[], unknowns: readonly string[]): moo.Ru
     value: plainForm,
   },
   electron: /e/u,
+  // 1.5 as a count: a count of 1 is never written, so its period is no dot of an adduct.
+  onePoint: /(?<![0-9.])1\.(?=[0-9])/u,
   zero: /0/u,
   digit: /[1-9]/u,
   subZero: { match: /₀/u, value: plainForm },

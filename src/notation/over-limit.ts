@@ -4,7 +4,7 @@ import { LIMITS } from './limits.ts';
 
 const DIGITS = new RegExp(`[\\d₀-₉⁰¹²³⁴-⁹]{${String(LIMITS.digits + 1)},}`, 'u');
 /** A number, a period and digits, with more formula behind: count 4.5, or count 4 and 5 of what follows. */
-const DOUBTFUL_PERIOD = /[1-9]\d*\.[1-9]/gu;
+const DOUBTFUL_PERIOD = /(?<![\d.])(?!1\.)[1-9]\d*\.(?=[1-9])/gu;
 
 const nestingOf = (text: string): { readonly depth: number; readonly at: number } => {
   let depth = 0;

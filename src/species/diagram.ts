@@ -3,6 +3,7 @@ import { type WithConcentration, cutConcentration } from '../notation/concentrat
 import { LIMITS } from '../notation/limits.ts';
 import { faultAt } from '../notation/place.ts';
 import { type DiagramPiece, diagramPieces } from '../notation/split-diagram.ts';
+import { isBlank, trimPlace } from '../notation/spaces.ts';
 import type { Fault } from '../report/fault.ts';
 import { note } from '../report/note.ts';
 import { type Result, all, chain, failure, map, success, withNotes } from '../report/result.ts';
@@ -23,12 +24,6 @@ export interface Diagram {
 
 /** Species places, phase by phase. */
 type Phase = readonly Place[];
-
-const trimmed = (text: string, { from, to }: Place): Place => {
-  const part = text.slice(from, to);
-  const start = from + part.length - part.trimStart().length;
-  return { from: start, to: Math.max(start, from + part.trimEnd().length) };
-};
 
 /** The faults of a part that begins at `from`, seen from the whole text. */
 const shifted = (fault: Fault, text: string, from: number, to: number): Fault => {
@@ -74,7 +69,7 @@ const gather = (text: string, pieces: readonly DiagramPiece[]): Sides => {
   for (const piece of pieces) {
     if (piece.kind === 'bridge') sides.push([[]]);
     if (piece.kind === 'boundary') sides.at(-1)?.push([]);
-    if (piece.kind === 'species') sides.at(-1)?.at(-1)?.push(trimmed(text, piece.place));
+    if (piece.kind === 'species') sides.at(-1)?.at(-1)?.push(trimPlace(text, piece.place));
   }
   return { sides };
 };
@@ -87,9 +82,7 @@ const readSide = (
   all(side.map((phase) => all(phase.map((place) => readPlace(text, place, options)))));
 
 const checkPieces = (text: string, pieces: readonly DiagramPiece[]): Fault | null => {
-  const empty = pieces.findIndex(
-    ({ kind, place }) => kind === 'species' && text.slice(place.from, place.to).trim() === '',
-  );
+  const empty = pieces.findIndex(({ kind, place }) => kind === 'species' && isBlank(text.slice(place.from, place.to)));
   if (empty >= 0) return missing(text, pieces, empty);
   const bridges = pieces.filter(({ kind }) => kind === 'bridge');
   const second = bridges[1];
@@ -120,7 +113,7 @@ export const readDiagram = (text: string, options: ReadingOptions = {}): Result<
     const message = `a diagram has at most ${String(LIMITS.equationLength)} characters`;
     return failure({ code: 'too-long', message, span: wholeSpan(text), hint: 'describe one cell at a time' });
   }
-  if (text.trim() === '') return failure({ code: 'empty', message: 'nothing is written', span: { from: 0, to: 0 } });
+  if (isBlank(text)) return failure({ code: 'empty', message: 'nothing is written', span: { from: 0, to: 0 } });
   const pieces = diagramPieces(text);
   const fault = checkPieces(text, pieces);
   if (fault !== null) return failure(fault);

@@ -4,6 +4,7 @@ import { coefficientOf } from '../notation/coefficient.ts';
 import { LIMITS } from '../notation/limits.ts';
 import { faultAt } from '../notation/place.ts';
 import { placementsOf } from '../notation/terms.ts';
+import { isBlank, trimPlace } from '../notation/spaces.ts';
 import type { Fault } from '../report/fault.ts';
 import { type Result, all, chain, failure, map, success } from '../report/result.ts';
 import { codePointsBefore, shiftSpan, spanOf, wholeSpan } from '../report/span.ts';
@@ -14,18 +15,12 @@ import { type ReadingOptions, readSpecies, spells } from './read-species.ts';
 const shifted = (fault: Fault, text: string, from: number): Fault =>
   fault.span === undefined ? fault : { ...fault, span: shiftSpan(fault.span, codePointsBefore(text, from)) };
 
-/** `place` without the spaces at its ends. */
-const trimmed = (text: string, { from, to }: Place): Place => {
-  const part = text.slice(from, to);
-  const start = from + part.length - part.trimStart().length;
-  return { from: start, to: Math.max(start, from + part.trimEnd().length) };
-};
-
 /** True where the text is a term: a coefficient, if any, and something that parses as a species. */
 const readsAsTerm =
   (options: ReadingOptions) =>
   (part: string): boolean => {
-    const term = part.trim();
+    const { from, to } = trimPlace(part, { from: 0, to: part.length });
+    const term = part.slice(from, to);
     if (term === '' || term.startsWith('+')) return false;
     const coefficient = coefficientOf(term, options.where ?? new Map());
     if (!coefficient.ok) return coefficient.fault.code === 'bad-count';
@@ -43,18 +38,22 @@ const missingTerm = (text: string, place: Place): Fault => {
   );
 };
 
+const missingSpecies = (text: string, coefficient: Place): Fault =>
+  faultAt(text, 'empty-side', coefficient, 'a species is missing behind this number', 'write what is counted');
+
 const readTerm = (
   text: string,
   place: Place,
   spanOfPlace: SpanOfPlace,
   options: ReadingOptions,
 ): Result<EquationTerm> => {
-  const { from, to } = trimmed(text, place);
+  const { from, to } = trimPlace(text, place);
   if (from === to) return failure(missingTerm(text, place));
   const term = text.slice(from, to);
   const coefficient = coefficientOf(term, options.where ?? new Map());
   if (!coefficient.ok) return failure(shifted(coefficient.fault, text, from));
   const { value, length } = coefficient.value;
+  if (length === term.length) return failure(missingSpecies(text, { from, to }));
   const reading = readSpecies(term.slice(length), options);
   if (!reading.ok) return failure(shifted(reading.fault, text, from + length));
   return success(
@@ -87,7 +86,7 @@ const readSide = (
   arrow: Place,
   options: ReadingOptions,
 ): Result<readonly EquationTerm[]> => {
-  const side = trimmed(text, place);
+  const side = trimPlace(text, place);
   if (side.from === side.to)
     return failure(
       faultAt(text, 'empty-side', arrow, 'a side of the equation is empty', 'write at least one species on each side'),
@@ -170,7 +169,7 @@ export const readEquation = (text: string, options: ReadingOptions = {}): Result
     const message = `an equation has at most ${String(LIMITS.equationLength)} characters`;
     return failure({ code: 'too-long', message, span: wholeSpan(text), hint: 'ask for one reaction at a time' });
   }
-  if (text.trim() === '') return failure({ code: 'empty', message: 'nothing is written', span: { from: 0, to: 0 } });
+  if (isBlank(text)) return failure({ code: 'empty', message: 'nothing is written', span: { from: 0, to: 0 } });
   return chain(findArrow(text, options), (arrow) =>
     chain(readSide(text, { from: 0, to: arrow.from }, arrow, options), (left) =>
       map(readSide(text, { from: arrow.to, to: text.length }, arrow, options), (right) => ({ text, left, right })),

@@ -29,7 +29,8 @@ export interface Ranking {
  *  rule                spelling        taken as          because
  *  contested           I3-, Br3-       several-readings  chemists write both: (I3)^- and I^3-
  *                      N3-, O2-, VO2+  several-readings  both are well-known ions
- *  one known ion       NO3-, VO2^...   NO3^-             exactly one reading is in the table of ions
+ *                      CrCl2+          several-readings  any spelling of which both readings are in the table of ions
+ *  one known ion       NO3-, TiO2+     NO3^-, TiO^2+     exactly one reading is in the table of ions (or defined in the ask)
  *  last digit          SO42-, Hg22+    SO4^2-, Hg2^2+    of several digits the last is the charge
  *  whole bracket       [Fe(CN)6]3-     [Fe(CN)6]^3-      a bracket around everything is followed by the charge
  *  single cation       Fe3+            Fe^3+             one atom and one digit: the digit is the charge
@@ -88,12 +89,6 @@ const isPlausibleAdduct = (reading: Reading): boolean =>
     return !isDoubtfulDot(written) || (part !== undefined && isAdductMolecule(part));
   });
 
-const writesOneBeforeDot = (reading: Reading): boolean =>
-  chainItems(reading.syntax.parts).some(({ separator }, index, parts) => {
-    const count = separator?.type === 'period' ? parts[index - 1]?.members.last.count : null;
-    return count?.kind === 'number' && count.tokens.before === null && count.tokens.last.value === '1';
-  });
-
 /** The adduct with the most plausible dots, else the reading with the fewest dots. */
 const byPeriods = (readings: readonly Reading[]): readonly Reading[] => {
   const weight = (reading: Reading): number =>
@@ -123,8 +118,5 @@ const sortPair = (readings: readonly Reading[], isKnown: IsKnown): Ranking => {
 };
 
 /** The readings of one spelling in order of preference, by the table above. `isKnown`: the ion has a name of its own. */
-export const rankReadings = (readings: readonly Reading[], isKnown: IsKnown): Ranking => {
-  const sensible = readings.filter((reading) => !writesOneBeforeDot(reading));
-  const kept = sensible.length === 0 ? readings : sensible;
-  return kept.length < 2 ? { readings: kept, contested: false, because: null } : sortPair(kept, isKnown);
-};
+export const rankReadings = (readings: readonly Reading[], isKnown: IsKnown): Ranking =>
+  readings.length < 2 ? { readings, contested: false, because: null } : sortPair(readings, isKnown);
