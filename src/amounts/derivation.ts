@@ -43,8 +43,7 @@ const tankDirection = (problem: Problem, given: readonly Given[]): 'falls' | 'ri
 const volumeOf = (problem: Problem, given: readonly Given[]): RelationChoice['volume'] => {
   const has = (name: VariableName): boolean => given.some((one) => one.name === name);
   if (has('from') || has('to')) return tankDirection(problem, given);
-  if (gasKind(problem.asked.species) !== 'no-gas') return 'gas';
-  return has('volume') ? 'falls' : 'none';
+  return gasKind(problem.asked.species) === 'no-gas' ? 'none' : 'gas';
 };
 
 const relationsFor = (problem: Problem, given: readonly Given[], series: Measured): readonly Relation[] => {

@@ -5,6 +5,7 @@ import type { AmountsAnswer, Working } from './working.ts';
 import { type Knowledge, isUsed, whatWouldDo } from './missing.ts';
 import { QUANTITIES, type QuantityName, isQuantityName } from './quantities.ts';
 import type { VariableName } from './relations.ts';
+import { closureOf } from './solver.ts';
 
 /** Quantities that were measured for the sake of the answer: given and leading nowhere, they are never passed over. */
 const NEVER_IDLE: readonly VariableName[] = ['volume', 'thickness', 'from', 'to'];
@@ -42,6 +43,15 @@ export const idleGivens = ({ derived, given }: Working): Working['given'] => {
   return given.filter(({ name }) => !isUsed(name, known, derived.relations));
 };
 
+/** A gas volume needs temperature and pressure, whatever else could be turned around; any other is that of a tank. */
+const missingBeside = (working: Working, name: VariableName): readonly string[] => {
+  const { known, relations } = working.derived;
+  const gas = relations.some(({ terms }) => terms.some(([term]) => term === 'gas_constant'));
+  if (name === 'volume')
+    return (gas ? (['temperature', 'pressure'] as const) : (['from', 'to'] as const)).filter((one) => !known.has(one));
+  return whatWouldDo(knowledgeOf(working), (names) => isUsed(name, names, relations), [name]);
+};
+
 const checkIdle = (working: Working, wanted: readonly string[]): Result<null> => {
   const { derived } = working;
   const led = derived.known.has('charge') || derived.known.has('amount') || wanted.length > 0;
@@ -50,9 +60,8 @@ const checkIdle = (working: Working, wanted: readonly string[]): Result<null> =>
     .filter(({ name }) => !(perArea && name === 'density'))
     .find(({ name }) => !led || NEVER_IDLE.includes(name));
   if (idle === undefined) return success(null);
-  const missing = whatWouldDo(knowledgeOf(working), (names) => isUsed(idle.name, names, derived.relations), [
-    idle.name,
-  ]);
+  const beside = missingBeside(working, idle.name);
+  const missing = beside.length === 0 && !derived.known.has('charge') ? ['charge'] : beside;
   const what = isQuantityName(idle.name) ? QUANTITIES[idle.name].name : idle.field;
   return notEnough(led ? idle.field : 'given', `${what} alone leads nowhere`, missing, led ? idle.text : undefined);
 };
@@ -60,16 +69,19 @@ const checkIdle = (working: Working, wanted: readonly string[]): Result<null> =>
 const follows = ({ quantities, alongside }: AmountsAnswer, name: string): boolean =>
   [quantities, ...Object.values(alongside)].some((one) => one[name] !== undefined);
 
-const missingFor = (working: Working, name: QuantityName): readonly string[] => {
-  const variable = name === 'share' ? 'efficiency' : name;
-  if (variable !== 'efficiency') return whatWouldDo(knowledgeOf(working), (names) => names.has(variable), [variable]);
-  const knowledge = { ...knowledgeOf(working), defaultEfficiency: false };
-  const names = new Set(
-    [...knowledge.names].filter((known) => !working.derived.assumed.has(known) || known === 'blank'),
+/** An efficiency needs both a charge and a measured amount; what was only assumed is neither. */
+const missingForEfficiency = ({ derived, given }: Working): readonly string[] => {
+  const constants = (['gas_constant', 'series', 'faraday', 'molar_mass'] as const).filter((name) =>
+    derived.known.has(name),
   );
-  const charged = names.has('charge') ? [] : ['charge'];
-  return names.has('amount') ? charged : [...charged, 'mass'];
+  const measured = closureOf([...constants, ...given.map(({ name }) => name)], derived.relations);
+  return [...(measured.has('charge') ? [] : ['charge']), ...(measured.has('amount') ? [] : ['mass'])];
 };
+
+const missingFor = (working: Working, name: QuantityName): readonly string[] =>
+  name === 'share' || name === 'efficiency'
+    ? missingForEfficiency(working)
+    : whatWouldDo(knowledgeOf(working), (names) => names.has(name), [name]);
 
 const checkWanted = (working: Working, answer: AmountsAnswer, wanted: readonly string[]): Result<null> => {
   const name = wanted.filter(isQuantityName).find((one) => !follows(answer, one));
