@@ -4,6 +4,7 @@ import { plainSpecies } from '../species/species.ts';
 import { countOf, labelsOf } from './labels.ts';
 import type { PairHalves } from './pair-halves.ts';
 import type { MeasuredChange, Pair } from './pair.ts';
+import { untracedElements } from './untraced.ts';
 
 /** A pair with its halves. */
 export interface PairWithHalves {
@@ -13,7 +14,7 @@ export interface PairWithHalves {
 
 /**
  * A name for each pair by what it assumes, all different: "if H2O2 is only oxidised, to O2" for a reactant that is a
- * partner in every pair, one made of the helpers' elements only before others, since it is their atoms that conservation
+ * partner in every pair, one made of untraced elements only before others, since it is their atoms that conservation
  * cannot follow; else both halves in words.
  */
 export const nameCouplings = (unknowns: readonly Unknown[], pairs: readonly PairWithHalves[]): readonly string[] => {
@@ -25,10 +26,10 @@ export const nameCouplings = (unknowns: readonly Unknown[], pairs: readonly Pair
 };
 
 const reactants = (unknowns: readonly Unknown[]): readonly number[] => {
-  const lent = new Set(unknowns.filter((one) => one.helper).flatMap((one) => [...one.species.composition.keys()]));
+  const loose = untracedElements(unknowns);
   const left = range(unknowns.length).filter((index) => unknowns[index]?.side === 'left');
   const untraced = (index: number): boolean =>
-    [...(unknowns[index]?.species.composition.keys() ?? [])].every((element) => lent.has(element));
+    [...(unknowns[index]?.species.composition.keys() ?? [])].every((element) => loose.has(element));
   return [...left.filter(untraced), ...left.filter((index) => !untraced(index))];
 };
 

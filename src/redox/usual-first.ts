@@ -4,6 +4,7 @@ import { range } from '../exact/matrix.ts';
 import { ZERO, signOf } from '../exact/rational.ts';
 import { type Labelled, countOf } from './labels.ts';
 import type { Pair } from './pair.ts';
+import { untracedElements } from './untraced.ts';
 
 /**
  * The chemist's usual answer first: pairs in which all that changes in a half goes the same way, up in the oxidation and
@@ -36,11 +37,11 @@ export const usualFirst =
     );
   };
 
-/** Elements, helpers' aside, that a partner does not share with the nearest product of each of its changes. */
+/** Elements, untraced ones aside, that a partner does not share with the nearest product of each of its changes. */
 const strangers = (unknowns: readonly Unknown[], labelled: readonly Labelled[], pair: Pair): number => {
-  const lent = new Set(unknowns.filter((one) => one.helper).flatMap((one) => [...one.species.composition.keys()]));
+  const loose = untracedElements(unknowns);
   const traced = (index: number): readonly string[] =>
-    [...(unknowns[index]?.species.composition.keys() ?? [])].filter((element) => !lent.has(element));
+    [...(unknowns[index]?.species.composition.keys() ?? [])].filter((element) => !loose.has(element));
   const apart = (a: readonly string[], b: readonly string[]): number =>
     a.filter((element) => !b.includes(element)).length + b.filter((element) => !a.includes(element)).length;
   const steps = [pair.oxidation, pair.reduction].flatMap(({ index, transitions }) =>

@@ -52,7 +52,7 @@ export const overall = (skeleton: string, medium = '', settle?: string): Overall
 export const faultWith = <Code extends Fault['code']>(
   outcome: Fault | object,
   code: Code,
-): Extract<Fault, { readonly code: Code }> => {
+): Fault & { readonly code: Code } => {
   expect(outcome).toMatchObject({ code });
-  return outcome as Extract<Fault, { readonly code: Code }>;
+  return outcome as Fault & { readonly code: Code };
 };

@@ -1,0 +1,89 @@
+import { describe, expect, it } from 'vitest';
+import { plainReaction } from '../../src/balance/reaction.ts';
+import { showRational } from '../../src/exact/rational.ts';
+import { exchangedElectrons } from '../../src/redox/exchange.ts';
+import { balanceOverall } from '../../src/redox/overall.ts';
+import type { ShownCoupling } from '../../src/report/fault.ts';
+import { plainEquation } from '../support/plain.ts';
+import { faultWith, overall } from '../support/redox.ts';
+
+const couplings = (skeleton: string, medium?: string): readonly string[] =>
+  faultWith(overall(skeleton, medium), 'several-balances').couplings.map(
+    (one: ShownCoupling) => `${one.assume}: ${one.overall?.plain ?? ''} (${one.electrons})`,
+  );
+
+describe('balancing an overall reaction', () => {
+  it('refuses a written electron', () => {
+    expect(overall('Fe^3+ + e^- -> Fe^2+', 'acid')).toMatchObject({ code: 'bad-ask' });
+  });
+
+  it('counts no electron among the unknowns', () => {
+    expect(overall('Zn + Cu^2+ -> Zn^2+ + Cu', 'none')).toMatchObject({ dimension: 1 });
+    expect(overall('Cu -> Cu^2+', 'none')).toMatchObject({ code: 'no-balance' });
+  });
+
+  it('takes the medium from the text or assumes acid, with a note', () => {
+    expect(overall('MnO4^- + Fe^2+ -> Mn^2+ + Fe^3+')).toEqual({
+      reaction: 'MnO4^- + 5 Fe^2+ + 8 H^+ -> Mn^2+ + 5 Fe^3+ + 4 H2O',
+      dimension: 1,
+      notes: ['medium-assumed'],
+    });
+  });
+});
+
+describe('couplings', () => {
+  it('name what is assumed of permanganate and peroxide, the usual answer first', () => {
+    expect(couplings('MnO4^- + H2O2 -> Mn^2+ + O2', 'acid')).toEqual([
+      'if H2O2 is only oxidised, to O2: 2 MnO4^- + 5 H2O2 + 6 H^+ -> 2 Mn^2+ + 5 O2 + 8 H2O (10)',
+      'if H2O2 is only reduced, to H2O: 2 MnO4^- + 3 H2O2 + 6 H^+ -> 2 Mn^2+ + 4 O2 + 6 H2O (6)',
+    ]);
+  });
+
+  it('work alike for a molecular skeleton', () => {
+    expect(couplings('KMnO4 + H2O2 + H2SO4 -> MnSO4 + K2SO4 + O2 + H2O', 'none')[0]).toBe(
+      'if H2O2 is only oxidised, to O2: 2 KMnO4 + 5 H2O2 + 3 H2SO4 -> 2 MnSO4 + K2SO4 + 5 O2 + 8 H2O (10)',
+    );
+    expect(couplings('KClO3 + HCl -> KCl + Cl2 + ClO2 + H2O', 'none')[0]).toBe(
+      'if KClO3 is only reduced, to ClO2: 2 KClO3 + 4 HCl -> 2 KCl + Cl2 + 2 ClO2 + 2 H2O (2)',
+    );
+  });
+
+  it('do not cross oxidation numbers before others', () => {
+    expect(couplings('VO2^+ + V^2+ -> VO^2+ + V^3+', 'acid')[0]).toBe(
+      'if VO2^+ is only reduced, to VO^2+: VO2^+ + V^2+ + 2 H^+ -> VO^2+ + V^3+ + H2O (1)',
+    );
+  });
+
+  it('fall back on simple ratios where more than one substance is oxidised', () => {
+    expect(couplings('Cl2 -> Cl^- + ClO^- + ClO3^-', 'base')).toEqual([
+      'if ClO^- and ClO3^- form one to one: 4 Cl2 + 8 OH^- -> 6 Cl^- + ClO^- + ClO3^- + 4 H2O (6)',
+    ]);
+    expect(couplings('PbS + O3 -> PbSO4 + O2', 'none')[0]).toBe('if 1 O3 gives 1 O2: PbS + 4 O3 -> PbSO4 + 4 O2 (8)');
+  });
+
+  it('bring their two halves', () => {
+    const skeleton = plainEquation('MnO4^- + H2O2 -> Mn^2+ + O2');
+    const result = balanceOverall(skeleton, 'acid', 'if H2O2 is only oxidised, to O2');
+    const halves = result.ok ? result.value.coupling?.halves : null;
+    expect(halves && plainReaction(halves.oxidation)).toBe('H2O2 -> O2 + 2 H^+ + 2 e^-');
+    expect(halves && plainReaction(halves.reduction)).toBe('MnO4^- + 8 H^+ + 5 e^- -> Mn^2+ + 4 H2O');
+  });
+});
+
+describe('the electrons exchanged', () => {
+  const electrons = (skeleton: string, medium: string): string | undefined => {
+    const result = balanceOverall(plainEquation(skeleton), medium);
+    const count = result.ok ? exchangedElectrons(result.value.reaction) : undefined;
+    return count === undefined ? undefined : showRational(count);
+  };
+
+  it('are the sum of all increases in oxidation number', () => {
+    expect(electrons('FeS2 + NO3^- -> Fe^3+ + SO4^2- + NO', 'acid')).toBe('15');
+    expect(electrons('NH4NO3 -> N2O + H2O', 'none')).toBe('4');
+    expect(electrons('Fe3O4 + MnO4^- -> Fe2O3 + MnO2', 'base')).toBe('6');
+  });
+
+  it('are 0 where nothing is oxidised', () => {
+    expect(electrons('CrO4^2- -> Cr2O7^2-', 'acid')).toBe('0');
+  });
+});
