@@ -35,4 +35,4 @@ const blocksOf = (given: Answered, subject: Subject, look: Look): readonly (read
 
 /** An answer as a page of text for a person: the result, how it comes about, notes, cautions. */
 export const renderAnswer = (given: Answered, subject: Subject, look: Look): string =>
-  page([cautionLines(given.cautions, look), ...blocksOf(given, subject, look), noteLines(given.notes, look)]);
+  page([...blocksOf(given, subject, look), noteLines(given.notes, look), cautionLines(given.cautions, look)]);

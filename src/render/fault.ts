@@ -41,6 +41,13 @@ const particulars = (fault: Fault, look: Look): readonly string[] => {
   return fault.code === 'not-enough-given' ? list('missing', [[fault.missing.join(', ')]], look) : [];
 };
 
+/** Where the ways out are listed, the hint that there are some says nothing more. */
+const withoutHint = (fault: Fault): Fault => {
+  if (fault.code !== 'several-balances' || fault.couplings.length === 0) return fault;
+  const { hint, ...rest } = fault;
+  return hint === undefined ? fault : rest;
+};
+
 /** A fault for a person: the place with carets, the sentence, the hint, and what else it carries. */
 export const renderFault = (fault: Fault, text: string | null, look: Look): string =>
-  `${[excerpt(fault, text), ...indented(particulars(fault, look))].join('\n')}\n`;
+  `${[excerpt(withoutHint(fault), text), ...indented(particulars(fault, look))].join('\n')}\n`;

@@ -13,6 +13,8 @@ const atoms = (species: ShownSpecies): string =>
     .map(([element, count]) => `${element} ${count}`)
     .join('   ');
 
+const signed = (charge: string): string => (/^[1-9]/.test(charge) ? `+${charge}` : charge);
+
 /** What a spelling was read as. */
 export const speciesBlocks = (answer: SpeciesAnswer, look: Look): readonly (readonly string[])[] => {
   const { species, readings, molarMass, oxidationNumbers } = answer;
@@ -20,7 +22,7 @@ export const speciesBlocks = (answer: SpeciesAnswer, look: Look): readonly (read
   const numbers = Object.entries(oxidationNumbers ?? {}).map(([element, list]) => `${element} ${list.join(', ')}`);
   const rows: readonly (readonly [string, string])[] = [
     ['atoms', atoms(species)],
-    ['charge', species.charge],
+    ['charge', signed(species.charge)],
     ...(molarMass === undefined ? [] : [['molar mass', quantityText(molarMass)] as const]),
     ...(numbers.length === 0 ? [] : [['oxidation', numbers.join('   ')] as const]),
     ...(others.length === 0 ? [] : [['or read as', others.join('   ')] as const]),
@@ -36,7 +38,7 @@ export const equationBlocks = (answer: EquationAnswer, look: Look): readonly (re
       coefficient,
       spelled(species, look),
       atoms(species),
-      species.charge === '0' ? '' : `charge ${species.charge}`,
+      species.charge === '0' ? '' : `charge ${signed(species.charge)}`,
     ]);
   const rows = [...side('left', answer.left), ...side('right', answer.right)];
   return [columns(rows, ['left', 'right', 'left', 'left', 'left'])];
