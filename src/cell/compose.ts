@@ -120,10 +120,11 @@ const sumOf = (pool: Pool, runs: readonly Run[], side: 'net' | 'left' | 'right')
 
 /** Reactants before products; in each, what the reactions are about before what the media lend. */
 const orderedTerms = (runs: readonly Run[], folded: Folded, scale: Rational): readonly Term[] => {
-  const helpers = new Set(runs.flatMap(({ half }) => half.medium.helpers.map((helper) => helper.key)));
+  const helpers = [...new Set(runs.flatMap(({ half }) => half.medium.helpers.map((helper) => helper.key)))];
   const terms = folded.species.map((species, place) => ({ species, nu: (folded.amounts[place] ?? ZERO).mul(scale) }));
-  const rank = ({ species, nu }: Term): number => (signOf(nu) < 0n ? 0 : 2) + (helpers.has(species.key) ? 1 : 0);
-  return terms.filter(({ nu }) => !isZero(nu)).sort((a, b) => rank(a) - rank(b));
+  const side = ({ nu }: Term): bigint => signOf(nu);
+  const rank = ({ species }: Term): number => helpers.indexOf(species.key);
+  return terms.filter(({ nu }) => !isZero(nu)).sort((a, b) => Number(side(a) - side(b)) || rank(a) - rank(b));
 };
 
 /** The smaller of what is used and what is made of each species, folded water counted in. */
