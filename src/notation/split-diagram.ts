@@ -15,6 +15,7 @@ const CLOSE = ')]}';
 /** A bridge or a boundary at `at`: its length, 0 for none. `/` counts only in pairs or with spaces around it. */
 const BRIDGE = /^(?:\|\s*\||¦\s*¦|⁞\s*⁞|‖|∥|\/\/|⦀|‖)/u;
 const BOUNDARY = /^(?:\||¦|⁞|│|∣|ǀ)/u;
+const BAR = /[|¦⁞│∣ǀ‖∥⦀]/u;
 const SLASH = /^\/(?!\/)/u;
 
 const separatorAt = (
@@ -30,7 +31,7 @@ const separatorAt = (
 };
 
 /**
- * The pieces of a diagram in order, offsets in UTF-16. Separators inside brackets are text:
+ * The pieces of a diagram in order, offsets in UTF-16. Commas and slashes inside brackets are text:
  *   Pt | Fe^2+ (0.1 mol/L), Fe^3+ || Ag^+ | Ag
  *      ^                  ^       ^^      ^
  */
@@ -45,6 +46,8 @@ export const diagramPieces = (text: string): readonly DiagramPiece[] => {
     const char = text[at] ?? '';
     if (OPEN.includes(char)) depth += 1;
     if (CLOSE.includes(char)) depth = Math.max(0, depth - 1);
+    // A bar never stands inside a formula: it ends a bracket that was left open, whose own fault is found later.
+    if (BAR.test(char)) depth = 0;
     if (depth > 0) continue;
     const separator = separatorAt(text, at);
     if (separator === null && char !== ',' && char !== ';') continue;
