@@ -1,4 +1,5 @@
 import { isZero, signOf } from '../exact/rational.ts';
+import { WATER } from '../redox/media.ts';
 import { type Species, ELECTRON, isElectron } from '../species/species.ts';
 import { isHydroxide, isProton } from './helper-ions.ts';
 import { type Candidate, type Problem, addedTerm } from './problem.ts';
@@ -35,9 +36,19 @@ const additionOf = (problem: Problem, species: readonly Species[]): readonly Can
   if (amounts === null) return resolvedWith(problem, species, kind);
   const added = species.flatMap((one, index) => {
     const amount = amounts[index];
-    return amount === undefined ? [] : [addedTerm(one, signOf(amount) > 0n ? 'right' : 'left', amount.abs())];
+    return amount === undefined
+      ? []
+      : [addedTerm(inState(one, problem), signOf(amount) > 0n ? 'right' : 'left', amount.abs())];
   });
   return [{ kind, draft: inserted(problem.draft, added) }];
+};
+
+/** `species` with the state that it has in solution, where all the rest is written with states. */
+const inState = (species: Species, { draft }: Problem): Species => {
+  const matter = draft.filter((term) => !isElectron(term.species));
+  if (isElectron(species) || matter.some((term) => term.species.state === null)) return species;
+  if (species.key === WATER.key) return { ...species, state: 'l' };
+  return isZero(species.charge) ? species : { ...species, state: 'aq' };
 };
 
 /** The only balance of the written species with `species`, if it keeps every written one on its side. */
@@ -49,7 +60,9 @@ const resolvedWith = (problem: Problem, species: readonly Species[], kind: Repai
   if (found === null) return [];
   const numbers = (found[0] ?? 0n) < 0n ? found.map((value) => -value) : found;
   if (!numbers.every((value, index) => (index < count ? value > 0n : value !== 0n))) return [];
-  const added = species.map((one, index) => addedTerm(one, (numbers[count + index] ?? 0n) > 0n ? 'right' : 'left'));
+  const added = species.map((one, index) =>
+    addedTerm(inState(one, problem), (numbers[count + index] ?? 0n) > 0n ? 'right' : 'left'),
+  );
   const written = [...problem.draft.map(({ coefficient }) => coefficient), ...species.map(() => null)];
   const sizes = numbers.map((value) => (value < 0n ? -value : value));
   return bestScales(sizes, written, problem.denominator).map((scaled) => {

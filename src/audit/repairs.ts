@@ -10,7 +10,7 @@ import { type Candidate, type Problem, problemOf } from './problem.ts';
 import { type Ranked, ranked } from './rank.ts';
 import { renumberings } from './renumber.ts';
 import { MOST_REPAIRS, type RepairKind, TIE } from './repair-kinds.ts';
-import { unrounded } from './rounding.ts';
+import { sayTiny, unrounded } from './rounding.ts';
 import type { Draft } from './writing.ts';
 
 /** A repaired equation. */
@@ -45,7 +45,7 @@ export const repairsOf = (
   const [first] = found;
   if (first === undefined) return none(reasonFor(problem, residual));
   if (first.improbable) return none(onlyImprobable(first));
-  return { repairs: found.slice(0, MOST_REPAIRS).map(repairFrom), notes: notesOn(first, found) };
+  return { repairs: found.slice(0, MOST_REPAIRS).map(repairFrom), notes: notesOn(first, found, residual) };
 };
 
 const candidatesFor = (problem: Problem, residual: ReadonlyMap<string, Rational>): readonly Candidate[] => [
@@ -63,9 +63,10 @@ const repairFrom = ({ kind, reaction, changes, improbable }: Ranked): Repair => 
   improbable,
 });
 
-const notesOn = (first: Ranked, found: readonly Ranked[]): readonly Note[] => {
+const notesOn = (first: Ranked, found: readonly Ranked[], residual: ReadonlyMap<string, Rational>): readonly Note[] => {
   if (first.kind === 'rounding') {
-    return [note('rounding', 'The decimals miss by their last digit only; exact numbers conserve.')];
+    const off = [...residual].map(([label, value]) => `${sayTiny(value)} ${label}`).join(', ');
+    return [note('rounding', `The decimals are rounded: off by ${off}. Exact numbers conserve.`)];
   }
   const tied = found.filter(({ cost, improbable }) => !improbable && cost - first.cost < TIE);
   if (tied.length < 2) return [];

@@ -1,4 +1,4 @@
-import { type Rational, ONE, denominatorOf, isWhole, rational } from '../exact/rational.ts';
+import { type Rational, ONE, denominatorOf, isWhole, numeratorOf, rational, showDecimal } from '../exact/rational.ts';
 import type { Candidate, Problem } from './problem.ts';
 import { onlyOne } from './solve.ts';
 
@@ -63,4 +63,15 @@ export const simplestBetween = (low: Rational, high: Rational): Rational => {
   if (up.compare(high) <= 0) return up;
   const floor = low.floor();
   return floor.add(ONE.div(simplestBetween(ONE.div(high.sub(floor)), ONE.div(low.sub(floor)))));
+};
+
+/** A small exact number as one says it, by its two leading digits: 1/10^15 is "1e-15", 0.00033.. "3.3e-4". */
+export const sayTiny = (value: Rational): string => {
+  let exponent = 0;
+  const unit = denominatorOf(value);
+  let number = numeratorOf(value.abs());
+  if (number === 0n || number >= unit) return showDecimal(value.abs());
+  for (; number < unit; exponent -= 1) number *= 10n;
+  const next = ((number * 10n) / unit) % 10n;
+  return `${String(number / unit)}${next === 0n ? '' : `.${String(next)}`}e${String(exponent)}`;
 };

@@ -125,6 +125,9 @@ describe('decimals', () => {
       N: '1/1000000000000000',
       H: '1/1000000000000000',
     });
+    const told = (text: string) => audited(text).notes.find(({ code }) => code === 'rounding')?.message;
+    expect(told('0.333333333333333 N2 + H2 -> 0.666666666666667 NH3')).toContain('off by 1e-15 N, 1e-15 H.');
+    expect(told('0.3333 N2 + H2 -> 0.6667 NH3')).toContain('off by 1e-4 N, 1e-4 H.');
   });
 });
 
@@ -247,6 +250,14 @@ describe('repairs', () => {
     expect(repairs('Cr2O7^-(aq) + 14 H^+(aq) + 6 e^- -> 2 Cr^3+(aq) + 7 H2O(l)')[0]).toBe(
       'Cr2O7^2-(aq) + 14 H^+(aq) + 6 e^- -> 2 Cr^3+(aq) + 7 H2O(l)',
     );
+  });
+
+  it('give what they add a state where all the rest has one', () => {
+    expect(repairs('MnO4^-(aq) + 5 e^- -> Mn^2+(aq) + 4 H2O(l)')[0]).toBe(
+      'MnO4^-(aq) + 8 H^+(aq) + 5 e^- -> Mn^2+(aq) + 4 H2O(l)',
+    );
+    expect(repairs('O2(g) + 4 e^- -> 4 OH^-(aq)')[0]).toBe('O2(g) + 2 H2O(l) + 4 e^- -> 4 OH^-(aq)');
+    expect(repairs('O2 + 4 e^- -> 4 OH^-(aq)')[0]).toBe('O2 + 2 H2O + 4 e^- -> 4 OH^-(aq)');
   });
 
   it('take helpers from the medium that was given, and from no other', () => {
