@@ -1,7 +1,7 @@
-import { type Species, plainSpecies } from '../species/species.ts';
-import { type Rule, elementKey, elementOf, rulesFor } from './rules.ts';
+import { type Actor, actorsOf, elementOf, meeting } from './actors.ts';
+import { type Rule, rulesFor } from './rules.ts';
 import { type Scene, WATER_MEDIA, isWatery } from './scene.ts';
-import type { Clause, Place, Trigger } from './trigger.ts';
+import type { Clause, Trigger } from './trigger.ts';
 import { appliesSentence, conditionsPhrase, mediaPhrase, modesPhrase } from './words.ts';
 
 /** A caution with the species or elements that raised it. */
@@ -21,45 +21,21 @@ interface Met {
   readonly open: readonly string[];
 }
 
-const standing = ({ anode, cathode, overall }: Scene, place: Place): readonly Species[] => {
-  switch (place) {
-    case 'any':
-    case 'with':
-      return [anode, cathode, overall].flatMap(({ reactants, products }) => [...reactants, ...products]);
-    case 'reactant':
-      return [anode, cathode, overall].flatMap(({ reactants }) => reactants);
-    case 'product':
-      return [anode, cathode, overall].flatMap(({ products }) => products);
-    case 'anode':
-      return [...anode.reactants, ...anode.products];
-    case 'cathode':
-      return [...cathode.reactants, ...cathode.products];
-    case 'anode_product':
-      return anode.products;
-    case 'cathode_product':
-      return cathode.products;
-  }
-};
-
-/** Same formula and charge, isotopes aside, and no two differing states: a missing state matches any. */
-const matches = (one: Species, wanted: Species): boolean =>
-  elementKey(one) === elementKey(wanted) && (one.state === null || wanted.state === null || one.state === wanted.state);
-
 /** A watery medium holds water whether or not a reaction uses it; an unknown one may. */
 const waterIn = ({ media }: Scene): Met | undefined => {
   if (media.length > 0) return media.some(isWatery) ? { because: [], open: [] } : undefined;
   return { because: [], open: ['where water is present'] };
 };
 
-const metClause = ({ place, species }: Clause, scene: Scene): Met | undefined => {
-  const there = standing(scene, place).filter((one) => species.some((wanted) => matches(one, wanted)));
-  if (there.length > 0) return { because: there.map(plainSpecies), open: [] };
-  return place === 'with' && species.some(({ key }) => key === 'H2O') ? waterIn(scene) : undefined;
+const metClause = (clause: Clause, actors: readonly Actor[], scene: Scene): Met | undefined => {
+  const because = meeting(actors, clause);
+  if (because.length > 0) return { because, open: [] };
+  return clause.place === 'with' && clause.wanted.has('H2O') ? waterIn(scene) : undefined;
 };
 
-const metElements = ({ elements }: Trigger, scene: Scene): Met | undefined => {
+const metElements = ({ elements }: Trigger, actors: readonly Actor[]): Met | undefined => {
   if (elements.length === 0) return NOTHING_ASKED;
-  const there = new Set(standing(scene, 'any').flatMap(({ composition }) => [...composition.keys()].map(elementOf)));
+  const there = new Set(actors.flatMap(({ species }) => [...species.composition.keys()].map(elementOf)));
   const because = elements.filter((element) => there.has(element));
   return because.length === 0 ? undefined : { because, open: [] };
 };
@@ -99,25 +75,27 @@ const isSaid = ({ places, elements, media, modes }: Trigger, scene: Scene): bool
   (modes.length > 0 && scene.mode !== null);
 
 /** All parts of a trigger, or undefined as soon as one is not met. */
-const metTrigger = (trigger: Trigger, scene: Scene): Met | undefined => {
+const metTrigger = (trigger: Trigger, actors: readonly Actor[], scene: Scene): Met | undefined => {
   if (!isSaid(trigger, scene)) return undefined;
-  const because: string[] = [];
-  const open: string[] = [];
-  const parts = [
-    ...trigger.places.map((clause) => () => metClause(clause, scene)),
-    () => metElements(trigger, scene),
-    () => metMedium(trigger, scene),
-    () => metMode(trigger, scene),
-    () => metConditions(trigger, scene),
-  ];
-  for (const part of parts) {
-    const met = part();
+  const parts: Met[] = [];
+  for (const clause of trigger.places) {
+    const met = metClause(clause, actors, scene);
     if (met === undefined) return undefined;
-    because.push(...met.because);
-    open.push(...met.open);
+    parts.push(met);
   }
-  return { because: [...new Set(because)], open };
+  for (const ask of SCENE_ASKS) {
+    const met = ask(trigger, scene);
+    if (met === undefined) return undefined;
+    parts.push(met);
+  }
+  const elements = metElements(trigger, actors);
+  if (elements === undefined) return undefined;
+  const because = [...parts, elements].flatMap((part) => part.because);
+  return { because: because.length < 2 ? because : [...new Set(because)], open: parts.flatMap((part) => part.open) };
 };
+
+/** What a trigger asks of the scene itself. */
+const SCENE_ASKS = [metMedium, metMode, metConditions] as const;
 
 interface Found {
   readonly caution: Caution;
@@ -127,8 +105,8 @@ interface Found {
 /** What kills or explodes at once comes first; of equals, what holds as it stands before what depends on a condition. */
 const gravityOf = ({ row }: Rule, { open }: Met): number => (row.atOnce === true ? 0 : 2) + (open.length > 0 ? 1 : 0);
 
-const foundBy = (rule: Rule, scene: Scene): Found | undefined => {
-  const met = metTrigger(rule.trigger, scene);
+const foundBy = (rule: Rule, actors: readonly Actor[], scene: Scene): Found | undefined => {
+  const met = metTrigger(rule.trigger, actors, scene);
   if (met === undefined) return undefined;
   const { text, basis } = rule.row;
   const whole = met.open.length === 0 ? text : `${text} ${appliesSentence(met.open)}`;
@@ -139,8 +117,10 @@ const foundBy = (rule: Rule, scene: Scene): Found | undefined => {
  * The cautions that `scene` raises, once each, the gravest first; in table order where they weigh the same. What a row
  * asks and the scene leaves open (a medium, a mode, a condition) is named at the end of its text.
  */
-export const cautionsFor = (scene: Scene): readonly Caution[] =>
-  rulesFor(standing(scene, 'any'))
-    .flatMap((rule) => foundBy(rule, scene) ?? [])
+export const cautionsFor = (scene: Scene): readonly Caution[] => {
+  const actors = actorsOf(scene);
+  return rulesFor(actors)
+    .flatMap((rule) => foundBy(rule, actors, scene) ?? [])
     .sort((a, b) => a.gravity - b.gravity)
     .map(({ caution }) => caution);
+};

@@ -1,6 +1,6 @@
 import { type CautionRow, CAUTION_ROWS } from './table.ts';
 import { type Trigger, parseTrigger } from './trigger.ts';
-import type { Species } from '../species/species.ts';
+import { type Actor, elementOf } from './actors.ts';
 
 /** A row of the table with its trigger read. */
 export interface Rule {
@@ -20,16 +20,6 @@ interface RuleIndex {
   readonly always: readonly Rule[];
 }
 
-/**
- * Isotopes of an element are alike in what they do to people: a species is looked up by its elements, D2 as H2.
- * Keys write a nuclide as {2H}; two like atoms side by side, {2H}{3H}, are counted together.
- */
-export const elementKey = ({ key }: Species): string =>
-  key.includes('{') ? key.replace(/\{\d+([A-Z][a-z]?)\}/g, '$1').replace(/([A-Z][a-z]?)\1(?![a-z\d])/g, '$12') : key;
-
-/** The element of a composition's key: "H" of "2H". */
-export const elementOf = (label: string): string => label.replace(/^\d+/, '');
-
 const indexed = (): RuleIndex => {
   const bySpecies = new Map<string, Rule[]>();
   const byElement = new Map<string, Rule[]>();
@@ -41,7 +31,7 @@ const indexed = (): RuleIndex => {
   CAUTION_ROWS.forEach((row, at) => {
     const rule = { row, trigger: parseTrigger(row.trigger), at };
     const [first] = rule.trigger.places;
-    for (const species of first?.species ?? []) file(bySpecies, elementKey(species), rule);
+    for (const key of first?.wanted.keys() ?? []) file(bySpecies, key, rule);
     if (first !== undefined) return;
     for (const element of rule.trigger.elements) file(byElement, element, rule);
     if (rule.trigger.elements.length === 0) always.push(rule);
@@ -53,12 +43,12 @@ const indexed = (): RuleIndex => {
 let index: RuleIndex | undefined;
 
 /** The rules that may speak where these species are, each once, in the order of the table. */
-export const rulesFor = (species: readonly Species[]): readonly Rule[] => {
+export const rulesFor = (actors: readonly Actor[]): readonly Rule[] => {
   index ??= indexed();
   const found = new Set<Rule>(index.always);
-  for (const one of species) {
-    for (const rule of index.bySpecies.get(elementKey(one)) ?? []) found.add(rule);
-    for (const label of one.composition.keys())
+  for (const { key, species } of actors) {
+    for (const rule of index.bySpecies.get(key) ?? []) found.add(rule);
+    for (const label of species.composition.keys())
       for (const rule of index.byElement.get(elementOf(label)) ?? []) found.add(rule);
   }
   return [...found].sort((a, b) => a.at - b.at);

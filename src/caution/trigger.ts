@@ -1,15 +1,13 @@
-import { readSpecies } from '../species/read.ts';
-import type { Species } from '../species/species.ts';
 import type { CautionMedium, CautionMode } from './scene.ts';
 import { isCondition, isMedium, isMode } from './words.ts';
 
 /** What a caution can ask of the species of a cell: where one stands. */
 export type Place = 'any' | 'with' | 'reactant' | 'product' | 'anode' | 'cathode' | 'anode_product' | 'cathode_product';
 
-/** Species of which one must stand in a place. */
+/** Species of which one must stand in a place: their keys, each with the states that are meant. */
 export interface Clause {
   readonly place: Place;
-  readonly species: readonly Species[];
+  readonly wanted: ReadonlyMap<string, readonly (string | null)[]>;
 }
 
 /** A trigger taken apart: every list is a choice (or), all that are there must hold (and). */
@@ -40,9 +38,18 @@ const broken = (what: string): never => {
   throw new Error(`caution table: ${what}`);
 };
 
-const speciesOf = (text: string): Species => {
-  const reading = readSpecies(text);
-  return reading.ok ? reading.value.species : broken(`${text}: ${reading.fault.message}`);
+/**
+ * The table keeps to canonical spelling, which without the state is a species' key, so that nothing needs the reader of
+ * species: P(s,red) is P in state s.
+ */
+const wantedOf = (texts: readonly string[]): Clause['wanted'] => {
+  const wanted = new Map<string, readonly (string | null)[]>();
+  for (const text of texts) {
+    const [, key, state] = /^(.+?)(?:\((s|l|g|aq)(?:,\w+)?\))?$/.exec(text) ?? [];
+    if (key === undefined) return broken('a species is missing');
+    wanted.set(key, [...(wanted.get(key) ?? []), state ?? null]);
+  }
+  return wanted;
 };
 
 const known = <Word extends string>(values: readonly string[], isKnown: (word: string) => word is Word): Word[] =>
@@ -57,9 +64,7 @@ export const parseTrigger = (text: string): Trigger => {
   });
   const valuesOf = (key: string): readonly string[] => clauses.find((clause) => clause.key === key)?.values ?? [];
   return {
-    places: clauses.flatMap(({ key, values }) =>
-      isPlace(key) ? [{ place: key, species: values.map(speciesOf) }] : [],
-    ),
+    places: clauses.flatMap(({ key, values }) => (isPlace(key) ? [{ place: key, wanted: wantedOf(values) }] : [])),
     elements: known(valuesOf('element'), (word): word is string => isElement(word)),
     media: known(valuesOf('medium'), isMedium),
     modes: known(valuesOf('mode'), isMode),
