@@ -1,4 +1,4 @@
-import { type Species, plainSpecies } from '../species/species.ts';
+import type { Species } from '../species/species.ts';
 import type { Scene, Sides } from './scene.ts';
 import type { Clause, Place } from './trigger.ts';
 
@@ -63,6 +63,12 @@ export const actorsOf = ({ anode, cathode, overall }: Scene): readonly Actor[] =
   return actors;
 };
 
+/** The canonical spelling; a key ends in the charge that `plainSpecies` would have to spell out again. */
+const spelling = ({ formula, key }: Species): string => {
+  const caret = key.indexOf('^');
+  return caret < 0 ? formula : formula + key.slice(caret);
+};
+
 /** The species that meet a clause: same formula and charge, and no two differing states; a missing one matches any. */
 export const meeting = (actors: readonly Actor[], { place, wanted }: Clause): readonly string[] => {
   const met: string[] = [];
@@ -70,7 +76,7 @@ export const meeting = (actors: readonly Actor[], { place, wanted }: Clause): re
     const states = (places & STANDS[place]) === 0 ? undefined : wanted.get(key);
     if (states === undefined) continue;
     if (species.state === null || states.some((state) => state === null || state === species.state))
-      met.push(plainSpecies(species));
+      met.push(spelling(species));
   }
   return met;
 };

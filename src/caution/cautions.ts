@@ -33,10 +33,26 @@ const metClause = (clause: Clause, actors: readonly Actor[], scene: Scene): Met 
   return clause.place === 'with' && clause.wanted.has('H2O') ? waterIn(scene) : undefined;
 };
 
-const metElements = ({ elements }: Trigger, actors: readonly Actor[]): Met | undefined => {
+const metPlaces = ({ places }: Trigger, scene: Scene, actors: readonly Actor[]): Met | undefined => {
+  const because: string[] = [];
+  let open: readonly string[] = [];
+  for (const clause of places) {
+    const met = metClause(clause, actors, scene);
+    if (met === undefined) return undefined;
+    because.push(...met.because);
+    if (met.open.length > 0) open = met.open;
+  }
+  return { because, open };
+};
+
+const metElements = ({ elements }: Trigger, _: Scene, actors: readonly Actor[]): Met | undefined => {
   if (elements.length === 0) return NOTHING_ASKED;
-  const there = new Set(actors.flatMap(({ species }) => [...species.composition.keys()].map(elementOf)));
-  const because = elements.filter((element) => there.has(element));
+  const because = elements.filter((element) =>
+    actors.some(
+      ({ species: { composition } }) =>
+        composition.has(element) || [...composition.keys()].some((label) => elementOf(label) === element),
+    ),
+  );
   return because.length === 0 ? undefined : { because, open: [] };
 };
 
@@ -77,25 +93,20 @@ const isSaid = ({ places, elements, media, modes }: Trigger, scene: Scene): bool
 /** All parts of a trigger, or undefined as soon as one is not met. */
 const metTrigger = (trigger: Trigger, actors: readonly Actor[], scene: Scene): Met | undefined => {
   if (!isSaid(trigger, scene)) return undefined;
-  const parts: Met[] = [];
-  for (const clause of trigger.places) {
-    const met = metClause(clause, actors, scene);
+  const because: string[] = [];
+  const open: string[] = [];
+  for (const ask of ASKS) {
+    const met = ask(trigger, scene, actors);
     if (met === undefined) return undefined;
-    parts.push(met);
+    if (met === NOTHING_ASKED) continue;
+    because.push(...met.because);
+    open.push(...met.open);
   }
-  for (const ask of SCENE_ASKS) {
-    const met = ask(trigger, scene);
-    if (met === undefined) return undefined;
-    parts.push(met);
-  }
-  const elements = metElements(trigger, actors);
-  if (elements === undefined) return undefined;
-  const because = [...parts, elements].flatMap((part) => part.because);
-  return { because: because.length < 2 ? because : [...new Set(because)], open: parts.flatMap((part) => part.open) };
+  return { because: because.length < 2 ? because : [...new Set(because)], open };
 };
 
-/** What a trigger asks of the scene itself. */
-const SCENE_ASKS = [metMedium, metMode, metConditions] as const;
+/** What a trigger asks; what only the scene answers comes first, it is the cheapest. */
+const ASKS = [metMedium, metMode, metConditions, metPlaces, metElements] as const;
 
 interface Found {
   readonly caution: Caution;
