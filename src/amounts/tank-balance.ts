@@ -1,5 +1,5 @@
 import { FARADAY } from '../elements/constants.ts';
-import { isZero } from '../exact/rational.ts';
+import { ZERO, isZero } from '../exact/rational.ts';
 import { type Result, chain, failure, success } from '../report/result.ts';
 import { plainSpecies } from '../species/species.ts';
 import type { Quantity } from './answered.ts';
@@ -84,25 +84,51 @@ const sharesMissing: Result<never> = failure({
   missing: ['share'],
 });
 
+const efficiencyUnclear: Result<never> = failure({
+  code: 'bad-ask',
+  message: 'with several reactions an efficiency does not say whose it is',
+  field: 'given.efficiency',
+  hint: 'Give the shares of the reactions instead.',
+});
+
+/** The whole current for a lone reaction without a share, so that its yields are known. */
+const wholeCircuit = (circuit: Circuit): Circuit => {
+  const reactions = circuit.kind === 'half' ? [circuit.half] : circuit.kind === 'electrode' ? circuit.reactions : [];
+  const [only, more] = reactions;
+  if (only === undefined || more !== undefined || only.share !== undefined) return circuit;
+  return { kind: 'half', half: { ...only, share: '100 %' } };
+};
+
+/** The charge does not depend on which species is asked: any will do that is left over. */
+const setUpAny = (circuit: Circuit): Result<Problem | null> =>
+  chain(branchesOf(circuit), (branches) => {
+    if (branches.some(({ share }) => share === null)) return sharesMissing;
+    const first = stakesOf(branches).find((stake) => !isZero(exactYield(stake, branches) ?? ZERO));
+    return first === undefined ? success(null) : setUp(circuit, first.species);
+  });
+
+/** An efficiency stands for the share of a lone reaction. */
+const asShare = (circuit: Circuit, { efficiency, share, ...given }: GivenTexts): [Circuit, GivenTexts] => {
+  const part = efficiency ?? share;
+  if (circuit.kind !== 'half' || typeof part !== 'string') return [circuit, given];
+  return [{ kind: 'half', half: { ...circuit.half, share: part } }, given];
+};
+
 /**
  * Acid, base and water of a tank: what the reactions of a circuit make (positive) and use up (negative) of H^+, OH^- and
- * H2O for a charge, by stoichiometry alone; evaporation, spray and what crosses a separator are not counted. Faults:
- * those of reading, `not-enough-given` without a charge or a share.
+ * H2O for a charge, by stoichiometry alone; evaporation, spray and what crosses a separator are not counted. An
+ * efficiency holds for a lone reaction. Faults: those of reading, `not-enough-given` without a charge or a share.
  */
-export const tankBalance = ({ circuit, given, ...stack }: BalanceRequest): Result<TankBalance> =>
-  chain(branchesOf(circuit), (branches) => {
-    if (branches.some(({ share }) => share === null) && branches.length > 1) return sharesMissing;
-    const whole = branches.map((branch) => branch.share);
-    const first = stakesOf(branches).find((stake) => {
-      const gained = exactYield(stake, branches);
-      return whole.includes(null) || (gained !== null && !isZero(gained));
-    });
-    if (first === undefined) return success({});
-    return chain(setUp(circuit, first.species), (problem) =>
-      chain(readGiven(given, problem.weigh(first.species)), (values) =>
-        chain(readStack(stack), (series) =>
-          chain(deriveAll(problem, values, series), (derived) => balanceFrom(problem, derived)),
-        ),
+export const tankBalance = ({ circuit, given, ...stack }: BalanceRequest): Result<TankBalance> => {
+  const several = circuit.kind === 'cell' || (circuit.kind === 'electrode' && circuit.reactions.length > 1);
+  if (several && (given['efficiency'] ?? given['share']) !== undefined) return efficiencyUnclear;
+  const [whole, rest] = asShare(wholeCircuit(circuit), given);
+  return chain(setUpAny(whole), (problem) => {
+    if (problem === null) return success({});
+    return chain(readGiven(rest, problem.weigh(problem.asked.species)), (values) =>
+      chain(readStack(stack), (series) =>
+        chain(deriveAll(problem, values, series), (derived) => balanceFrom(problem, derived)),
       ),
     );
   });
+};
