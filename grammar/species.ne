@@ -61,6 +61,9 @@ nuclide -> "[" integer %element "]"      {% ([, mass, token]) => build.element(t
 count -> number                          {% id %}
        | subNumber                       {% id %}
        | sum                             {% id %}
+       | "_" number                      {% ([, number]) => number %}
+       | "_" "{" number "}"              {% ([, , number]) => number %}
+       | "_" "{" sum "}"                 {% ([, , sum]) => sum %}
        | "(" number ")"                  {% ([, number]) => number %}
        | "(" fraction ")"                {% ([, fraction]) => fraction %}
        | "(" sum ")"                     {% ([, sum]) => sum %}

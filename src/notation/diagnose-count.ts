@@ -36,7 +36,7 @@ export const countFault = (text: string, tokens: readonly Token[]): Fault | null
         'bad-count',
         placeOf(token, last),
         'a number stands before the formula',
-        'a species has no coefficient',
+        'a species has no coefficient; a part that counts more than once goes in brackets: (CdSO4)3*8H2O',
       );
     if (isType(after, 'plus', 'minus')) continue;
     const zero = zeroFault(text, number, token, before);

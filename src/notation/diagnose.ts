@@ -10,12 +10,12 @@ import { leftover } from './diagnose-leftover.ts';
 /**
  * Why `tokens` of `text` are no species. `stop` is the index of the first token that no reading can take; it equals
  * the number of tokens where the text ends too soon. The plainest cause is named first: a character that is no
- * chemistry, letters that are no element, brackets, counts, charges.
+ * chemistry, brackets, letters that are no element, counts, charges.
  */
 export const diagnose = (text: string, tokens: readonly Token[], stop: number): Fault =>
   characterFault(text, tokens) ??
-  letterFault(text, tokens) ??
   bracketFault(text, tokens) ??
+  letterFault(text, tokens) ??
   countFault(text, tokens) ??
   chargeFault(text, tokens) ??
   leftover(text, tokens, stop);

@@ -68,6 +68,7 @@ const rulesFor = (names: readonly string[], unknowns: readonly string[]): moo.Ru
   plus: /\+/u,
   minus: new RegExp(`[${MINUS_SIGNS}]`, 'u'),
   caret: /\^/u,
+  underscore: /_/u,
   roundOpen: /\(/u,
   roundClose: /\)/u,
   squareOpen: /\[/u,

@@ -1,20 +1,26 @@
-import { LIMITS } from '../notation/limits.ts';
-import type { KeptReading } from './read-species.ts';
+/** Values by text, of which only the `size` last used are kept. */
+export interface Memory<T> {
+  /** The value under `key`, made by `make` at its first use. */
+  readonly recall: (key: string, make: () => T) => T;
+}
 
 /**
- * Readings already made, the oldest use first. Reading is a pure function of its key, so that nothing can go stale, and
- * the number of entries is fixed: the same few species come again in every ask of a batch.
+ * A memory of fixed size: two generations, so that neither use nor forgetting ever walks through the entries. When the
+ * young one holds half the size it becomes the old one, and what was old and not used since is forgotten.
  */
-const readings = new Map<string, KeptReading>();
-
-/** The reading under `key`, made by `read` at its first use. Texts beyond the length of a species are not kept. */
-export const remember = (key: string, read: () => KeptReading): KeptReading => {
-  const kept = readings.get(key);
-  const reading = kept ?? read();
-  if (key.length > LIMITS.rememberedLength) return reading;
-  if (kept !== undefined) readings.delete(key);
-  readings.set(key, reading);
-  const [oldest] = readings.keys();
-  if (readings.size > LIMITS.remembered && oldest !== undefined) readings.delete(oldest);
-  return reading;
+export const createMemory = <T>(size: number): Memory<T> => {
+  let young = new Map<string, T>();
+  let old = new Map<string, T>();
+  const recall = (key: string, make: () => T): T => {
+    const known = young.get(key);
+    if (known !== undefined) return known;
+    const value = old.get(key) ?? make();
+    young.set(key, value);
+    if (young.size >= size / 2) {
+      old = young;
+      young = new Map();
+    }
+    return value;
+  };
+  return { recall };
 };

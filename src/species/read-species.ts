@@ -2,6 +2,7 @@ import type { Lexer } from 'moo';
 import type { Rational } from '../exact/rational.ts';
 import { showRational } from '../exact/rational.ts';
 import { lexer as plainLexer, lexerWith } from '../notation/lexer.ts';
+import { LIMITS } from '../notation/limits.ts';
 import { parseSpecies } from '../notation/parse-species.ts';
 import { remarkOf } from '../notation/state.ts';
 import type { SpeciesSyntax } from '../notation/syntax.ts';
@@ -12,7 +13,7 @@ import { didYouMean } from '../report/suggest.ts';
 import type { Definitions } from './definitions.ts';
 import { buildSpecies } from './read-build.ts';
 import { ionsNear, isKnownIon } from './ions.ts';
-import { remember } from './read-cache.ts';
+import { createMemory } from './read-cache.ts';
 import { type Ranking, type Reading, rankReadings } from './read-ranking.ts';
 import { type Species, plainSpecies, plainWithState } from './species.ts';
 
@@ -117,8 +118,16 @@ const signatureOf = ({ where = NO_UNKNOWNS, define, strict }: ReadingOptions): s
   return `${strict === true ? 's' : ''}|${values.join(',')}|${define?.signature ?? ''}`;
 };
 
+/**
+ * Readings already made. Reading is a pure function of text and options, so that nothing in here can go stale, and the
+ * number of entries is fixed: the same few species come again in every ask of a batch.
+ */
+const memory = createMemory<KeptReading>(LIMITS.remembered);
+
 const kept = (text: string, options: ReadingOptions): KeptReading =>
-  remember(`${signatureOf(options)}|${text}`, () => readAnew(text, options));
+  text.length > LIMITS.rememberedLength
+    ? readAnew(text, options)
+    : memory.recall(`${signatureOf(options)}|${text}`, () => readAnew(text, options));
 
 /** True where `text` parses as a species, whatever a closer look finds. */
 export const spells = (text: string, options: ReadingOptions): boolean => kept(text, options).spells;
