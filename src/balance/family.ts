@@ -1,4 +1,5 @@
 import type { TooHard } from '../exact/bounds.ts';
+import { hilbertBasis } from '../exact/hilbert.ts';
 import { type IntegerMatrix, independentColumns, nullSpace, range } from '../exact/matrix.ts';
 import { compareSupports, minimalSolutions } from '../exact/minimal.ts';
 import { pickColumns, speciesMatrix } from './matrix.ts';
@@ -34,6 +35,21 @@ export const minimalBalances = (unknowns: readonly Unknown[]): Family => {
     }
   }
   return { kind: 'family', members: [...found.values()].toSorted(bySize) };
+};
+
+/**
+ * The irreducible whole balances: no one is a sum of two others, and every whole balance is a sum of them (the Hilbert
+ * basis). The minimal balances are among them. Asked for where free unknowns depend on one another it is that of the
+ * first independent set.
+ */
+export const irreducibleBalances = (unknowns: readonly Unknown[]): Family => {
+  const split = splitColumns(speciesMatrix(unknowns.map((unknown) => unknown.species)), unknowns);
+  const kept = independentColumns(split.free);
+  const some: Split = { ...split, free: pickColumns(split.free, kept), freeIndex: pick(split.freeIndex, kept) };
+  const found = hilbertBasis(some.strict, some.free);
+  if (found.kind === 'too-hard') return found;
+  if (found.kind === 'lines') throw new Error('an independent set cannot depend on itself');
+  return { kind: 'family', members: found.elements.map((element) => joinColumns(some, element, unknowns)) };
 };
 
 const bySize = (a: Numbers, b: Numbers): number => {
