@@ -1,11 +1,13 @@
 import type { Circuit } from '../amounts/branches.ts';
 import { type Reaction, sideOf } from '../balance/reaction.ts';
 import { cautionsFor } from '../caution/cautions.ts';
-import { type CautionMedium, type Sides, mediaOf } from '../caution/scene.ts';
+import { type CautionMedium, type Scene, type Sides, mediaOf } from '../caution/scene.ts';
 import type { CellReaction, WeightedHalf } from '../cell/cell-reaction.ts';
+import { ONE } from '../exact/rational.ts';
 import type { HalfReaction } from '../redox/half-reaction.ts';
 import type { Medium } from '../redox/medium.ts';
 import { type Species, isElectron } from '../species/species.ts';
+import { type GasSource, gasCautions } from './gas-caution.ts';
 import type { ShownCaution } from './schema/shape.ts';
 
 const speciesOn = (reactions: readonly Reaction[], side: 'left' | 'right'): readonly Species[] =>
@@ -39,13 +41,11 @@ interface AtElectrode {
 /** The cautions of a half-reaction alone: an oxidation runs at an anode, a reduction at a cathode. */
 export const cautionsOfHalf = (half: HalfReaction): readonly ShownCaution[] => {
   const overall = sidesOf(half.reaction);
-  return cautionsFor({
-    ...sidesOfHalf(half),
-    overall,
-    media: mediaOf(half.medium, speciesOf(overall)),
-    mode: null,
-    divided: null,
-  });
+  const media = mediaOf(half.medium, speciesOf(overall));
+  return [
+    ...cautionsFor({ ...sidesOfHalf(half), overall, media, mode: null, divided: null }),
+    ...gasCautions([[{ ...half, multiplier: ONE }]]),
+  ];
 };
 
 /** The cautions of a reaction as it is, in a medium or in none that is known. */
@@ -60,15 +60,19 @@ export const cautionsOfCell = (cell: CellReaction, divided: boolean | null): rea
   const halves = [...cell.anode, ...cell.cathode].map(({ half }) => half);
   const reactions = (weighted: readonly WeightedHalf[]): readonly Reaction[] =>
     weighted.map(({ half }) => half.reaction);
-  return cautionsFor({
+  const scene: Scene = {
     anode: sidesOf(...reactions(cell.anode)),
     cathode: sidesOf(...reactions(cell.cathode)),
     overall: sidesOf(cell.overall),
     media: mediaOfAll(halves.map(({ medium, reaction }) => mediaOf(medium, speciesOf(sidesOf(reaction))))),
     mode: null,
     divided,
-  });
+  };
+  return [...cautionsFor(scene), ...gasCautions([gasSources(cell.anode), gasSources(cell.cathode)])];
 };
+
+const gasSources = (weighted: readonly WeightedHalf[]): readonly GasSource[] =>
+  weighted.map(({ half: { reaction, electrons }, multiplier }) => ({ reaction, electrons, multiplier }));
 
 /** A half-reaction as it is written: electrons on the left reduce. */
 const kindOf = (reaction: Reaction): 'reduction' | 'oxidation' =>
