@@ -70,8 +70,12 @@ const withoutAcid = (terms: readonly Term[]): readonly Term[] => {
 export const electronsOf = (terms: readonly Term[]): Rational =>
   terms.find(({ species }) => isElectron(species))?.nu ?? ZERO;
 
-/** The half-reaction in lowest whole numbers that `terms` are a multiple of, its species in the order of `order`. */
-export const halfOfTerms = (terms: readonly Term[], medium: Medium, order: readonly string[]): SplitHalf => {
+/**
+ * The half-reaction in lowest whole numbers that `terms` are a multiple of; its species in the order of `spelled`, and
+ * with the states that they have there.
+ */
+export const halfOfTerms = (terms: readonly Term[], medium: Medium, spelled: readonly Species[]): SplitHalf => {
+  const order = spelled.map(({ key }) => key);
   const common = lcmOf(terms.map(({ nu }) => denominatorOf(nu)));
   const whole = terms.map(({ species, nu }) => ({ species, number: numeratorOf(nu.mul(rational(common))) }));
   const divisor = gcdOf(whole.map(({ number }) => number));
@@ -82,7 +86,10 @@ export const halfOfTerms = (terms: readonly Term[], medium: Medium, order: reado
   };
   const sorted = whole
     .toSorted((a, b) => rank(a.species) - rank(b.species))
-    .map(({ species, number }) => ({ species, nu: rational(number, divisor) }));
+    .map(({ species, number }) => ({
+      species: spelled[order.indexOf(species.key)] ?? species,
+      nu: rational(number, divisor),
+    }));
   const reaction = proved(inPrintingOrder({ terms: sorted }));
   const electrons = electronsOf(reaction.terms);
   const half: HalfReaction = {

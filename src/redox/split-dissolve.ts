@@ -26,11 +26,13 @@ export const dissolvedIons = (species: Species): readonly Portion[] | null => {
 };
 
 const dissolves = (keys: readonly string[]): boolean => {
-  const meets = (set: ReadonlySet<string>): boolean => keys.some((key) => set.has(key));
-  if (keys.includes('H^+') && !meets(DISSOLVING_CATIONS)) return meets(STRONG_ACIDS);
-  if (meets(DISSOLVING_CATIONS)) return true;
-  if (keys.includes('OH^-')) return meets(DISSOLVED_BASES);
+  const others = keys.filter((key) => !DISSOLVING_CATIONS.has(key));
+  const meets = (set: ReadonlySet<string>): boolean => others.some((key) => set.has(key));
+  const onlyDissolving = others.length < keys.length && !others.some((key) => key.endsWith('+'));
+  if (onlyDissolving) return true;
+  if (others.includes('H^+')) return meets(STRONG_ACIDS);
+  if (others.includes('OH^-')) return meets(DISSOLVED_BASES);
   if (meets(ALWAYS_DISSOLVED)) return true;
   if (meets(HALIDES)) return !meets(SOLID_HALIDES);
-  return keys.includes('SO4^2-') && !meets(SOLID_SULFATES);
+  return others.includes('SO4^2-') && !meets(SOLID_SULFATES);
 };

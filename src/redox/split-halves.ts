@@ -1,5 +1,6 @@
 import type { Reaction, Term } from '../balance/reaction.ts';
 import { type Rational, ONE, ZERO, isZero, signOf } from '../exact/rational.ts';
+import type { Species } from '../species/species.ts';
 import { HYDROXIDE, PROTON, WATER, mediumRow } from './media.ts';
 import type { Medium } from './medium.ts';
 import { hasTwoStates, sumOfTerms, termsOf } from './split-amounts.ts';
@@ -7,6 +8,7 @@ import { type SplitHalf, completeTerms, electronsOf, halfOfTerms, helpersOf } fr
 import { type Background, type Component, backgroundOf, componentsOf, sidesOf } from './split-components.ts';
 import { divide } from './split-divide.ts';
 import { flowsOf } from './split-flows.ts';
+import { speciesOf } from './split-salt.ts';
 import { type IonicReaction, type Reach, ionicReaction } from './split-ionic.ts';
 
 /** The two halves of an overall reaction and the electrons that they exchange at its scale. */
@@ -31,12 +33,31 @@ export const halvesOf = (reaction: Reaction, medium: Medium): Halves | null => {
   return null;
 };
 
-/** As the medium has it; and, where carbonate gives carbon dioxide, with these two as helpers. */
+/**
+ * As the medium has it; where carbonate gives carbon dioxide, with these two as helpers; and with an alkali ion that the
+ * one half hands to the other, as a host to a host.
+ */
 const ionicForms = (reaction: Reaction, medium: Medium, reach: Reach): readonly IonicReaction[] => {
   const ionic = ionicReaction(reaction, medium, reach);
   const carbonate = mediumRow('molten-carbonate');
-  if (carbonate?.helpers.every((helper) => ionic.amounts.has(helper.key)) !== true) return [ionic];
-  return [ionic, { ...ionic, medium: { name: carbonate.name, helpers: carbonate.helpers } }];
+  const gives = carbonate?.helpers.every((helper) => ionic.amounts.has(helper.key)) === true;
+  const handed = handedOver(ionic);
+  return [
+    ionic,
+    ...(gives ? [{ ...ionic, medium: { name: carbonate.name, helpers: carbonate.helpers } }] : []),
+    ...(handed === null ? [] : [{ ...ionic, medium: { name: null, helpers: [...ionic.medium.helpers, handed] } }]),
+  ];
+};
+
+const ALKALI = ['Li', 'Na', 'K'];
+
+/** The ion of an alkali metal that stands in several species but not as an ion. */
+const handedOver = ({ amounts }: IonicReaction): Species | null => {
+  const holders = (element: string): number =>
+    termsOf(amounts).filter(({ species }) => species.composition.has(element)).length;
+  const symbol = ALKALI.find((element) => holders(element) > 1 && !amounts.has(`${element}^+`));
+  if (symbol === undefined) return null;
+  return speciesOf([{ multiplier: ONE, members: [{ kind: 'atom', symbol, massNumber: null, count: ONE }] }], ONE);
 };
 
 const splitIonic = ({ amounts, medium }: IonicReaction): Halves | null => {
@@ -91,10 +112,10 @@ const joined = (oxidised: readonly Term[], reduced: readonly Term[], ionic: Ioni
   const electrons = electronsOf(left);
   if (signOf(electrons) <= 0n || !electronsOf(right).equals(electrons.neg())) return null;
   if (!givesBack([...left, ...right], termsOf(amounts))) return null;
-  const order = [...amounts.keys()];
+  const spelled = termsOf(amounts).map(({ species }) => species);
   return {
-    oxidation: halfOfTerms(left, medium, order),
-    reduction: halfOfTerms(right, medium, order),
+    oxidation: halfOfTerms(left, medium, spelled),
+    reduction: halfOfTerms(right, medium, spelled),
     electrons,
   };
 };

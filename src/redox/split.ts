@@ -49,9 +49,9 @@ export const splitReaction = (unsplit: Unsplit): Result<RedoxSplit> => {
 /** A coupling's own halves count, but where those found exchange as many electrons they are ionic and are taken. */
 const chosenHalves = ({ reaction, medium, halves, exchanged }: Unsplit, found: Halves | null): Halves | null => {
   if (halves === null || exchanged === null || found?.electrons.equals(exchanged) === true) return found;
-  const order = reaction.terms.map(({ species }) => species.key);
+  const spelled = reaction.terms.map(({ species }) => species);
   const taken = (half: Reaction): SplitHalf => ({
-    half: halfOfTerms(half.terms, medium, order).half,
+    half: halfOfTerms(half.terms, medium, spelled).half,
     multiplier: exchanged.div(electronsOf(half.terms).abs()),
   });
   return { oxidation: taken(halves.oxidation), reduction: taken(halves.reduction), electrons: exchanged };
