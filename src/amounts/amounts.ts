@@ -1,12 +1,12 @@
 import { showRational } from '../exact/rational.ts';
-import type { Note } from '../report/note.ts';
 import { type Result, chain, success } from '../report/result.ts';
 import { ALONGSIDE_NAMES, type Companion, companionsOf, partsOf, splitsCurrent } from './alongside.ts';
-import { type Quantity, readWanted, showQuantities } from './answered.ts';
+import { type AnswerUnits, type Quantity, readWanted, showQuantities } from './answered.ts';
 import { budgetsOf } from './budget.ts';
 import { deriveAll } from './derivation.ts';
 import { checkEnough } from './enough.ts';
-import { readGiven, speaksOfTank } from './given.ts';
+import { type GivenReadings, convertGiven, readGivenTexts, speaksOfTank } from './given.ts';
+import type { Measured } from './measured.ts';
 import { amountNotes } from './notes.ts';
 import { type Problem, electronsPerMole, setUp } from './problem.ts';
 import { QUANTITY_NAMES, type QuantityName } from './quantities.ts';
@@ -64,23 +64,29 @@ const answerFrom = (working: Working): AmountsAnswer => {
   };
 };
 
-const workOut = (request: AmountsRequest, problem: Problem): Result<Working> => {
-  const given = readGiven(request.given, problem.weigh(problem.asked.species));
-  const units = readWanted(request.want ?? {});
-  const series = readStack(request);
-  return chain(given, (values) =>
-    chain(units, (answerUnits) =>
-      chain(series, (factor) =>
-        chain(deriveAll(problem, values, factor), (solved) => {
-          const derived = withUnitArea(solved);
-          const parts = partsOf(problem, derived);
-          const companions = companionsOf(problem, derived, parts, speaksOfTank(request.given));
-          return success({ request, problem, given: values, derived, parts, companions, units: answerUnits });
-        }),
-      ),
+/** The texts of the ask, read before anything is said of the species. */
+interface Texts {
+  readonly readings: GivenReadings;
+  readonly units: AnswerUnits;
+  readonly series: Measured;
+}
+
+const readTexts = (request: AmountsRequest): Result<Texts> =>
+  chain(readGivenTexts(request.given), (readings) =>
+    chain(readWanted(request.want ?? {}), (units) =>
+      chain(readStack(request), (series) => success({ readings, units, series })),
     ),
   );
-};
+
+const workOut = (request: AmountsRequest, { readings, units, series }: Texts, problem: Problem): Result<Working> =>
+  chain(convertGiven(readings, problem.weigh(problem.asked.species)), (given) =>
+    chain(deriveAll(problem, given, series), (solved) => {
+      const derived = withUnitArea(solved);
+      const parts = partsOf(problem, derived);
+      const companions = companionsOf(problem, derived, parts, speaksOfTank(request.given));
+      return success({ request, problem, given, derived, parts, companions, units });
+    }),
+  );
 
 /**
  * What Faraday's law makes of what was given, for one species of a half-reaction, of reactions in parallel at an
@@ -91,12 +97,11 @@ const workOut = (request: AmountsRequest, problem: Problem): Result<Working> => 
  * `not-enough-given`, `contradiction`. A fault in `species` spans the whole name.
  */
 export const computeAmounts = (request: AmountsRequest): Result<AmountsAnswer> =>
-  chain(setUp(request.circuit, request.species), (problem) =>
-    chain(workOut(request, problem), (working) => {
-      const answer = answerFrom(working);
-      return chain(checkEnough(working, answer), () => {
-        const notes: readonly Note[] = amountNotes(working, answer);
-        return success(answer, notes);
-      });
-    }),
+  chain(readTexts(request), (texts) =>
+    chain(setUp(request.circuit, request.species), (problem) =>
+      chain(workOut(request, texts, problem), (working) => {
+        const answer = answerFrom(working);
+        return chain(checkEnough(working, answer), () => success(answer, amountNotes(working, answer)));
+      }),
+    ),
   );

@@ -16,7 +16,7 @@ export interface BudgetLine {
 export type Budget = readonly BudgetLine[];
 
 /** The uncertainty budget of a value; [] where no input is uncertain. */
-export const budgetOf = (measured: Measured): Budget => {
+const budgetOf = (measured: Measured): Budget => {
   const lines = [...measured.slopes].map(([source, slope]) => ({
     input: source.name,
     uncertainty: source.uncertainty,

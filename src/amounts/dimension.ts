@@ -27,7 +27,7 @@ export const combine = (a: Dimension, b: Dimension, power = 1): Dimension => [
 ];
 
 /** `base` to the power `power`. */
-export const powerOf = (base: Dimension, power: number): Dimension => combine(NUMBER, base, power);
+const powerOf = (base: Dimension, power: number): Dimension => combine(NUMBER, base, power);
 
 export const sameDimension = (a: Dimension, b: Dimension): boolean => a.every((power, index) => power === b[index]);
 

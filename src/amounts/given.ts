@@ -19,6 +19,9 @@ export interface Given {
   readonly measured: Measured;
 }
 
+/** A quantity as read, before concentrations are counted in moles. */
+type GivenReading = Given & { readonly read: ReadQuantity };
+
 const unknownQuantity = (name: string, where: 'given' | 'want'): Result<never> => {
   const hint = didYouMean(nearest(name, [...QUANTITY_NAMES, 'record']));
   return failure({
@@ -73,7 +76,7 @@ const asVariable = (name: QuantityName, read: ReadQuantity): VariableName => {
   return name === 'volume' && sameDimension(read.dimension, AMOUNT) ? 'amount' : name;
 };
 
-const giveOne = (name: QuantityName, text: string): Result<Given & { readonly read: ReadQuantity }> => {
+const giveOne = (name: QuantityName, text: string): Result<GivenReading> => {
   const field = `given.${name}`;
   return chain(readOne(name, text), (read) => {
     if (isMoles(name, read, text)) return wrongVolume(text, field);
@@ -102,7 +105,7 @@ const needs = (field: string, missing: string, message: string): Result<never> =
   failure({ code: 'not-enough-given', message, field, missing: [missing] });
 
 /** Concentrations count the species asked: g/L over M, mg/kg times the density of the solution over M. */
-const toMolar = (given: Given & { readonly read: ReadQuantity }, conversion: Conversion): Result<Given> => {
+const toMolar = (given: GivenReading, conversion: Conversion): Result<Given> => {
   const { read, measured, field } = given;
   if (read.value === 0 || sameDimension(read.dimension, MOLAR_CONCENTRATION)) return success(given);
   const { molarMass, density } = conversion;
@@ -140,8 +143,14 @@ const notText = (name: string): Result<never> =>
     hint: 'Write a text: "250 A".',
   });
 
-/** Every quantity given, in SI base units, in the order of the ask. Faults of reading carry their field and span. */
-export const readGiven = (given: GivenTexts, molarMass: Measured | undefined): Result<readonly Given[]> => {
+/** All texts of `given`, read but not yet converted. */
+export interface GivenReadings {
+  readonly recorded: readonly Given[];
+  readonly readings: readonly GivenReading[];
+}
+
+/** Reads every quantity given, in the order of the ask. Faults of reading carry their field and span. */
+export const readGivenTexts = (given: GivenTexts): Result<GivenReadings> => {
   const entries = Object.entries(given).filter(([name]) => name !== 'record');
   const read = all(
     entries.map(([name, text]) => {
@@ -150,15 +159,21 @@ export const readGiven = (given: GivenTexts, molarMass: Measured | undefined): R
       return typeof text === 'string' ? giveOne(known.value, text) : notText(name);
     }),
   );
-  if (!read.ok) return read;
-  const density = read.value.find(({ name }) => name === 'density')?.measured;
+  return chain(giveRecord(given['record']), (recorded) => chain(read, (readings) => success({ recorded, readings })));
+};
+
+/** Everything given in SI base units, concentrations counted in moles of the species of this molar mass. */
+export const convertGiven = (
+  { recorded, readings }: GivenReadings,
+  molarMass: Measured | undefined,
+): Result<readonly Given[]> => {
+  const density = readings.find(({ name }) => name === 'density')?.measured;
   const converted = all(
-    read.value.map((one) =>
+    readings.map((one) =>
       one.name === 'from' || one.name === 'to' ? toMolar(one, { molarMass, density }) : success<Given>(one),
     ),
   );
-  const record = giveRecord(given['record']);
-  return chain(converted, (values) => chain(record, (recorded) => success([...recorded, ...values], read.notes)));
+  return chain(converted, (values) => success([...recorded, ...values]));
 };
 
 /** True where the ask speaks of a tank: then `volume` is that of the tank and not of a gas. */

@@ -32,7 +32,7 @@ export interface Knowledge {
 }
 
 /** The names that follow when `more` is given too, by the same steps as the values. */
-export const reachable = (
+const reachable = (
   { names, relations, defaultEfficiency }: Knowledge,
   more: readonly VariableName[],
 ): ReadonlySet<VariableName> => {

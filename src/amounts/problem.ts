@@ -1,6 +1,6 @@
 import type { Reaction } from '../balance/reaction.ts';
 import { FARADAY, GAS_CONSTANT } from '../elements/constants.ts';
-import { type Rational, ONE, isZero } from '../exact/rational.ts';
+import { type Rational, isZero } from '../exact/rational.ts';
 import { type Result, chain, failure, success } from '../report/result.ts';
 import { wholeSpan } from '../report/span.ts';
 import { type Species, isElectron, plainSpecies, plainWithState, sameSpecies } from '../species/species.ts';
@@ -128,6 +128,3 @@ export const electronsPerMole = (problem: Problem): readonly (readonly [name: st
     const own = stake === problem.asked ? problem.equivalence : equivalenceIn(stake, problem);
     return own.electronsPerMole === null ? [] : [[stake.name, own.electronsPerMole] as const];
   });
-
-/** The whole current. */
-export const ALL: Measured = exactly(toFloat(ONE));

@@ -5,7 +5,7 @@ import { plainSpecies } from '../species/species.ts';
 import type { Quantity } from './answered.ts';
 import { type Circuit, branchesOf } from './branches.ts';
 import { type Derived, deriveAll } from './derivation.ts';
-import { type GivenTexts, readGiven } from './given.ts';
+import { type GivenTexts, convertGiven, readGivenTexts } from './given.ts';
 import { type Measured, scaled, times, uncertaintyOf } from './measured.ts';
 import { toFloat } from './number.ts';
 import { type Problem, setUp } from './problem.ts';
@@ -125,9 +125,11 @@ export const tankBalance = ({ circuit, given, ...stack }: BalanceRequest): Resul
   const [whole, rest] = asShare(wholeCircuit(circuit), given);
   return chain(setUpAny(whole), (problem) => {
     if (problem === null) return success({});
-    return chain(readGiven(rest, problem.weigh(problem.asked.species)), (values) =>
-      chain(readStack(stack), (series) =>
-        chain(deriveAll(problem, values, series), (derived) => balanceFrom(problem, derived)),
+    return chain(readGivenTexts(rest), (readings) =>
+      chain(convertGiven(readings, problem.weigh(problem.asked.species)), (values) =>
+        chain(readStack(stack), (series) =>
+          chain(deriveAll(problem, values, series), (derived) => balanceFrom(problem, derived)),
+        ),
       ),
     );
   });

@@ -242,6 +242,11 @@ describe('bad input', () => {
     expect(fault(COPPER, 'Ag', { charge: '1 C' }).hint).toContain('Cu^2+, Cu');
   });
 
+  it('reports a text that cannot be read before a species that takes no part', () => {
+    expect(fault(COPPER, 'Ag', { charge: '1 Q' })).toMatchObject({ code: 'unknown-unit', field: 'given.charge' });
+    expect(fault(COPPER, 'Ag', { charge: '1 C' }, { want: { mass: 'Q' } })).toMatchObject({ field: 'want.mass' });
+  });
+
   it('does without a mass where an element has no standard weight, with a note', () => {
     const { quantities } = answer('TcO4^- + 8 H^+ + 7 e^- -> Tc + 4 H2O', 'Tc', { charge: '7 F' });
     expect(quantities['amount']?.value).toBeCloseTo(1, 12);
