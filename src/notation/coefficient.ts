@@ -53,7 +53,7 @@ interface UnknownPatterns {
 
 const patternsOf = (unknowns: readonly string[]): UnknownPatterns => {
   const names = unknowns
-    .filter((name) => /^\p{L}+$/u.test(name))
+    .filter((name) => /^\p{Ll}\p{L}*$/u.test(name) && name !== 'e')
     .toSorted((a, b) => b.length - a.length)
     .join('|');
   const one = SUMMAND.replace('U', `(?:${names})(?:\\s*/\\s*\\d+)?`);

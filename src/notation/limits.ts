@@ -23,6 +23,8 @@ export const LIMITS = {
   /** Species readings kept for reuse, and the length of a text worth keeping. */
   remembered: 2_000,
   rememberedLength: 200,
+  /** Lexers kept for asks with names of their own. */
+  rememberedLexers: 16,
   /** Letters and digits of a defined name. */
   nameLength: 40,
   /** Definitions in one ask. */

@@ -1,7 +1,7 @@
 import type { Lexer } from 'moo';
 import type { Rational } from '../exact/rational.ts';
 import { showRational } from '../exact/rational.ts';
-import { lexer as plainLexer, lexerWith } from '../notation/lexer.ts';
+import { lexer as plainLexer, lexerWith, UNKNOWN_SUBSCRIPTS } from '../notation/lexer.ts';
 import { LIMITS } from '../notation/limits.ts';
 import { parseSpecies } from '../notation/parse-species.ts';
 import { remarkOf } from '../notation/state.ts';
@@ -32,9 +32,18 @@ export interface SpeciesReading {
 
 const NO_UNKNOWNS: ReadonlyMap<string, Rational> = new Map();
 
+/** Lexers made for the names of an ask; each of its species needs the same one. */
+const lexers = createMemory<Lexer>(LIMITS.rememberedLexers);
+
+/** Names of unknowns that the lexer must be told: letters alone, and not the electron's. */
+const newUnknowns = (where: ReadonlyMap<string, Rational>): readonly string[] =>
+  [...where.keys()].filter((name) => /^\p{L}+$/u.test(name) && name !== 'e' && !UNKNOWN_SUBSCRIPTS.includes(name));
+
 const lexerFor = ({ where = NO_UNKNOWNS, define }: ReadingOptions): Lexer => {
   const names = define === undefined ? [] : [...define.members.keys()];
-  return names.length === 0 && where.size === 0 ? plainLexer : lexerWith(names, [...where.keys()]);
+  const unknowns = newUnknowns(where);
+  if (names.length + unknowns.length === 0) return plainLexer;
+  return lexers.recall(JSON.stringify([names, unknowns]), () => lexerWith(names, unknowns));
 };
 
 const buildReadings = (text: string, options: ReadingOptions) => (parsed: readonly SpeciesSyntax[]) => {
@@ -113,10 +122,14 @@ const readAnew = (text: string, options: ReadingOptions): KeptReading => {
   return { spells: parsed.ok, result: chain(readings, (built) => choose(text, options, built)) };
 };
 
-const signatureOf = ({ where = NO_UNKNOWNS, define, strict }: ReadingOptions): string => {
-  const values = [...where].map(([name, value]) => `${name}=${showRational(value)}`).sort();
-  return `${strict === true ? 's' : ''}|${values.join(',')}|${define?.signature ?? ''}`;
-};
+const signatureOf = ({ where = NO_UNKNOWNS, define, strict }: ReadingOptions): string =>
+  where.size === 0 && define === undefined
+    ? String(strict === true)
+    : JSON.stringify([
+        strict === true,
+        [...where].map(([name, value]) => [name, showRational(value)]),
+        define?.signature,
+      ]);
 
 /**
  * Readings already made. Reading is a pure function of text and options, so that nothing in here can go stale, and the

@@ -107,6 +107,15 @@ describe('unknown subscripts', () => {
     expect(two.fault.code).toBe('bad-count');
   });
 
+  test('cannot take the letter of the electron, and a name that is no word changes nothing', () => {
+    const odd = { where: new Map(['e', '(', '', '[', 'x|y', '^', 'H'].map((name) => [name, rationalFromText('2')])) };
+    expect(plainSpecies(read('e-', odd))).toBe('e^-');
+    expect(plainSpecies(read('Fe(OH)3', odd))).toBe('Fe(OH)3');
+    const result = readEquation('HO2^- + H2O + 2 e- -> 3 OH-', odd);
+    if (!result.ok) throw new Error(result.fault.message);
+    expect(result.value.left.map(({ species }) => plainSpecies(species))).toEqual(['HO2^-', 'H2O', 'e^-']);
+  });
+
   test('without a value are named in the fault', () => {
     const result = readSpecies('CuxS');
     if (result.ok) throw new Error('it was read');
