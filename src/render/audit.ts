@@ -19,15 +19,15 @@ export const verdictText = (verdict: EquationAuditAnswer['verdict'], look: Look)
   return look.paint[paint](words);
 };
 
-/** A repaired equation with the terms that were edited marked. */
+/** A repaired equation with the terms that were edited marked: by their species, or by the one it was mistyped for. */
 const repaired = (repair: Repair, look: Look): string => {
-  const edited = new Set(repair.edits.map((edit) => edit.to));
-  const pieces = repair.reaction.plain.split(/( \+ | -> )/);
-  return pieces
+  const edited = new Set(repair.edits.flatMap(({ term, to }) => [term, to]));
+  return repair.reaction.plain
+    .split(/( \+ | -> )/)
     .map((piece) => {
-      const text = reactionText(piece.trim(), look);
-      if (piece.startsWith(' ')) return ` ${text} `;
-      return edited.has(piece) ? look.paint.mark(text) : text;
+      if (piece.startsWith(' ')) return ` ${reactionText(piece.trim(), look)} `;
+      const text = reactionText(piece, look);
+      return edited.has(piece.replace(/^[\d./]+ /, '')) ? look.paint.mark(text) : text;
     })
     .join('');
 };
