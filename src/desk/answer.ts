@@ -142,8 +142,9 @@ const brokenProgram = (problem: unknown): Fault => ({
 const sealed = (addressee: Addressee, result: Result<Reply>): Answer => {
   if (!result.ok) return faulted(addressee, result.fault);
   const { id } = addressee;
-  const envelope = { ...(id === undefined ? {} : { id }), contract: CONTRACT } as const;
-  return { ...envelope, ...result.value, ok: true, notes: distinctNotes(result.notes) };
+  // The order in which the contract names the fields: id, contract, ask, ok, answer.
+  const head = { ...(id === undefined ? {} : { id }), contract: CONTRACT, ask: result.value.ask, ok: true } as const;
+  return { ...head, ...result.value, notes: distinctNotes(result.notes) };
 };
 
 /**

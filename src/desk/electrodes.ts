@@ -71,8 +71,23 @@ const fieldsAt = (cell: ComposedFields, electrode: Electrode): readonly Skeleton
     };
   });
 
-/** Both electrodes of a cell: all skeletons are read before one is balanced. */
+/** Reactions that one electrode may have. */
+export const MOST_REACTIONS = 100;
+
+const crowded = (cell: ComposedFields): Result<never> | null => {
+  const electrode = (['anode', 'cathode'] as const).find((one) => cell[one].length > MOST_REACTIONS);
+  if (electrode === undefined) return null;
+  const limit = `${String(MOST_REACTIONS)} reactions at an electrode`;
+  return failure({ code: 'too-hard', field: electrode, limit, message: `There may be at most ${limit}.` });
+};
+
+/**
+ * Both electrodes of a cell: all skeletons are read before one is balanced. Of several faults the first in the
+ * contract's order is told; `too-hard` for more than `MOST_REACTIONS` at one electrode.
+ */
 export const readElectrodes = (cell: ComposedFields, options: ReadingOptions): Result<Electrodes> => {
+  const full = crowded(cell);
+  if (full !== null) return full;
   const anode = fieldsAt(cell, 'anode');
   const fields = [...anode, ...fieldsAt(cell, 'cathode')];
   return chain(allByRank(fields.map((one) => readSkeleton(one, options))), (skeletons) => {

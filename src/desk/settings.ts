@@ -29,11 +29,25 @@ export const readShare = (text: string, field: string): Result<Rational> => {
   return map(readExact(percent, field, example), (value) => value.div(rationalFromText('100')));
 };
 
+/** Bounds of one ask: work grows with the helpers faster than with anything else. */
+export const MOST_HELPERS = 24;
+export const MOST_SUBSCRIPTS = 200;
+
+const tooMany = (field: string, most: number, what: string): Result<never> =>
+  failure({
+    code: 'too-hard',
+    field,
+    limit: `${String(most)} ${what}`,
+    message: `An ask may have at most ${String(most)} ${what}.`,
+    hint: `Give only the ${what} that take part.`,
+  });
+
 const NONE: ReadingOptions = {};
 
 type Common = Pick<Ask, 'where' | 'define' | 'strict'>;
 
 const readWhere = (where: Readonly<Record<string, string>>): Result<ReadonlyMap<string, Rational>> => {
+  if (Object.keys(where).length > MOST_SUBSCRIPTS) return tooMany('where', MOST_SUBSCRIPTS, 'unknown subscripts');
   const values = Object.entries(where).map(([name, text]) =>
     map(readExact(text, `where.${name}`, '"0.4"'), (value) => [name, value] as const),
   );
@@ -57,6 +71,7 @@ export const readMedium = (
   field = 'medium',
 ): Result<MediumChoice> => {
   if (asked === undefined || typeof asked === 'string') return success(asked);
+  if (asked.helpers.length > MOST_HELPERS) return tooMany(field, MOST_HELPERS, 'helpers');
   const helpers = asked.helpers.map((text, at) =>
     map(inField(readSpecies(text, options), `${field}.helpers[${String(at)}]`), ({ species }) => species),
   );

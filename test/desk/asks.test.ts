@@ -115,3 +115,27 @@ describe('several faults in one ask', () => {
     expect(answer(ask)).toMatchObject({ fault: { code: 'missing-element', field: 'cathode[0]' } });
   });
 });
+
+describe('an ask that is too much work', () => {
+  it.each([
+    [{ ask: 'half', skeleton: 'Zn -> Zn^2+', medium: { helpers: Array.from({ length: 25 }, () => 'H2O') } }, 'medium'],
+    [{ ask: 'cell', anode: Array.from({ length: 101 }, () => 'Zn -> Zn^2+'), cathode: ['Cu^2+ -> Cu'] }, 'anode'],
+    [
+      {
+        ask: 'species',
+        text: 'Fe',
+        where: Object.fromEntries(Array.from({ length: 201 }, (_, at) => [`x${String(at)}`, '1'])),
+      },
+      'where',
+    ],
+  ])('is refused with the limit it passes %#', (ask, field) => {
+    expect(answer(ask)).toMatchObject({ ok: false, fault: { code: 'too-hard', field } });
+    expect(answerSchema.safeParse(sent(ask)).success).toBe(true);
+  });
+
+  it('is refused by its length before it is read', () => {
+    expect(answer({ ask: 'species', text: 'Fe'.repeat(100_000) })).toMatchObject({
+      fault: { code: 'too-long', field: 'text' },
+    });
+  });
+});
