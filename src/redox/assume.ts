@@ -16,10 +16,10 @@ interface Condition {
   readonly row: IntegerVector;
 }
 
-/** Conditions thought of, sets of them tried, balances given. */
+/** Conditions thought of, balances given, and sets of conditions tried: among many unknowns fewer, as each costs more. */
 const MOST_CONDITIONS = 40;
-const MOST_TRIES = 400;
 const MOST_GIVEN = 12;
+const triesAmong = (count: number): number => Math.min(400, Math.floor(400_000 / (count * count)));
 
 /**
  * The balances that `dimension` - 1 simple conditions single out and in which every species with a side takes part on
@@ -30,7 +30,7 @@ const MOST_GIVEN = 12;
 export const assumedBalances = (unknowns: readonly Unknown[], dimension: number): readonly Assumed[] => {
   const { rows } = speciesMatrix(unknowns.map((unknown) => unknown.species));
   const found = new Map<string, Assumed>();
-  for (const conditions of choices(conditionsOn(unknowns), dimension - 1, MOST_TRIES)) {
+  for (const conditions of choices(conditionsOn(unknowns), dimension - 1, triesAmong(unknowns.length))) {
     if (found.size >= MOST_GIVEN) break;
     const [line, second] = nullSpace([...rows, ...conditions.map(({ row }) => row)], unknowns.length);
     const numbers = line === undefined || second !== undefined ? undefined : onTheirSides(unknowns, line);
@@ -106,7 +106,7 @@ const choices = <T>(items: readonly T[], count: number, most: number): readonly 
   if (count === 0) return [[]];
   const found: (readonly T[])[] = [];
   for (const [index, item] of items.entries()) {
-    if (found.length >= most) break;
+    if (found.length >= most || items.length - index < count) break;
     const rest = choices(items.slice(index + 1), count - 1, most - found.length);
     found.push(...rest.map((chosen) => [item, ...chosen]));
   }

@@ -18,8 +18,9 @@ import {
 import type { Change, MeasuredChange, Pair } from './pair.ts';
 import { usualFirst } from './usual-first.ts';
 
-/** Pairs of changes that are tried. */
-const MOST_TRIES = 4_000;
+/** Changes that are thought of, and pairs of them that are tried; among many unknowns fewer, since each try costs more. */
+const MOST_CHANGES = 400;
+const triesAmong = (count: number): number => Math.min(4_000, Math.floor(400_000 / (count * count)));
 
 /**
  * Every way to pair the oxidation of one reactant with the reduction of one reactant in which each species of a skeleton
@@ -31,10 +32,10 @@ const MOST_TRIES = 4_000;
 export const pairHalves = (unknowns: readonly Unknown[]): readonly Pair[] => {
   const labelled = labelsOfAll(unknowns.map(({ species }) => species));
   if (labelled === undefined) return [];
-  const changes = changesOf(unknowns, labelled);
+  const changes = changesOf(unknowns, labelled).slice(0, MOST_CHANGES);
   const order = usualFirst(unknowns, labelled);
   const found = new Map<string, Pair>();
-  for (const [one, other] of inPairs(changes)) {
+  for (const [one, other] of inPairs(changes).slice(0, triesAmong(unknowns.length))) {
     const pair = balancePair(unknowns, labelled, one, other);
     const name = pair?.numbers.join() ?? '';
     const known = found.get(name);
@@ -78,7 +79,7 @@ const inPairs = (changes: readonly Change[]): readonly (readonly [Change, Change
       ),
   );
   const size = ([one, other]: readonly [Change, Change]): number => one.transitions.length + other.transitions.length;
-  return pairs.toSorted((a, b) => size(a) - size(b)).slice(0, MOST_TRIES);
+  return pairs.toSorted((a, b) => size(a) - size(b));
 };
 
 const balancePair = (

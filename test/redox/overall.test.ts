@@ -61,6 +61,13 @@ describe('couplings', () => {
     expect(couplings('PbS + O3 -> PbSO4 + O2', 'none')[0]).toBe('if 1 O3 gives 1 O2: PbS + 4 O3 -> PbSO4 + 4 O2 (8)');
   });
 
+  it('are left out, and the family still listed, where far too much is open', () => {
+    const fuels = Array.from({ length: 40 }, (_, index) => `C${String(index + 1)}H${String(2 * index + 4)}`);
+    const fault = faultWith(overall(`${fuels.join(' + ')} + O2 -> CO + CO2 + H2O`, 'none'), 'several-balances');
+    expect(fault).toMatchObject({ dimension: 41, couplings: [] });
+    expect(fault.family).toHaveLength(80);
+  });
+
   it('bring their two halves', () => {
     const skeleton = plainEquation('MnO4^- + H2O2 -> Mn^2+ + O2');
     const result = balanceOverall(skeleton, 'acid', 'if H2O2 is only oxidised, to O2');
