@@ -1,4 +1,5 @@
 import { CommanderError } from '@commander-js/extra-typings';
+import { shielded, unshielded } from './arrow-argument.ts';
 import { BrokenList } from './equation-list.ts';
 import { program } from './program.ts';
 import type { Shell } from './shell.ts';
@@ -28,11 +29,12 @@ export const run = async (argv: readonly string[], world: World): Promise<ExitCo
       code = outcome;
     },
     ask: async (fields, showing) => {
-      code = await answerAsk(fields, showing, world);
+      const plain = Object.entries(fields).map(([name, part]) => [name, unshielded(part)] as const);
+      code = await answerAsk(Object.fromEntries(plain), showing, world);
     },
   };
   try {
-    await program(shell).parseAsync([...argv], { from: 'user' });
+    await program(shell).parseAsync(argv.map(shielded), { from: 'user' });
     return code;
   } catch (problem) {
     return codeOf(problem, world);

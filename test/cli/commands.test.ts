@@ -73,8 +73,16 @@ describe('a fault', () => {
     expect(settled.code).toBe(0);
   });
 
+  it('is told of an empty side, though the text begins like an option', async () => {
+    const half = await couplet(['half', '-> Cu', '--json']);
+    expect(half.code).toBe(1);
+    expect(JSON.parse(half.out)).toMatchObject({ fault: { code: 'empty-side', field: 'skeleton' } });
+    const cell = await couplet(['cell', '--anode', '-> Cu^2+', '--cathode', 'Ag^+ -> Ag', '--json']);
+    expect(JSON.parse(cell.out)).toMatchObject({ fault: { code: 'empty-side', field: 'anode[0]' } });
+  });
+
   it('never shows a stack trace', async () => {
-    for (const text of ['', '^', '((((', 'Fe ->', '\u0000', 'Fe^'.repeat(500), '('.repeat(3000)]) {
+    for (const text of ['', '^', '((((', '->', 'Fe ->', '\u0000', 'Fe^'.repeat(500), '('.repeat(3000)]) {
       const { err, out, code } = await couplet(['half', text]);
       expect(code).toBe(1);
       expect(out).toBe('');
