@@ -1,6 +1,5 @@
 import type { Reaction, Term } from '../balance/reaction.ts';
 import { type Rational, ZERO, isZero } from '../exact/rational.ts';
-import type { Species } from '../species/species.ts';
 
 /** Stoichiometric numbers by the key of their species, in the order in which the species came in; states aside. */
 export type Amounts = ReadonlyMap<string, Term>;
@@ -19,9 +18,6 @@ export const sumOfTerms = (lists: readonly (readonly [readonly Term[], Rational]
 
 /** The terms of `amounts`. */
 export const termsOf = (amounts: Amounts): readonly Term[] => [...amounts.values()];
-
-/** The stoichiometric number of `species`; 0 where it takes no part. */
-export const numberOf = (amounts: Amounts, species: Species): Rational => amounts.get(species.key)?.nu ?? ZERO;
 
 /** True where one formula stands in two states, which `Amounts` cannot tell apart. */
 export const hasTwoStates = (reaction: Reaction): boolean =>

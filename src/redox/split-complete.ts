@@ -4,7 +4,7 @@ import type { Term } from '../balance/reaction.ts';
 import { proved } from '../balance/recount.ts';
 import { gcdOf, lcmOf } from '../exact/integer.ts';
 import { independentColumns, nullSpace } from '../exact/matrix.ts';
-import { type Rational, ONE, ZERO, denominatorOf, isZero, numeratorOf, rational, signOf } from '../exact/rational.ts';
+import { type Rational, ONE, ZERO, denominatorOf, numeratorOf, rational, signOf } from '../exact/rational.ts';
 import { type Species, ELECTRON, isElectron } from '../species/species.ts';
 import type { HalfReaction } from './half-reaction.ts';
 import { HYDROXIDE, PROTON, WATER } from './media.ts';
@@ -109,6 +109,3 @@ const dimensionOf = (terms: readonly Term[], medium: Medium): number => {
   const species = [...written, ...helpersOf(medium), ELECTRON];
   return nullSpace(speciesMatrix(species).rows, species.length).length;
 };
-
-/** True where nothing is left. */
-export const isNothing = (terms: readonly Term[]): boolean => terms.every(({ nu }) => isZero(nu));

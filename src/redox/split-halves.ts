@@ -34,16 +34,20 @@ export const halvesOf = (reaction: Reaction, medium: Medium): Halves | null => {
 };
 
 /**
- * As the medium has it; where carbonate gives carbon dioxide, with these two as helpers; and with an alkali ion that the
- * one half hands to the other, as a host to a host.
+ * As the medium has it; where that lends no water but an ion of water is written, in acid or base; where carbonate gives
+ * carbon dioxide, with these two as helpers; and with an alkali ion that one half hands to the other, as host to host.
  */
 const ionicForms = (reaction: Reaction, medium: Medium, reach: Reach): readonly IonicReaction[] => {
   const ionic = ionicReaction(reaction, medium, reach);
+  const has = (helper: Species): boolean => ionic.amounts.has(helper.key);
   const carbonate = mediumRow('molten-carbonate');
-  const gives = carbonate?.helpers.every((helper) => ionic.amounts.has(helper.key)) === true;
+  const gives = carbonate?.helpers.every(has) === true;
   const handed = handedOver(ionic);
+  const shown = has(PROTON) ? mediumRow('acid') : has(HYDROXIDE) ? mediumRow('base') : undefined;
+  const lacks = shown !== undefined && !ionic.medium.helpers.some(({ key }) => key === WATER.key);
   return [
     ionic,
+    ...(lacks ? [{ ...ionic, medium: { name: shown.name, helpers: shown.helpers } }] : []),
     ...(gives ? [{ ...ionic, medium: { name: carbonate.name, helpers: carbonate.helpers } }] : []),
     ...(handed === null ? [] : [{ ...ionic, medium: { name: null, helpers: [...ionic.medium.helpers, handed] } }]),
   ];
