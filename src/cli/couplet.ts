@@ -1,5 +1,6 @@
 #!/usr/bin/env node
 import { createReadStream } from 'node:fs';
+import { stat } from 'node:fs/promises';
 import process from 'node:process';
 import { run } from './run.ts';
 import type { World } from './world.ts';
@@ -22,6 +23,12 @@ const world: World = {
   input: process.stdin,
   open: (path) => createReadStream(path),
   terminal,
+  errorTerminal: process.stderr.isTTY,
+  sizeOf: (path) =>
+    stat(path).then(
+      ({ size }) => size,
+      () => undefined,
+    ),
   colour: terminal && (NO_COLOR === undefined || NO_COLOR === '') && TERM !== 'dumb',
 };
 

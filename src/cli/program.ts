@@ -5,6 +5,7 @@ import { halfCommand, redoxCommand } from './balancing-commands.ts';
 import { batchCommand, sheetCommand } from './file-commands.ts';
 import { cellCommand } from './cell-command.ts';
 import { equationCommand, speciesCommand } from './reading-commands.ts';
+import { recordCommand } from './record-command.ts';
 import { type Shell, examples } from './shell.ts';
 
 const VERSION = '0.1.0';
@@ -54,6 +55,7 @@ export const program = (shell: Shell): CommandUnknownOpts => {
     speciesCommand(shell),
     equationCommand(shell),
     sheetCommand(shell),
+    recordCommand(shell),
     batchCommand(shell),
   ];
   for (const command of commands) root.addCommand(bound(command.helpOption('--help', 'show this help'), shell));

@@ -12,6 +12,10 @@ export interface World {
   readonly terminal: boolean;
   /** True where colour is wanted: a terminal, and NO_COLOR not set. */
   readonly colour: boolean;
+  /** True where standard error is a terminal: only there a progress bar is drawn. */
+  readonly errorTerminal?: boolean;
+  /** The size of a file in bytes where it is known. */
+  readonly sizeOf?: (path: string) => Promise<number | undefined>;
 }
 
 /** 0 answered; 1 a fault, or an audit that is `unbalanced`; 2 the command itself was wrong. */
