@@ -12,10 +12,12 @@ const CATHODE_REACTANT = 4;
 const CATHODE_PRODUCT = 8;
 const OVERALL_REACTANT = 16;
 const OVERALL_PRODUCT = 32;
+/** Takes no part. */
+const PRESENT = 64;
 
 const STANDS: Readonly<Record<Place, number>> = {
-  any: 63,
-  with: 63,
+  any: 127,
+  with: 127,
   reactant: ANODE_REACTANT | CATHODE_REACTANT | OVERALL_REACTANT,
   product: ANODE_PRODUCT | CATHODE_PRODUCT | OVERALL_PRODUCT,
   anode: ANODE_REACTANT | ANODE_PRODUCT,
@@ -50,8 +52,8 @@ const join = (actors: Actor[], all: readonly Species[], place: number): void => 
   }
 };
 
-/** The species of a scene, each once: anode, cathode, then what only the overall reaction names. */
-export const actorsOf = ({ anode, cathode, overall }: Scene): readonly Actor[] => {
+/** The species of a scene, each once: anode, cathode, what only the overall reaction names, what is only there. */
+export const actorsOf = ({ anode, cathode, overall, present = [] }: Scene): readonly Actor[] => {
   const actors: Actor[] = [];
   const both = (sides: Sides, reactant: number, product: number): void => {
     join(actors, sides.reactants, reactant);
@@ -60,6 +62,7 @@ export const actorsOf = ({ anode, cathode, overall }: Scene): readonly Actor[] =
   both(anode, ANODE_REACTANT, ANODE_PRODUCT);
   both(cathode, CATHODE_REACTANT, CATHODE_PRODUCT);
   both(overall, OVERALL_REACTANT, OVERALL_PRODUCT);
+  join(actors, present, PRESENT);
   return actors;
 };
 

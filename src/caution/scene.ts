@@ -19,6 +19,8 @@ export interface Scene {
   readonly cathode: Sides;
   /** Reactants and products of the overall reaction, or of a lone half-reaction. */
   readonly overall: Sides;
+  /** Species that are there and take no part. */
+  readonly present?: readonly Species[];
   /** The media there are, or that there may be; empty where nothing is known. */
   readonly media: readonly CautionMedium[];
   readonly mode: CautionMode | null;

@@ -1,7 +1,7 @@
 import type { Circuit } from '../amounts/branches.ts';
 import { type Reaction, sideOf } from '../balance/reaction.ts';
 import { cautionsFor } from '../caution/cautions.ts';
-import { type CautionMedium, type Scene, type Sides, mediaOf } from '../caution/scene.ts';
+import { type CautionMedium, type CautionMode, type Scene, type Sides, mediaOf } from '../caution/scene.ts';
 import type { CellReaction, WeightedHalf } from '../cell/cell-reaction.ts';
 import { ONE } from '../exact/rational.ts';
 import type { HalfReaction } from '../redox/half-reaction.ts';
@@ -55,8 +55,20 @@ export const cautionsOfReaction = (reaction: Reaction, medium: Medium | null): r
   return cautionsFor({ anode: NOTHING, cathode: NOTHING, overall, media, mode: null, divided: null });
 };
 
-/** The cautions of a cell; `divided` as the ask says of its separator, null where it says nothing. */
-export const cautionsOfCell = (cell: CellReaction, divided: boolean | null): readonly ShownCaution[] => {
+/** What else is known of a cell: what drives it, and what is there and takes no part. */
+export interface Besides {
+  readonly mode: CautionMode | null;
+  readonly present: readonly Species[];
+}
+
+const NOTHING_ELSE: Besides = { mode: null, present: [] };
+
+/** The hazards of a cell; `divided` as the ask says of its separator, null where it says nothing. */
+export const hazardsOfCell = (
+  cell: CellReaction,
+  divided: boolean | null,
+  { mode, present }: Besides = NOTHING_ELSE,
+): readonly ShownCaution[] => {
   const halves = [...cell.anode, ...cell.cathode].map(({ half }) => half);
   const reactions = (weighted: readonly WeightedHalf[]): readonly Reaction[] =>
     weighted.map(({ half }) => half.reaction);
@@ -65,11 +77,22 @@ export const cautionsOfCell = (cell: CellReaction, divided: boolean | null): rea
     cathode: sidesOf(...reactions(cell.cathode)),
     overall: sidesOf(cell.overall),
     media: mediaOfAll(halves.map(({ medium, reaction }) => mediaOf(medium, speciesOf(sidesOf(reaction))))),
-    mode: null,
+    mode,
     divided,
+    present,
   };
-  return [...cautionsFor(scene), ...gasCautions([gasSources(cell.anode), gasSources(cell.cathode)])];
+  return cautionsFor(scene);
 };
+
+/** What gas a cell makes for each ampere, and the air that dilutes its hydrogen. */
+export const gasCautionsOfCell = ({ anode, cathode }: CellReaction): readonly ShownCaution[] =>
+  gasCautions([gasSources(anode), gasSources(cathode)]);
+
+/** The cautions of a cell: its hazards, then its gases. */
+export const cautionsOfCell = (cell: CellReaction, divided: boolean | null): readonly ShownCaution[] => [
+  ...hazardsOfCell(cell, divided),
+  ...gasCautionsOfCell(cell),
+];
 
 const gasSources = (weighted: readonly WeightedHalf[]): readonly GasSource[] =>
   weighted.map(({ half: { reaction, electrons }, multiplier }) => ({ reaction, electrons, multiplier }));
