@@ -161,7 +161,10 @@ export class RecordReader {
     else if (reading.kind === 'part') this.lacking = reading.fault;
     if (reading.kind !== 'columns') return null;
     const { columns } = reading;
-    if (columns.current.factor === null) this.fault = noUnit('current', columns.current.name, header !== '');
+    if (columns.current.factor === null) {
+      this.fault = noUnit('current', columns.current.name, header !== '');
+      return null;
+    }
     this.table = { columns, delimiter, header, rows: new RecordRows(columns, this.rules.decimal) };
     return this.table;
   }
