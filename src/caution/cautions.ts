@@ -9,6 +9,10 @@ export interface Caution {
   readonly text: string;
   readonly because: readonly string[];
   readonly basis: string;
+  /** What can kill or explode at once: it stands before every answer. */
+  readonly grave?: true;
+  /** It holds only where what the end of its text names holds too. */
+  readonly conditional?: true;
 }
 
 /** Said wherever cautions are shown. */
@@ -121,7 +125,11 @@ const foundBy = (rule: Rule, actors: readonly Actor[], scene: Scene): Found | un
   if (met === undefined) return undefined;
   const { text, basis } = rule.row;
   const whole = met.open.length === 0 ? text : `${text} ${appliesSentence(met.open)}`;
-  return { caution: { text: whole, because: met.because, basis }, gravity: gravityOf(rule, met) };
+  const marks = {
+    ...(rule.row.atOnce === true ? { grave: true as const } : {}),
+    ...(met.open.length > 0 ? { conditional: true as const } : {}),
+  };
+  return { caution: { text: whole, because: met.because, basis, ...marks }, gravity: gravityOf(rule, met) };
 };
 
 /**

@@ -42,10 +42,16 @@ interface AtElectrode {
 export const cautionsOfHalf = (half: HalfReaction): readonly ShownCaution[] => {
   const overall = sidesOf(half.reaction);
   const media = mediaOf(half.medium, speciesOf(overall));
-  return [
-    ...cautionsFor({ ...sidesOfHalf(half), overall, media, mode: null, divided: null }),
-    ...gasCautions([[{ ...half, multiplier: ONE }]]),
-  ];
+  return withGas(
+    cautionsFor({ ...sidesOfHalf(half), overall, media, mode: null, divided: null }),
+    gasCautions([[{ ...half, multiplier: ONE }]]),
+  );
+};
+
+/** What is made for certain stands before what depends on a condition, and behind what is grave. */
+const withGas = (cautions: readonly ShownCaution[], gas: readonly ShownCaution[]): readonly ShownCaution[] => {
+  const open = ({ grave, conditional }: ShownCaution): boolean => grave !== true && conditional === true;
+  return [...cautions.filter((one) => !open(one)), ...gas, ...cautions.filter(open)];
 };
 
 /** The cautions of a reaction as it is, in a medium or in none that is known. */
@@ -88,11 +94,9 @@ export const hazardsOfCell = (
 export const gasCautionsOfCell = ({ anode, cathode }: CellReaction): readonly ShownCaution[] =>
   gasCautions([gasSources(anode), gasSources(cathode)]);
 
-/** The cautions of a cell: its hazards, then its gases. */
-export const cautionsOfCell = (cell: CellReaction, divided: boolean | null): readonly ShownCaution[] => [
-  ...hazardsOfCell(cell, divided),
-  ...gasCautionsOfCell(cell),
-];
+/** The cautions of a cell: its hazards and its gases, what depends on a condition last. */
+export const cautionsOfCell = (cell: CellReaction, divided: boolean | null): readonly ShownCaution[] =>
+  withGas(hazardsOfCell(cell, divided), gasCautionsOfCell(cell));
 
 const gasSources = (weighted: readonly WeightedHalf[]): readonly GasSource[] =>
   weighted.map(({ half: { reaction, electrons }, multiplier }) => ({ reaction, electrons, multiplier }));

@@ -4,7 +4,7 @@ import { cellAuditBlocks, equationAuditBlocks } from './audit.ts';
 import { page } from './block.ts';
 import type { Look } from './look.ts';
 import { cellBlocks, halfBlocks, redoxBlocks } from './reactions.ts';
-import { cautionLines, noteLines } from './remarks.ts';
+import { cautionLines, graveLines, noteLines } from './remarks.ts';
 import { equationBlocks, speciesBlocks } from './species.ts';
 
 /** What the answer is about, as the person wrote it: the equation of an audit, the species of amounts. */
@@ -33,6 +33,11 @@ const blocksOf = (given: Answered, subject: Subject, look: Look): readonly (read
   }
 };
 
-/** An answer as a page of text for a person: the result, how it comes about, notes, cautions. */
+/** An answer as a page of text for a person: grave cautions, the result, how it comes about, notes, other cautions. */
 export const renderAnswer = (given: Answered, subject: Subject, look: Look): string =>
-  page([...blocksOf(given, subject, look), noteLines(given.notes, look), cautionLines(given.cautions, look)]);
+  page([
+    graveLines(given.cautions, look),
+    ...blocksOf(given, subject, look),
+    noteLines(given.notes, look),
+    cautionLines(given.cautions, look),
+  ]);

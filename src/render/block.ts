@@ -2,8 +2,8 @@ import { displayWidth } from '../report/excerpt.ts';
 import { type Cell, columns, indented } from './columns.ts';
 import type { Look } from './look.ts';
 
-/** Columns of running text. */
-const MEASURE = 92;
+/** Columns of running text: with the indentation of a page it fits a terminal of 80. */
+const MEASURE = 76;
 const LABEL = 10;
 
 /** Running text broken at spaces so that no line is wider than `measure`. */
@@ -27,9 +27,17 @@ export const labelled = (rows: readonly (readonly [string, Cell | string])[], lo
     ['left', 'left'],
   );
 
-/** A label with running text that hangs behind it. */
-export const hanging = (label: string, text: string, paint: (text: string) => string): readonly string[] =>
-  wrapped(text, MEASURE - LABEL - 2).map((line, at) => `${(at === 0 ? label : '').padEnd(LABEL)}  ${paint(line)}`);
+/** A label with running text that hangs behind it; a label without its own paint is painted as the text is. */
+export const hanging = (
+  label: string,
+  text: string,
+  paint: (text: string) => string,
+  labelPaint: (text: string) => string = paint,
+): readonly string[] =>
+  wrapped(text, MEASURE - LABEL - 2).map((line, at) => {
+    const shown = at === 0 && label !== '' ? labelPaint(label) + ' '.repeat(LABEL - label.length) : ' '.repeat(LABEL);
+    return `${shown}  ${paint(line)}`;
+  });
 
 /** Blocks with one blank line between them, each moved in by one level; empty blocks are left out. */
 export const page = (blocks: readonly (readonly string[])[]): string => {

@@ -1,27 +1,39 @@
+import { ABSENCE } from '../caution/cautions.ts';
 import type { ShownCaution, ShownNote } from '../desk/schema/shape.ts';
 import { hanging } from './block.ts';
-import type { Look } from './look.ts';
+import type { Look, Paint } from './look.ts';
 
 /** The notes of an answer, one below the other. */
 export const noteLines = (notes: readonly ShownNote[], look: Look): readonly string[] =>
   notes.flatMap(({ message }) => hanging('note', message, look.paint.warn));
 
-const LAST_WORD =
-  'That no caution is shown does not mean that it is safe: local codes, the SDS and licensed practice decide.';
+/** A caution in one piece: its text, then in brackets what calls for it and its basis. */
+export const cautionText = ({ text, because, basis }: ShownCaution): string => {
+  const ground = [because.join(', '), basis].filter((part) => part !== '').join('; ');
+  return ground === '' ? text : `${text} (${ground})`;
+};
 
-const basisText = ({ because, basis }: ShownCaution): string =>
-  [because.join(', '), basis].filter((part) => part !== '').join('; ');
+const isGrave = ({ grave }: ShownCaution): boolean => grave === true;
 
-const cautionBlock = (caution: ShownCaution, label: string, look: Look): readonly string[] => [
-  ...hanging(label, caution.text, look.paint.bad),
-  ...hanging('', basisText(caution), look.paint.faint),
-];
+const asIs: Paint['strong'] = (text) => text;
 
-/** The cautions of an answer with their basis, and the line that none shown does not mean safe. */
-export const cautionLines = (cautions: readonly ShownCaution[], look: Look): readonly string[] =>
-  cautions.length === 0
-    ? []
-    : [...cautions.flatMap((one) => cautionBlock(one, 'caution', look)), ...hanging('', LAST_WORD, look.paint.faint)];
+/** What can kill or explode at once: it stands before the answer, in every view. */
+export const graveLines = (cautions: readonly ShownCaution[], look: Look): readonly string[] =>
+  cautions.filter(isGrave).flatMap((one) => hanging('danger', cautionText(one), look.paint.bad));
+
+/** The other cautions, those that depend on a condition last, and the line that none shown does not mean safe. */
+export const cautionLines = (cautions: readonly ShownCaution[], look: Look): readonly string[] => {
+  if (cautions.length === 0) return [];
+  const others = cautions.filter((one) => !isGrave(one));
+  const lastOpen = [
+    ...others.filter(({ conditional }) => conditional !== true),
+    ...others.filter(({ conditional }) => conditional === true),
+  ];
+  return [
+    ...lastOpen.flatMap((one) => hanging('caution', cautionText(one), asIs, look.paint.warn)),
+    ...hanging('', ABSENCE, look.paint.faint),
+  ];
+};
 
 /** Cautions of several parts, each once with the names of the parts that call for it. */
 export const gatheredCautions = (
@@ -41,7 +53,7 @@ export const gatheredCautions = (
       .join(', ');
   const blocks = distinct.map((caution) => [
     look.paint.strong(namesOf(caution)),
-    ...cautionBlock(caution, '', look).map((line) => line.trim()),
+    ...hanging('', cautionText(caution), isGrave(caution) ? look.paint.bad : asIs).map((line) => line.trim()),
   ]);
-  return distinct.length === 0 ? [] : [...blocks, [look.paint.faint(LAST_WORD)]];
+  return distinct.length === 0 ? [] : [...blocks, [look.paint.faint(ABSENCE)]];
 };

@@ -87,6 +87,12 @@ export const cautionSchema = z
     text: z.string(),
     because: z.array(z.string()).readonly().describe('The species or elements that call for it.'),
     basis: z.string(),
+    grave: z
+      .exactOptional(z.boolean())
+      .describe('true: it can kill or explode at once, and is shown before everything else.'),
+    conditional: z
+      .exactOptional(z.boolean())
+      .describe('true: it holds only where what the end of its text names holds too.'),
   })
   .describe('A usual caution. That none is given does not mean that the work is safe.');
 
