@@ -2,7 +2,7 @@ import type { CellAuditAnswer, EquationAuditAnswer } from '../desk/schema/answer
 import { hanging, labelled } from './block.ts';
 import { ledgerLines } from './ledger.ts';
 import type { Look, Paint } from './look.ts';
-import { reactionText } from './spelling.ts';
+import { termText } from './spelling.ts';
 
 type Blocks = readonly (readonly string[])[];
 type Repair = EquationAuditAnswer['repairs'][number];
@@ -25,8 +25,9 @@ const repaired = (repair: Repair, look: Look): string => {
   return repair.reaction.plain
     .split(/( \+ | -> )/)
     .map((piece) => {
-      if (piece.startsWith(' ')) return ` ${reactionText(piece.trim(), look)} `;
-      const text = reactionText(piece, look);
+      if (piece === ' -> ') return look.unicode ? ' → ' : piece;
+      if (piece === ' + ') return piece;
+      const text = termText(piece, look);
       return edited.has(piece.replace(/^[\d./]+ /, '')) ? look.paint.mark(text) : text;
     })
     .join('');

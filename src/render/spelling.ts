@@ -1,50 +1,72 @@
+import { ONE, ZERO } from '../exact/rational.ts';
+import {
+  type PrintStyle,
+  type PrintedTerm,
+  printReaction,
+  printSpecies,
+  printTerm,
+} from '../notation/print/print.ts';
+import type { Spelled } from '../notation/print/pieces.ts';
+import { readSpecies } from '../species/read.ts';
 import type { Look } from './look.ts';
 
-const SUPER: Readonly<Record<string, string>> = {
-  '0': '⁰',
-  '1': '¹',
-  '2': '²',
-  '3': '³',
-  '4': '⁴',
-  '5': '⁵',
-  '6': '⁶',
-  '7': '⁷',
-  '8': '⁸',
-  '9': '⁹',
-  '+': '⁺',
-  '-': '⁻',
+/** Words that are no formula: the names an ask defined. As spelled they print like a row of symbols. */
+const namesIn = (plain: string): readonly string[] =>
+  (plain.match(/\p{L}[\p{L}\d]*\p{L}|\p{L}/gu) ?? []).filter((word) => !readSpecies(word).ok);
+
+/** What cannot be read is shown as it stands. */
+const asItStands = (plain: string): Spelled => {
+  const members = [{ kind: 'named', name: plain, members: [], count: ONE } as const];
+  return { parts: [{ multiplier: ONE, members }], charge: ZERO, state: null };
 };
-const SUB = '₀₁₂₃₄₅₆₇₈₉';
 
-const raised = (text: string): string =>
-  Array.from(text)
-    .map((letter) => SUPER[letter] ?? letter)
-    .join('');
-const lowered = (text: string): string =>
-  Array.from(text)
-    .map((digit) => SUB[Number(digit)] ?? digit)
-    .join('');
+const withNames = (plain: string, names: readonly string[]): Spelled => {
+  const define = {
+    members: new Map(names.map((name) => [name, []] as const)),
+    spellings: new Set<string>(),
+    signature: `as spelled: ${names.join(' ')}`,
+  };
+  const read = readSpecies(plain, { define });
+  return read.ok ? read.value.species : asItStands(plain);
+};
 
-/**
- * A canonical species in Unicode: Cr2O7^2- is Cr₂O₇²⁻. Counts with a decimal point or a slash have no Unicode
- * form that is read back, so they stay on the line; a charge is raised, a dot stands for the asterisk.
- */
-const unicodeSpecies = (plain: string): string =>
-  plain
-    .replace(/\^\{(\d+)\}/g, (_, mass: string) => raised(mass))
-    .replace(/\^(\d*[+-])/g, (_, charge: string) => raised(charge))
-    .replace(/(?<=[A-Za-z)\]}])(\d+)(?![\d.]*[./]\d)(?![\d.])/g, (_, count: string) => lowered(count))
-    .replaceAll('*', '·');
+/** A canonical species in its parts. */
+const spelledOf = (plain: string): Spelled => {
+  const read = readSpecies(plain);
+  return read.ok ? read.value.species : withNames(plain, namesIn(plain));
+};
+
+const TERM = /^(?:(\d[\d./]*) )?(.+)$/s;
+
+const termOf = (plain: string): PrintedTerm => {
+  const [, coefficient = '', species = plain] = TERM.exec(plain) ?? [];
+  return { coefficient, species: spelledOf(species) };
+};
+
+const sideOf = (plain: string): readonly PrintedTerm[] => plain.split(' + ').filter(isWritten).map(termOf);
+
+const isWritten = (text: string): boolean => text.trim() !== '';
+
+/** A canonical species in one of the styles. */
+export const styledSpecies = (plain: string, style: PrintStyle): string =>
+  style === 'plain' ? plain : printSpecies(spelledOf(plain), style);
+
+/** A canonical reaction in one of the styles. */
+export const styledReaction = (plain: string, style: PrintStyle): string => {
+  if (style === 'plain') return plain;
+  const [left = '', right = ''] = plain.split('->');
+  return printReaction({ left: sideOf(left.trim()), right: sideOf(right.trim()) }, style);
+};
+
+const styleOf = ({ unicode }: Look): PrintStyle => (unicode ? 'unicode' : 'plain');
 
 /** A canonical species as the look wants it. */
-export const speciesText = (plain: string, look: Look): string => (look.unicode ? unicodeSpecies(plain) : plain);
+export const speciesText = (plain: string, look: Look): string => styledSpecies(plain, styleOf(look));
+
+/** A term of a canonical reaction, its coefficient with it. */
+export const termText = (plain: string, look: Look): string =>
+  look.unicode ? printTerm(termOf(plain), 'unicode') : plain;
 
 /** A canonical reaction as the look wants it: coefficients stay on the line. */
-export const reactionText = (plain: string, look: Look): string => {
-  if (plain === '') return 'nothing is left';
-  if (!look.unicode) return plain;
-  return plain
-    .split(' ')
-    .map((word) => (word === '->' ? '→' : /^[\d./]+$/.test(word) || word === '+' ? word : unicodeSpecies(word)))
-    .join(' ');
-};
+export const reactionText = (plain: string, look: Look): string =>
+  plain === '' ? 'nothing is left' : styledReaction(plain, styleOf(look));

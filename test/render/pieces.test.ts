@@ -16,7 +16,8 @@ describe('a spelling', () => {
     ['e^-', 'e⁻'],
     ['H^+', 'H⁺'],
     ['[H2W12O42]^10-', '[H₂W₁₂O₄₂]¹⁰⁻'],
-    ['Li0.5CoO2', 'Li0.5CoO₂'],
+    ['Li0.5CoO2', 'Li₀.₅CoO₂'],
+    ['Cu(EDTA)^2-', 'Cu(EDTA)²⁻'],
     ['H2O(l)', 'H₂O(l)'],
   ])('of %s is %s on a terminal and itself in a pipe', (plain, unicode) => {
     expect(speciesText(plain, UNICODE)).toBe(unicode);

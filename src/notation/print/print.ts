@@ -6,7 +6,8 @@ import { plainPiece } from './plain.ts';
 import { unicodePiece } from './unicode.ts';
 
 /** The ways to write a species: canonical plain text, Unicode, HTML, plain LaTeX math, MathML. */
-export type PrintStyle = 'plain' | 'unicode' | 'html' | 'latex' | 'mathml';
+export const PRINT_STYLES = ['plain', 'unicode', 'html', 'latex', 'mathml'] as const;
+export type PrintStyle = (typeof PRINT_STYLES)[number];
 
 /** A term of a reaction: its coefficient as text, "" for 1 ("5", "1/2"), and its species. */
 export interface PrintedTerm {
@@ -63,6 +64,10 @@ const termInside = ({ coefficient, species }: PrintedTerm, style: PrintStyle): s
   const inside = style === 'latex' ? printSpecies(species, style) : speciesInside(species, style);
   return coefficient === '' ? inside : fractionOf(coefficient, style) + JOINTS[style][0] + inside;
 };
+
+/** One term of a reaction in one of the styles. */
+export const printTerm = (term: PrintedTerm, style: PrintStyle): string =>
+  style === 'mathml' ? wrapped(termInside(term, style), style) : termInside(term, style);
 
 /** A reaction in one of the styles; "" where nothing stands on either side. */
 export const printReaction = ({ left, right }: PrintedReaction, style: PrintStyle): string => {
