@@ -1,8 +1,7 @@
 import type { Fault } from '../report/fault.ts';
 import { didYouMean, nearest } from '../report/suggest.ts';
-import { toFloat } from './number.ts';
 import { QUANTITIES } from './quantities.ts';
-import { readWantedUnit } from './quantity.ts';
+import { type ColumnKind, PARTINGS, candidateOf, factorOf } from './record-names.ts';
 import type { RecordOptions } from './record-options.ts';
 
 /** A column of a record. `factor`: to s or A; null where no unit is known, as beside clock times. */
@@ -26,66 +25,9 @@ export interface RecordColumns {
 /** A column that was sought: found, not there, or a fault. */
 type Sought = RecordColumn | 'missing' | Fault;
 
-type Kind = 'time' | 'current';
-
-const WORDS: Readonly<Record<Kind, readonly string[]>> = {
-  time: 't time times elapsed timestamp datetime date/time clock duration zeit temps tiempo'.split(' '),
-  current: 'i current currents amperage strom courant corriente'.split(' '),
-};
-
-/** Words beside "current" or "time" that make it another quantity than the one that flows. */
-const SPOILERS = /densit|dichte|limit|set|target|nominal|max|min\b|step time|offset|range/;
-
-const CLOCK_UNIT = /^(?:[hdm]+:)?[hm]+:[ms]+(?:\.[sf]+)?$/i;
-
-/** The factor of a unit; null for a pattern of clock times; undefined for no unit of this kind. */
-const factorOf = (unit: string, kind: Kind): number | null | undefined => {
-  if (kind === 'time' && CLOCK_UNIT.test(unit)) return null;
-  const read = readWantedUnit(unit, QUANTITIES[kind]);
-  return read.ok ? toFloat(read.value.factor) : undefined;
-};
-
-/** A name and its unit, as headers part them: t (min), I [mA], t / s, "Current, A", time_s, current in mA, mA. */
-const PARTINGS = [
-  /^(.*?)\s*[[(]([^\])]*)[\])]$/,
-  /^(.*?)\s*\/\s*(\S+)$/,
-  /^(.*?)\s*,\s*(\S+)$/,
-  /^(.*?)[_\s](?:in[_\s])?([^_\s]+)$/,
-  /^()(\S+)$/,
-];
-
-interface Candidate {
-  readonly rank: number;
-  readonly unit: string;
-  readonly factor: number | null;
-}
-
-const baseRank = (base: string, kind: Kind, hasUnit: boolean): number | undefined => {
-  const words = WORDS[kind];
-  if (words.includes(base)) return 0;
-  if (base === '') return 1;
-  if (SPOILERS.test(base)) return undefined;
-  return hasUnit && base.split(/[^a-zµ/]+/).some((word) => words.includes(word)) ? 2 : undefined;
-};
-
-/** How well a header names this kind of column; undefined where it does not. */
-const candidateOf = (name: string, kind: Kind): Candidate | undefined => {
-  const lower = name.toLowerCase();
-  if (WORDS[kind].includes(lower)) return { rank: 0, unit: '', factor: null };
-  for (const parting of PARTINGS) {
-    const [, base, unit] = parting.exec(name) ?? [];
-    const factor = unit === undefined ? undefined : factorOf(unit, kind);
-    if (base === undefined || unit === undefined || factor === undefined) continue;
-    const rank = baseRank(base.trim().toLowerCase(), kind, true);
-    if (rank !== undefined) return { rank, unit, factor };
-  }
-  const rank = baseRank(lower, kind, kind === 'time');
-  return rank === undefined || lower === '' ? undefined : { rank, unit: '', factor: null };
-};
-
 const listed = (names: readonly string[]): string => names.filter((name) => name !== '').join(', ');
 
-const ambiguous = (kind: Kind, names: readonly string[]): Fault => ({
+const ambiguous = (kind: ColumnKind, names: readonly string[]): Fault => ({
   code: 'bad-ask',
   message: `more than one column may be the ${kind}: ${listed(names)}`,
   field: kind,
@@ -93,7 +35,7 @@ const ambiguous = (kind: Kind, names: readonly string[]): Fault => ({
 });
 
 /** The column that the header itself shows. */
-const shownColumn = (names: readonly string[], kind: Kind): Sought => {
+const shownColumn = (names: readonly string[], kind: ColumnKind): Sought => {
   const found = names.flatMap((name, index) => {
     const candidate = candidateOf(name, kind);
     return candidate === undefined ? [] : [{ index, name, ...candidate }];
@@ -112,7 +54,7 @@ const shownColumn = (names: readonly string[], kind: Kind): Sought => {
 const bare = (name: string): string => name.replace(/\s*[[(][^\])]*[\])]$/, '').toLowerCase();
 
 /** The column that was asked for by name, by its name without unit, or by number. */
-const askedColumn = (names: readonly string[], kind: Kind, asked: string): Sought => {
+const askedColumn = (names: readonly string[], kind: ColumnKind, asked: string): Sought => {
   const lower = asked.trim().toLowerCase();
   const exact = names.findIndex((name) => name.toLowerCase() === lower);
   const loose = exact >= 0 ? exact : names.findIndex((name) => bare(name) === lower);
@@ -127,7 +69,7 @@ const askedColumn = (names: readonly string[], kind: Kind, asked: string): Sough
 };
 
 /** What to say of a header that lacks one of the two columns. */
-const lacking = (names: readonly string[], kind: Kind, asked: string | undefined): Fault => {
+const lacking = (names: readonly string[], kind: ColumnKind, asked: string | undefined): Fault => {
   const hint = asked === undefined ? `Say which column it is: --${kind} NAME.` : didYouMean(nearest(asked, names));
   return {
     code: 'bad-ask',
@@ -138,7 +80,7 @@ const lacking = (names: readonly string[], kind: Kind, asked: string | undefined
 };
 
 /** The unit that was given stands above the one in the header. */
-const inUnit = (column: Sought, kind: Kind, unit: string | undefined): Sought => {
+const inUnit = (column: Sought, kind: ColumnKind, unit: string | undefined): Sought => {
   if (unit === undefined || column === 'missing' || 'code' in column) return column;
   const factor = factorOf(unit, kind);
   if (factor !== undefined) return { ...column, unit, factor };
@@ -150,7 +92,7 @@ const inUnit = (column: Sought, kind: Kind, unit: string | undefined): Sought =>
   };
 };
 
-const soughtColumn = (names: readonly string[], kind: Kind, options: RecordOptions): Sought => {
+const soughtColumn = (names: readonly string[], kind: ColumnKind, options: RecordOptions): Sought => {
   const asked = options[kind];
   const found = asked === undefined ? shownColumn(names, kind) : askedColumn(names, kind, asked);
   return inUnit(found, kind, kind === 'time' ? options.timeUnit : options.currentUnit);
@@ -174,6 +116,20 @@ export const readHeader = (names: readonly string[], options: RecordOptions): He
   if (current === 'missing') return { kind: 'part', fault: lacking(names, 'current', options.current) };
   const date = names.findIndex((name, index) => /^(date|datum)$/i.test(name) && index !== time.index);
   return { kind: 'columns', columns: { time, current, date: date < 0 ? null : date, count: names.length } };
+};
+
+/** The columns with the units of a line of units below the header; undefined where the line holds none. */
+export const columnsWithUnits = (columns: RecordColumns, names: readonly string[]): RecordColumns | undefined => {
+  const united = (column: RecordColumn, kind: ColumnKind): RecordColumn | undefined => {
+    if (column.factor !== null) return column;
+    const unit = (names[column.index] ?? '').trim().replace(/^[[(](.*)[\])]$/, '$1');
+    const factor = unit === '' ? undefined : factorOf(unit, kind);
+    return factor === undefined ? undefined : { ...column, unit, factor };
+  };
+  const current = united(columns.current, 'current');
+  return current === undefined
+    ? undefined
+    : { ...columns, current, time: united(columns.time, 'time') ?? columns.time };
 };
 
 /** The columns of a record without a header: the first two, or those asked for by number. */

@@ -22,6 +22,7 @@ export class RecordNumbers {
 
   /** The number of a field, or why it is none. */
   read(field: string): number | NumberProblem {
+    if (this.sign === 'comma' && COMMA.test(field)) return Number(field.replace(',', '.'));
     if (PLAIN.test(field)) return field.includes('.') && !this.agree('point') ? 'decimal-sign' : Number(field);
     const text = field.trim().replace(/^[−–]/, '-');
     if (text === '') return 'missing-value';

@@ -1,7 +1,14 @@
 import type { Fault } from '../report/fault.ts';
 import { type Result, failure, success } from '../report/result.ts';
 import { readClock } from './record-clock.ts';
-import { type HeaderReading, type RecordColumns, columnsWithoutHeader, readHeader } from './record-columns.ts';
+import {
+  type HeaderReading,
+  type RecordColumns,
+  columnsWithUnits,
+  columnsWithoutHeader,
+  readHeader,
+} from './record-columns.ts';
+import { noHeader, noUnit, tooFewReadings } from './record-faults.ts';
 import { type Delimiter, delimiterOf, fieldsOf, namesOf } from './record-fields.ts';
 import { RecordIntegral } from './record-integral.ts';
 import { LONGEST_RECORD_LINE, RecordLines } from './record-lines.ts';
@@ -37,23 +44,6 @@ const isReading = (fields: readonly string[]): boolean => {
 };
 
 const isComment = (line: string): boolean => line.startsWith('#') || line.startsWith('%') || line.startsWith('//');
-
-const noHeader = (before: readonly string[]): Fault => ({
-  code: 'bad-ask',
-  message: 'no line names a column of time and one of current',
-  field: 'record',
-  hint:
-    before.length > 0
-      ? `The line before the numbers has ${before.join(', ')}: name them with --time and --current.`
-      : 'Name the columns in a first line, as in time_s, current_A, or give --time-unit and --current-unit.',
-});
-
-const noUnit = (kind: 'time' | 'current', name: string, headed: boolean): Fault => ({
-  code: 'unknown-unit',
-  message: `the unit of ${kind} is not known, in ${headed ? `the column ${name}` : name}`,
-  field: `${kind}Unit`,
-  hint: `${headed ? `Write it in the header, as in ${name} (${kind === 'time' ? 's' : 'A'}), or give` : 'Give'} --${kind}-unit.`,
-});
 
 /**
  * Reads a current record from pieces of its text and integrates it as it comes, in constant memory. Every line is
@@ -101,7 +91,7 @@ export class RecordReader {
     if (this.fault !== null) return failure(this.fault);
     if (this.table === null) return failure(this.lacking ?? noHeader(this.before));
     const integral = this.integral.end();
-    if (integral === undefined) return failure(this.tooShort());
+    if (integral === undefined) return failure(tooFewReadings(this.bad.list()[0]));
     const { columns, delimiter, rows } = this.table;
     return success({
       ...shownIntegral(integral, this.rules.integral),
@@ -116,27 +106,13 @@ export class RecordReader {
     });
   }
 
-  private tooShort(): Fault {
-    const worst = this.bad.list()[0];
-    return {
-      code: 'not-enough-given',
-      message: 'a record needs two readings or more',
-      field: 'record',
-      missing: ['record'],
-      ...(worst === undefined
-        ? {}
-        : {
-            hint: `Most rows were left out as ${worst.reason}, the first in line ${String(worst.lines[0] ?? 0)}: ${worst.example}`,
-          }),
-    };
-  }
-
   private line(text: string | null, ended: boolean): void {
     this.counts.total += 1;
     if (text === null) this.leaveOut('too-long', `more than ${String(LONGEST_RECORD_LINE)} characters`);
     else if (text.trim() === '') this.counts.blank += 1;
     else if (isComment(text)) this.counts.comments += 1;
     else if (this.table === null) this.open(text, ended);
+    else if (this.table.columns.current.factor === null) this.units(this.table, text);
     else this.row(this.table, text, ended);
   }
 
@@ -147,7 +123,8 @@ export class RecordReader {
     if (isReading(fields)) {
       this.fault = this.lacking;
       const table = this.fault === null ? this.begin(columnsWithoutHeader(this.options), delimiter, '') : null;
-      if (table !== null) this.row(table, text, ended);
+      if (table?.columns.current.factor === null) this.units(table, text);
+      else if (table !== null) this.row(table, text, ended);
       return;
     }
     this.counts.before += 1;
@@ -161,12 +138,21 @@ export class RecordReader {
     else if (reading.kind === 'part') this.lacking = reading.fault;
     if (reading.kind !== 'columns') return null;
     const { columns } = reading;
-    if (columns.current.factor === null) {
-      this.fault = noUnit('current', columns.current.name, header !== '');
-      return null;
+    return (this.table = this.tableOf(columns, delimiter, header));
+  }
+
+  private tableOf(columns: RecordColumns, delimiter: Delimiter, header: string): Table {
+    return { columns, delimiter, header, rows: new RecordRows(columns, this.rules.decimal) };
+  }
+
+  /** The line below a header without units may be one of units: s; A. Readings without a unit are a fault. */
+  private units({ columns, delimiter, header }: Table, text: string): void {
+    const united = columnsWithUnits(columns, namesOf(text, delimiter) ?? []);
+    if (united === undefined || header === '') this.fault = noUnit('current', columns.current.name, header !== '');
+    else {
+      this.table = this.tableOf(united, delimiter, header);
+      this.counts.before += 1;
     }
-    this.table = { columns, delimiter, header, rows: new RecordRows(columns, this.rules.decimal) };
-    return this.table;
   }
 
   private row({ columns, delimiter, rows, header }: Table, text: string, ended: boolean): void {

@@ -1,5 +1,5 @@
 import { Command, type CommandUnknownOpts, Option } from '@commander-js/extra-typings';
-import { jsonOption, plainOption } from './options.ts';
+import { jsonOption } from './options.ts';
 import { type Shell, examples } from './shell.ts';
 
 const decimalOption = new Option('--decimal <SIGN>', 'the decimal sign; left out, the first number shows it').choices([
@@ -27,7 +27,6 @@ export const recordCommand = (shell: Shell): CommandUnknownOpts =>
     .option('--gap <LIMIT>', 'a step longer than this is a gap: a time, or a number of usual steps (10 left out)')
     .addOption(gapChargeOption)
     .option('--zero <CURRENT>', 'a current of this size or less is a pause (0 A left out)')
-    .addOption(plainOption)
     .addOption(jsonOption)
     .addHelpText(
       'after',
@@ -40,7 +39,7 @@ export const recordCommand = (shell: Shell): CommandUnknownOpts =>
         'couplet record - --json < tank-a.csv',
       ),
     )
-    .action(async (file, { json, plain, ...options }) => {
+    .action(async (file, { json, ...options }) => {
       const { showRecord } = await import('./record.ts');
-      shell.finish(await showRecord(file, options, { json, plain }, shell.world));
+      shell.finish(await showRecord(file, options, { json }, shell.world));
     });
