@@ -39,7 +39,7 @@ const CONDITIONS: Readonly<Record<string, string>> = {
   powder: 'as powder',
   'sponge-deposit': 'as a sponge deposit',
   'alkaline-battery-charging': 'on charging an alkaline battery',
-  'series-string-above-60-vdc': 'in a series string above 60 V d.c.',
+  'series-string-above-60-vdc': 'in a series string above 60 V of direct current',
   'external-short': 'on an external short',
   'drain-disposal': 'on disposal to a drain',
 };
