@@ -85,6 +85,7 @@ decimal -> integer %period %digit        {% ([number, point, token]) => build.di
          | decimal %zero                 {% ([number, token]) => build.digit(number, token) %}
 
 fraction -> integer %slash integer       {% ([above, slash, below]) => build.fraction(above, slash, below) %}
+          | %vulgar                      {% ([token]) => build.number(token) %}
 
 subNumber -> subInteger                  {% id %}
            | subDecimal                  {% id %}

@@ -4,6 +4,7 @@ import type { Unknowns } from './count.ts';
 import { UNKNOWN_SUBSCRIPTS } from './lexer.ts';
 import { LIMITS } from './limits.ts';
 import { faultAt } from './place.ts';
+import { VULGAR_CLASS, VULGAR_FRACTIONS } from './vulgar.ts';
 
 /** A term cut into its coefficient and the rest; `length` UTF-16 units of coefficient, 0 where none is written. */
 export interface Coefficient {
@@ -11,16 +12,10 @@ export interface Coefficient {
   readonly length: number;
 }
 
-const VULGAR: ReadonlyMap<string, string> = new Map(
-  '½1/2 ⅓1/3 ⅔2/3 ¼1/4 ¾3/4 ⅕1/5 ⅖2/5 ⅗3/5 ⅘4/5 ⅙1/6 ⅚5/6 ⅛1/8 ⅜3/8 ⅝5/8 ⅞7/8'
-    .split(' ')
-    .map((pair): readonly [string, string] => [pair.slice(0, 1), pair.slice(1)]),
-);
-
 const NUMBER = String.raw`\d+\s*[/⁄]\s*\d+|\d+(?:\.\d+)?|\.\d+`;
 /** `2`, `1/2`, `0.5`, `½`, `1½`, `1 1/2`, `(1/2)`, `-2`; then spaces or a times sign. */
 const NUMERIC = new RegExp(
-  String.raw`^([-−–]?)(?:(\d*)\s*([½⅓⅔¼¾⅕⅖⅗⅘⅙⅚⅛⅜⅝⅞])|(\d+)\s+(\d+\s*[/⁄]\s*\d+)|\(\s*(${NUMBER})\s*\)|(${NUMBER}))(?:\s*[*·×]\s*(?=[A-Za-z([{^])|\s*)`,
+  String.raw`^([-−–]?)(?:(\d*)\s*([${VULGAR_CLASS}])|(\d+)\s+(\d+\s*[/⁄]\s*\d+)|\(\s*(${NUMBER})\s*\)|(${NUMBER}))(?:\s*[*·×]\s*(?=[A-Za-z([{^])|\s*)`,
   'u',
 );
 
@@ -34,7 +29,7 @@ const numericValue = (match: RegExpExecArray): Rational | null => {
   const [, sign = '', wholeBefore = '', vulgar, mixedWhole, mixedPart, bracketed, simple] = match;
   const parts =
     vulgar !== undefined
-      ? [wholeBefore === '' ? '0' : wholeBefore, VULGAR.get(vulgar) ?? '0']
+      ? [wholeBefore === '' ? '0' : wholeBefore, VULGAR_FRACTIONS.get(vulgar) ?? '0']
       : mixedWhole !== undefined
         ? [mixedWhole, mixedPart ?? '0']
         : [bracketed ?? simple ?? '0'];

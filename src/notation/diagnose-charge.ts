@@ -34,7 +34,7 @@ const caretFault = (text: string, tokens: readonly Token[], caret: Token): Fault
   const place = placeOf(caret, written.at(-1));
   if (written.length === 1) return faultAt(text, 'bad-charge', place, 'a charge was expected after ^', HINT);
   if (!written.some(isSign)) return faultAt(text, 'bad-charge', place, 'this charge has no sign', HINT);
-  if (tokens[0] !== caret && /^\^\d*[+-]+$/u.test(text.slice(place.from, place.to))) return null;
+  if (tokens[0] !== caret && /^\^\d*(?:\++|-+)$/u.test(text.slice(place.from, place.to))) return null;
   return faultAt(text, 'bad-charge', place, 'this is no charge', HINT);
 };
 

@@ -1,8 +1,11 @@
 import { type Rational, ONE, isZero } from '../exact/rational.ts';
-import { type Result, all, chain, map, success } from '../report/result.ts';
+import type { Token } from 'moo';
+import { elementOf } from '../elements/table.ts';
+import { type Result, all, chain, failure, map, success } from '../report/result.ts';
 import { type Unknowns, countValue, numberValue } from './count.ts';
 import type { Atom, Formula, Group, Member, Named, Part } from './formula.ts';
-import { type Chain, type MemberSyntax, type PartSyntax, type Unit, chainItems } from './syntax.ts';
+import { faultAt, placeOf } from './place.ts';
+import { type Chain, type MemberSyntax, type NumberSyntax, type PartSyntax, type Unit, chainItems } from './syntax.ts';
 
 /** The members that a defined name stands for. */
 export type NamedMembers = ReadonlyMap<string, readonly Member[]>;
@@ -25,6 +28,21 @@ const atomOf = (symbol: string, mass: string | null, count: Rational): Atom => {
   return { kind: 'atom', symbol, massNumber: mass, count };
 };
 
+/** Mass number at least the atomic number, since protons count; the heaviest nuclides hold about 2.6 nucleons a proton. */
+const isPossibleMass = (symbol: string, mass: bigint): boolean => {
+  const protons = BigInt(elementOf(symbol)?.atomicNumber ?? 1);
+  return mass >= protons && mass <= 3n * protons + 4n;
+};
+
+const nuclideOf = (text: string, token: Token, mass: NumberSyntax | null, count: Rational): Result<Member> => {
+  if (mass === null) return success(atomOf(token.value, null, count));
+  const { n } = numberValue(mass);
+  if (isPossibleMass(token.value, n)) return success(atomOf(token.value, String(n), count));
+  const first = chainItems(mass.tokens)[0] ?? token;
+  const message = `${token.value} has no nuclide of mass number ${String(n)}`;
+  return failure(faultAt(text, 'bad-count', placeOf(first, token), message, 'a count stands behind its atom: H2O'));
+};
+
 const BRACKETS: ReadonlyMap<string, Group['bracket']> = new Map([
   ['(', '('],
   ['[', '['],
@@ -32,10 +50,7 @@ const BRACKETS: ReadonlyMap<string, Group['bracket']> = new Map([
 ]);
 
 const unitOf = (context: FormulaContext, unit: Unit, count: Rational): Result<Member> => {
-  if (unit.kind === 'element') {
-    const mass = unit.mass === null ? null : String(numberValue(unit.mass).n);
-    return success(atomOf(unit.token.value, mass, count));
-  }
+  if (unit.kind === 'element') return nuclideOf(context.text, unit.token, unit.mass, count);
   if (unit.kind === 'name') {
     const named: Named = {
       kind: 'named',

@@ -1,6 +1,7 @@
 import moo from 'moo';
 import { SPACE_CLASS } from './spaces.ts';
 import { ELEMENTS_BY_LENGTH } from './symbols.ts';
+import { VULGAR_CLASS, VULGAR_FRACTIONS } from './vulgar.ts';
 
 /** Superscript, subscript and fullwidth forms and the plain character that each stands for. */
 const PLAIN_FORMS: ReadonlyMap<string, string> = new Map(
@@ -79,6 +80,7 @@ const rulesFor = (names: readonly string[], unknowns: readonly string[]): moo.Ru
   dot: /[·•∙⋅]/u,
   adduct: /[*∗⸱・]/u,
   slash: /[/⁄∕]/u,
+  vulgar: { match: new RegExp(`[${VULGAR_CLASS}]`, 'u'), value: (text) => VULGAR_FRACTIONS.get(text) ?? text },
   arrowMark: /[↑↓]/u,
   letters: /[A-Z][a-z]*|[a-z]+/u,
   stray: { match: /[\s\S]/u, lineBreaks: true },

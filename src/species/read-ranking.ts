@@ -89,11 +89,15 @@ const isPlausibleAdduct = (reading: Reading): boolean =>
     return !isDoubtfulDot(written) || (part !== undefined && isAdductMolecule(part));
   });
 
-/** The adduct with the most plausible dots, else the reading with the fewest dots. */
+/** Where the first doubtful dot stands: in CaSO4.0.5H2O the first period is the dot, since nobody writes a count of 4.0. */
+const firstDot = (reading: Reading): number =>
+  chainItems(reading.syntax.parts).find(isDoubtfulDot)?.separator?.offset ?? 0;
+
+/** The adduct with the most plausible dots, else the reading with the fewest dots; of two, the one with the earlier dot. */
 const byPeriods = (readings: readonly Reading[]): readonly Reading[] => {
   const weight = (reading: Reading): number =>
     dotsOf(reading) === 0 ? 1 : isPlausibleAdduct(reading) ? 0 : 1 + dotsOf(reading);
-  return readings.toSorted((a, b) => weight(a) - weight(b));
+  return readings.toSorted((a, b) => weight(a) - weight(b) || firstDot(a) - firstDot(b));
 };
 
 const sortPair = (readings: readonly Reading[], isKnown: IsKnown): Ranking => {

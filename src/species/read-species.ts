@@ -15,7 +15,7 @@ import { buildSpecies } from './read-build.ts';
 import { ionsNear, isKnownIon } from './ions.ts';
 import { createMemory } from './read-cache.ts';
 import { type Ranking, type Reading, rankReadings } from './read-ranking.ts';
-import { type Species, plainSpecies, plainWithState } from './species.ts';
+import { type Species, plainSpecies } from './species.ts';
 
 /** How to read: values of unknown subscripts, names with their formulas, and whether any ambiguity is a fault. */
 export interface ReadingOptions {
@@ -60,10 +60,23 @@ const buildReadings = (text: string, options: ReadingOptions) => (parsed: readon
   );
 };
 
-/** One of each species: `C2` spelled in two ways by the grammar is one reading. */
-const distinct = (readings: readonly Reading[]): readonly Reading[] => [
-  ...new Map(readings.toReversed().map((reading) => [plainWithState(reading.species), reading])).values(),
-];
+/** The same atoms, charge and state: `[²H]` as a nuclide in its brackets, or as a group of one, is one reading. */
+const identityOf = ({ composition, charge, state }: Species): string =>
+  JSON.stringify([[...composition].map(([atom, count]) => [atom, showRational(count)]), showRational(charge), state]);
+
+const lengthOf = ({ species }: Reading): number => plainSpecies(species).length;
+
+/** One of each species, in its shortest spelling. */
+const distinct = (readings: readonly Reading[]): readonly Reading[] => {
+  if (readings.length < 2) return readings;
+  const kept = new Map<string, Reading>();
+  for (const reading of readings) {
+    const identity = identityOf(reading.species);
+    const before = kept.get(identity);
+    if (before === undefined || lengthOf(reading) < lengthOf(before)) kept.set(identity, reading);
+  }
+  return [...kept.values()];
+};
 
 const severalReadings = (text: string, species: readonly Species[]): Result<never> => {
   const readings = species.map(plainSpecies);

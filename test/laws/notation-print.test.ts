@@ -25,8 +25,13 @@ const atom: fc.Arbitrary<Atom> = fc.oneof(
   {
     weight: 1,
     arbitrary: fc
-      .record({ symbol: fc.constantFrom('H', 'O', 'C'), massNumber: fc.constantFrom('2', '13', '18'), count })
-      .map((each): Atom => ({ kind: 'atom', ...each })),
+      .record({ nuclide: fc.constantFrom(['H', '2'], ['C', '13'], ['O', '18'], ['U', '235'] as const), count })
+      .map(({ nuclide: [symbol = 'H', massNumber = '2'], count: each }): Atom => ({
+        kind: 'atom',
+        symbol,
+        massNumber,
+        count: each,
+      })),
   },
   {
     weight: 1,
@@ -64,6 +69,9 @@ const spelled: fc.Arbitrary<Spelled> = fc.record({
 
 /** Groups of I and V alone look like an oxidation number; no chemist writes (I) for iodine. */
 const isRoman = (text: string): boolean => /\((?:I{1,3}|IV|VI{0,3}|IX)\)(?![\d(₀-₉])/u.test(text);
+
+/** A group of one nuclide is printed with a raised mass number as the nuclide in its own brackets is: [²H]. */
+const isNuclideInBrackets = (text: string): boolean => /\[\[\d+[A-Z][a-z]?\]\]/u.test(text);
 
 /** A reader of the printed forms by another hand: what a browser or a page of mathematics shows, as text. */
 const textOfHtml = (html: string): string =>
@@ -105,7 +113,7 @@ describe('every printed form of a species reads back to the same spelling, with 
     fc.assert(
       fc.property(spelled, (species) => {
         const plain = printSpecies(species, 'plain');
-        fc.pre(!isRoman(plain));
+        fc.pre(!isRoman(plain) && !isNuclideInBrackets(plain));
         expect(readBack(asText[style](printSpecies(species, style)))).toBe(plain);
       }),
       { numRuns: RUNS, seed: 20261201 },
