@@ -3,7 +3,7 @@ import { answer } from '../desk/answer.ts';
 import type { Answer } from '../desk/schema/answer.ts';
 import { type Line, LONGEST_LINE, LineCutter } from './lines.ts';
 
-/** How many lines were answered and how many faulted; blank lines are not counted. */
+/** How many lines were answered and how many faulted. */
 export interface Tally {
   readonly answered: number;
   readonly faulted: number;
@@ -38,8 +38,8 @@ const answerText = (text: string): Answer => {
   }
 };
 
-/** The answer to one line of a batch, or null for a blank one. */
-export const answerLine = (line: Line): Answer | null => {
+/** The answer to one line of a batch. A blank line is no JSON object either: lines out stay in step with lines in. */
+export const answerLine = (line: Line): Answer => {
   if (line.kind === 'too-long') {
     const most = `A line may have at most ${String(LONGEST_LINE)} bytes.`;
     return lineFault('too-long', `This line is too long. ${most}`, 'Is a line end missing between two asks?');
@@ -47,11 +47,12 @@ export const answerLine = (line: Line): Answer | null => {
   if (line.kind === 'not-utf-8') {
     return lineFault('bad-ask', 'This line is not UTF-8 text.', 'Save the file as UTF-8.');
   }
-  return line.text.trim() === '' ? null : answerText(line.text);
+  if (line.text.trim() === '') return lineFault('bad-ask', 'This line is blank.', 'One ask a line, as a JSON object.');
+  return answerText(line.text);
 };
 
 /**
- * Answers asks, one JSON object a line, in order: one line out for each line in that is not blank. A line that
+ * Answers asks, one JSON object a line, in order: one line out for each line in. A line that
  * cannot be answered gives a fault and the rest goes on. Reads no further than it has written.
  */
 export const answerBatch = async ({ input, write }: BatchStreams): Promise<Tally> => {
@@ -62,7 +63,6 @@ export const answerBatch = async ({ input, write }: BatchStreams): Promise<Tally
   const answerAll = async (lines: Iterable<Line>): Promise<void> => {
     for (const line of lines) {
       const given = answerLine(line);
-      if (given === null) continue;
       if (given.ok) answered += 1;
       else faulted += 1;
       waiting += `${JSON.stringify(given)}\n`;

@@ -5,15 +5,18 @@ import { type Note, note } from '../report/note.ts';
 import { type Species, plainSpecies, plainWithState } from '../species/species.ts';
 import type { CellReaction } from './cell-reaction.ts';
 
-/** Notes on a composed cell: `media-differ`, `states-differ`, `nothing-left`. */
+/** Notes on a composed cell: `media-differ` where nothing keeps the electrodes apart, `states-differ`, `nothing-left`. */
 export const cellNotes = (cell: CellReaction): readonly Note[] => {
   const notes: Note[] = [];
-  const media = new Set([...cell.anode, ...cell.cathode].map(({ half }) => helperKeys(half.medium)));
-  if (media.size > 1 && !isZero(cell.waterFormed)) notes.push(mediaDiffer());
+  if (cell.crossing === null && mediaOf(cell).size > 1) notes.push(mediaDiffer(!isZero(cell.waterFormed)));
   notes.push(...statesThatDiffer(cell.overall));
   if (cell.overall.terms.length === 0) notes.push(nothingLeft());
   return notes;
 };
+
+/** The media that lend anything, each by its helpers. */
+const mediaOf = ({ anode, cathode }: CellReaction): ReadonlySet<string> =>
+  new Set([...anode, ...cathode].map(({ half }) => helperKeys(half.medium)).filter((keys) => keys !== ''));
 
 const helperKeys = (medium: Medium): string =>
   medium.helpers
@@ -21,11 +24,13 @@ const helperKeys = (medium: Medium): string =>
     .sort()
     .join(' ');
 
-const mediaDiffer = (): Note =>
+const mediaDiffer = (folded: boolean): Note =>
   note(
     'media-differ',
-    'the half-reactions stand in different media; their H^+ and OH^- were folded into water all the same. ' +
-      'With a separator between the electrodes they would not meet',
+    folded
+      ? 'the half-reactions stand in different media; their H^+ and OH^- were folded into water all the same. ' +
+          'With a separator between the electrodes they would not meet'
+      : 'the half-reactions stand in different media; without a separator between the electrodes they mix',
   );
 
 const nothingLeft = (): Note =>

@@ -135,10 +135,10 @@ const severalReactions = ({ unknowns, verdict }: Trial): Result<never> => {
   }
   return failure({
     code: 'several-balances',
-    message: `this half-cell allows ${String(dimension)} independent reactions`,
+    message: `this half-cell allows ${String(dimension)} independent reactions.${cutSentence(family)}`,
     hint: 'name only the oxidised and the reduced form of one couple at each electrode',
     dimension,
-    family: family.members.map((numbers) => showReaction(proved(assemble(unknowns, numbers)))),
+    family: family.members.slice(0, MOST_SHOWN).map((numbers) => showReaction(proved(assemble(unknowns, numbers)))),
     couplings: [],
   });
 };

@@ -47,9 +47,14 @@ describe('a batch', () => {
     expect(tally).toEqual({ answered: 1, faulted: 4 });
   });
 
-  it('passes over blank lines', async () => {
-    const { answers } = await run(bytes(`\n  \n${species('1')}\n\r\n\t\n${species('2')}`));
-    expect(answers).toMatchObject([{ id: '1' }, { id: '2' }]);
+  it('gives a fault line for a blank line, so that lines out stay in step with lines in', async () => {
+    const { answers } = await run(bytes(`\n${species('1')}\n\t\r\n${species('2')}\n`));
+    expect(answers).toMatchObject([
+      { ask: null, ok: false, fault: { code: 'bad-ask' } },
+      { id: '1' },
+      { ask: null, ok: false },
+      { id: '2' },
+    ]);
   });
 
   it('takes the last line without a line end, line ends of two characters and a byte-order mark', async () => {

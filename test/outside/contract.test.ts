@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { parse } from 'yaml';
 import { answer } from '../../src/desk/answer.ts';
 
-/** Asks with hand-written expectations: fixtures/contract/asks.yaml. */
+/** Asks with hand-written expectations: fixtures/contract/*.yaml. */
 interface Case {
   readonly name: string;
   readonly ask: unknown;
@@ -14,7 +14,9 @@ interface Case {
   readonly unordered?: readonly string[];
 }
 
-const cases = parse(readFileSync('fixtures/contract/asks.yaml', 'utf8')) as readonly Case[];
+const cases = ['asks', 'more-asks'].flatMap(
+  (name) => parse(readFileSync(`fixtures/contract/${name}.yaml`, 'utf8')) as readonly Case[],
+);
 
 /** The value at a dotted path of a JSON value, undefined where there is none. */
 const at = (value: unknown, path: string): unknown =>
