@@ -1,6 +1,6 @@
 #!/usr/bin/env node
 import { createReadStream } from 'node:fs';
-import { stat } from 'node:fs/promises';
+import { stat, writeFile } from 'node:fs/promises';
 import process from 'node:process';
 import { run } from './run.ts';
 import type { World } from './world.ts';
@@ -22,6 +22,7 @@ const world: World = {
   },
   input: process.stdin,
   open: (path) => createReadStream(path),
+  save: (path, text) => writeFile(path, text),
   terminal,
   errorTerminal: process.stderr.isTTY,
   sizeOf: (path) =>

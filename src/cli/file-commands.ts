@@ -1,4 +1,4 @@
-import { Command, type CommandUnknownOpts } from '@commander-js/extra-typings';
+import { Command, Option, type CommandUnknownOpts } from '@commander-js/extra-typings';
 import { jsonOption, plainOption } from './options.ts';
 import { type Shell, examples } from './shell.ts';
 import { bytesOf } from './world.ts';
@@ -20,6 +20,10 @@ export const batchCommand = (shell: Shell): CommandUnknownOpts =>
       await answerBatch({ input: bytesOf(shell.world, file), write: shell.world.out });
     });
 
+const formatOption = new Option('--format <FORMAT>', 'how the answers are shown')
+  .choices(['text', 'markdown', 'csv', 'json', 'html'] as const)
+  .conflicts('json');
+
 /** `sheet`: the tanks of a plant and what their runs make. */
 export const sheetCommand = (shell: Shell): CommandUnknownOpts =>
   new Command('sheet')
@@ -27,7 +31,16 @@ export const sheetCommand = (shell: Shell): CommandUnknownOpts =>
     .argument('<file>', 'the sheet; - for standard input')
     .addOption(plainOption)
     .addOption(jsonOption)
-    .addHelpText('after', examples('couplet sheet fixtures/tern-quay.yaml', 'couplet sheet plant.yaml --json'))
+    .addOption(formatOption)
+    .option('--out <FILE>', 'write to this file instead of standard output')
+    .addHelpText(
+      'after',
+      examples(
+        'couplet sheet fixtures/tern-quay.yaml',
+        'couplet sheet plant.yaml --format html --out plant.html',
+        'couplet sheet plant.yaml --json',
+      ),
+    )
     .action(async (file, options) => {
       const { showSheet } = await import('./sheet.ts');
       shell.finish(await showSheet(file, options, shell.world));

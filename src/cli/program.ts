@@ -6,6 +6,7 @@ import { batchCommand, sheetCommand } from './file-commands.ts';
 import { cellCommand } from './cell-command.ts';
 import { equationCommand, speciesCommand } from './reading-commands.ts';
 import { recordCommand } from './record-command.ts';
+import { schemaCommand } from './schema-command.ts';
 import { type Shell, examples } from './shell.ts';
 
 const VERSION = '0.1.0';
@@ -57,6 +58,7 @@ export const program = (shell: Shell): CommandUnknownOpts => {
     sheetCommand(shell),
     recordCommand(shell),
     batchCommand(shell),
+    schemaCommand(shell),
   ];
   for (const command of commands) root.addCommand(bound(command.helpOption('--help', 'show this help'), shell));
   return root.helpCommand(false);

@@ -8,6 +8,8 @@ export interface World {
   readonly input: AsyncIterable<Uint8Array>;
   /** The bytes of a file; fails as Node does where it cannot be read. */
   readonly open: (path: string) => AsyncIterable<Uint8Array>;
+  /** Writes a file, or writes over it; fails as Node does where it cannot be written. */
+  readonly save?: (path: string, text: string) => Promise<void>;
   /** True where standard output is a terminal: it gets Unicode, a pipe gets plain text. */
   readonly terminal: boolean;
   /** True where colour is wanted: a terminal, and NO_COLOR not set. */
@@ -27,7 +29,8 @@ export class UnreadableFile extends Error {}
 const WHY: Readonly<Record<string, string>> = {
   ENOENT: 'there is no such file',
   EISDIR: 'it is a folder',
-  EACCES: 'reading it is not permitted',
+  EACCES: 'it is not permitted',
+  ENOTDIR: 'there is no such folder',
 };
 
 const codeOf = (problem: unknown): string =>
@@ -54,5 +57,17 @@ export const textOf = async (world: World, path: string): Promise<string> => {
   } catch (problem) {
     if (problem instanceof TypeError) throw new UnreadableFile(`${path} cannot be read: it is not UTF-8 text.`);
     throw problem;
+  }
+};
+
+/** Writes a text to `path`. Throws `UnreadableFile` where it cannot be written. */
+export const saveText = async ({ save }: World, path: string, text: string): Promise<void> => {
+  if (save === undefined) throw new UnreadableFile(`${path} cannot be written here.`);
+  try {
+    await save(path, text);
+  } catch (problem) {
+    const code = codeOf(problem);
+    if (code === '') throw problem;
+    throw new UnreadableFile(`${path} cannot be written: ${WHY[code] ?? code}.`);
   }
 };

@@ -141,8 +141,9 @@ export interface GasRate {
 /** A caution with the tanks that call for it. */
 export interface SheetCaution extends ShownCaution {
   readonly tanks: readonly string[];
-  /** What kills or explodes at once: shown before everything else. */
-  readonly grave: boolean;
+  /** The text without its condition, and the condition: "in a closed vessel"; null where it holds as it stands. */
+  readonly says: string;
+  readonly when: string | null;
 }
 
 /** One tank: its cell reaction, the yield of a stated charge, its runs and goals; or its fault. */

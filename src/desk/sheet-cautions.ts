@@ -1,17 +1,17 @@
-import { CAUTION_ROWS } from '../caution/table.ts';
 import type { ShownCaution } from './schema/shape.ts';
 import type { SheetCaution } from './sheet-answer.ts';
 
-const GRAVE = new Set(
-  CAUTION_ROWS.filter(({ atOnce }) => atOnce === true).map(({ basis, text }) => `${text}|${basis}`),
-);
-
 /** "... Applies in an undivided cell." names what the sheet leaves open; it stands behind the row's own text. */
-const CONDITION = / Applies [^.]+\.$/;
+const CONDITION = / Applies (?:(?! Applies ).)+$/;
+const APPLIES = ' Applies ';
 
-/** True for what kills or explodes at once, whether or not a condition is left open. */
-export const isGrave = ({ text, basis }: ShownCaution): boolean =>
-  GRAVE.has(`${text}|${basis}`) || GRAVE.has(`${text.replace(CONDITION, '')}|${basis}`);
+/** What the row says, and under which condition: "in an undivided cell"; null where it holds as it stands. */
+const splitCaution = ({ text, conditional }: ShownCaution): Pick<SheetCaution, 'says' | 'when'> => {
+  const at = conditional === true ? text.search(CONDITION) : -1;
+  if (at < 0) return { says: text, when: null };
+  // The full stop of the sentence goes, that of an abbreviation stays.
+  return { says: text.slice(0, at), when: text.slice(at + APPLIES.length).replace(/(?<!\.\w)\.$/, '') };
+};
 
 /** The cautions of all tanks, each once with its tanks, the gravest first; the order of the tanks' own lists stays. */
 export const gatherCautions = (
@@ -22,10 +22,15 @@ export const gatherCautions = (
     for (const caution of cautions) {
       const before = gathered.get(caution.text);
       const because = [...new Set([...(before?.because ?? []), ...caution.because])];
-      const tanks = [...(before?.tanks ?? []), name];
-      gathered.set(caution.text, { ...caution, because, tanks, grave: isGrave(caution) });
+      gathered.set(caution.text, {
+        ...caution,
+        because,
+        tanks: [...(before?.tanks ?? []), name],
+        ...splitCaution(caution),
+      });
     }
   }
-  const weight = ({ grave, text }: SheetCaution): number => (grave ? 0 : 2) + (CONDITION.test(text) ? 1 : 0);
+  const weight = ({ grave, conditional }: SheetCaution): number =>
+    (grave === true ? 0 : 2) + (conditional === true ? 1 : 0);
   return [...gathered.values()].sort((one, other) => weight(one) - weight(other));
 };

@@ -21,13 +21,16 @@ export interface FoundEfficiency {
   readonly influences: readonly Influence[];
 }
 
-const influenceOf = ({ input, sensitivity, uncertainty }: BudgetLine): Influence => ({
-  input: input === 'mass' ? 'weighed' : input,
+/** What the sheet calls the inputs of the ask: a run weighs its mass, a record gives its charge. */
+export type InputNames = Readonly<Record<string, string>>;
+
+const influenceOf = ({ input, sensitivity, uncertainty }: BudgetLine, names: InputNames): Influence => ({
+  input: names[input] ?? input,
   shift: sensitivity * uncertainty,
 });
 
 /** The efficiency that an amounts ask with a weighed mass finds, with what every input contributes; null without one. */
-export const foundEfficiency = (ask: object): FoundEfficiency | null => {
+export const foundEfficiency = (ask: object, names: InputNames): FoundEfficiency | null => {
   const found = chain(readAsk(ask), (valid) =>
     chain(readSettings(valid), (options) => {
       if (valid.ask !== 'amounts') throw new RangeError('an amounts ask was read as something else');
@@ -43,7 +46,11 @@ export const foundEfficiency = (ask: object): FoundEfficiency | null => {
   const { efficiency, mass } = quantities;
   if (efficiency === undefined || mass === undefined || efficiency.value <= 0) return null;
   const value = efficiency.value / 100;
-  return { value, possible: mass.value / value, influences: (budgets?.['efficiency'] ?? []).map(influenceOf) };
+  return {
+    value,
+    possible: mass.value / value,
+    influences: (budgets?.['efficiency'] ?? []).map((line) => influenceOf(line, names)),
+  };
 };
 
 /** One standard uncertainty of a found efficiency, as a fraction. */
@@ -66,11 +73,12 @@ const budgetOf = (influences: readonly Influence[]): readonly BudgetShare[] => {
     .map(([input, variance]) => ({ input, contribution: Math.sqrt(variance) * 100, part: variance / total }));
 };
 
-/** A found efficiency in %, with its uncertainty and budget. */
+/** A found efficiency in %, with its uncertainty and budget where the sheet states what enters it. */
 export const showEfficiency = (found: FoundEfficiency): Efficiency => {
-  const uncertainty = uncertaintyOfFound(found) * 100;
+  const efficiency = { value: found.value * 100, unit: '%' };
+  if (!isStated(found)) return { efficiency, budget: [] };
   return {
-    efficiency: { value: found.value * 100, unit: '%', ...(uncertainty > 0 ? { uncertainty } : {}) },
+    efficiency: { ...efficiency, uncertainty: uncertaintyOfFound(found) * 100 },
     budget: budgetOf(found.influences),
   };
 };

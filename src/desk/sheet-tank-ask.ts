@@ -15,7 +15,7 @@ export const cellOf = ({ anode, cathode, medium, separator }: SheetTank): object
 });
 
 /** The units in which a sheet answers: those of a works, not of a bench. */
-export const WANTED = { charge: 'A h', mass: 'kg', time: 'h' } as const;
+const WANTED = { charge: 'A h', mass: 'kg' } as const;
 
 /** What the cell of a tank makes of what is given, as an ask of the contract. */
 export const tankAsk = (head: SheetHead, tank: SheetTank, species: string, given: object): object => ({

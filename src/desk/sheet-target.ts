@@ -29,7 +29,9 @@ interface Plan {
 
 const quantitiesIn = (target: SheetTarget, without: ReadonlySet<string>): Given =>
   Object.fromEntries(
-    Object.entries(target).filter(([name, value]) => value !== undefined && !BESIDES.has(name) && !without.has(name)),
+    Object.entries(target).flatMap(([name, value]) =>
+      value === undefined || BESIDES.has(name) || without.has(name) ? [] : [[name, value] as const],
+    ),
   );
 
 const amountsFor = (ask: object): Result<AmountsReply> => {
@@ -55,37 +57,58 @@ const enoughFor = (plan: Plan, ask: AskOfTank): Result<AmountsReply | null> => {
   return amountsFor(ask(plan.species, { ...quantitiesIn(plan.target, FLOWS), ...plan.given, ...time }));
 };
 
-const notEnough = (missing: string, hint: string): Fault => ({
+const NOT_ENOUGH: Fault = {
   code: 'not-enough-given',
   field: 'goal',
   message: 'This goal cannot be judged: neither a current nor a start and an end are stated.',
-  missing: [missing],
-  hint,
+  missing: ['current'],
+  hint: 'Give a current, or a start and "by" a time.',
+};
+
+const MINUTE = 60;
+const HOUR = 3600;
+/** Minutes that are rounding and no lateness. */
+const ROUNDING = 1e-6;
+
+const inHours = ({ value, uncertainty }: Quantity): Quantity => ({
+  value: value / HOUR,
+  unit: 'h',
+  ...(uncertainty === undefined ? {} : { uncertainty: uncertainty / HOUR }),
 });
 
-const HOUR = 60;
+type Timing = Pick<WholeTarget, 'needed' | 'ready' | 'latest' | 'reached' | 'spare'>;
+
+const UNTIMED: Timing = { needed: null, ready: null, latest: null, reached: null, spare: null };
+
+/** When the stated current is done, and how that stands to the end. A start is rounded down to the minute, an end up. */
+const timingOf = ({ goal, start, window }: Plan, time: Quantity | undefined): Timing => {
+  if (time === undefined) return UNTIMED;
+  const minutes = time.value / MINUTE;
+  const spare = window === null ? null : window - minutes;
+  return {
+    needed: inHours(time),
+    ready: start === null ? null : clockText(start, minutes),
+    latest: goal.by === null || start !== null ? null : clockText(goal.by.clock, -Math.ceil(minutes)),
+    reached: spare === null ? null : spare >= -ROUNDING,
+    spare: spare === null ? null : inHours({ value: spare * MINUTE, unit: 's' }),
+  };
+};
+
+const wasAssumed = (reply: AmountsReply | null): boolean =>
+  reply?.notes.some(({ code }) => code === 'efficiency-assumed') ?? false;
 
 const shown = (plan: Plan, needed: AmountsReply | null, enough: AmountsReply | null): WholeTarget => {
-  const { target, goal, start, species, window } = plan;
-  const time = needed?.answer.quantities['time'] ?? null;
-  const minutes = time === null ? null : time.value * HOUR;
-  const spare = minutes === null || window === null ? null : window - minutes;
-  const later = goal.by === null || minutes === null || start !== null ? null : clockText(goal.by.clock, -minutes);
-  const hours = (value: number): Quantity => ({ value: value / HOUR, unit: 'h' });
+  const { target, goal, species } = plan;
   return {
     name: target.label ?? target.goal,
     species,
     goal: { quantity: goal.quantity, text: goal.text },
     start: target.start ?? null,
     by: goal.by?.text ?? null,
-    needed: time,
+    ...timingOf(plan, needed?.answer.quantities['time']),
     current: needed?.answer.quantities['current'] ?? null,
-    ready: start === null || minutes === null ? null : clockText(start, minutes),
-    latest: later,
-    reached: spare === null ? null : spare >= -1e-6,
-    spare: spare === null ? null : hours(spare),
     enough: enough?.answer.quantities['current'] ?? null,
-    assumed: [...(needed?.notes ?? []), ...(enough?.notes ?? [])].some(({ code }) => code === 'efficiency-assumed'),
+    assumed: wasAssumed(needed) || wasAssumed(enough),
   };
 };
 
@@ -110,9 +133,7 @@ export const answerTarget = (target: SheetTarget, product: string, ask: AskOfTan
   chain(planOf(target, product), (plan) =>
     chain(neededFor(plan, ask), (needed) =>
       chain(enoughFor(plan, ask), (enough) =>
-        needed === null && enough === null
-          ? failure(notEnough('current', 'Give a current, or a start and "by" a time.'))
-          : success(shown(plan, needed, enough)),
+        needed === null && enough === null ? failure(NOT_ENOUGH) : success(shown(plan, needed, enough)),
       ),
     ),
   );

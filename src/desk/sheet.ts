@@ -1,159 +1,73 @@
 import type { Fault } from '../report/fault.ts';
-import { type Result, chain, failure, success } from '../report/result.ts';
+import { type Result, chain, success } from '../report/result.ts';
 import { answer } from './answer.ts';
-import { fieldsOf } from './read-ask.ts';
-import { foremost, issueFault } from './issue.ts';
-import type { Answer } from './schema/answer.ts';
-import { type SheetHead, type SheetRun, type SheetTank, runSchema, sheetSchema, tankSchema } from './schema/sheet.ts';
+import { type SheetHead, type SheetTank, sheetSchema, tankSchema } from './schema/sheet.ts';
+import type { CellReply, SheetAnswer, SheetFault, TankAnswer, WholeTank } from './sheet-answer.ts';
+import { gatherCautions } from './sheet-cautions.ts';
+import { currentUseOf } from './sheet-current-use.ts';
+import { gasRatesOf } from './sheet-gas.ts';
+import { type Path, checked, nameOf } from './sheet-part.ts';
+import { productOfHalf, productsOf } from './sheet-products.ts';
+import { type NamedRecord, type Records, recordsNamed } from './sheet-record.ts';
+import { answerRuns } from './sheet-run.ts';
+import { cellOf, commonOf } from './sheet-tank-ask.ts';
+import { tankCautions } from './sheet-tank-cautions.ts';
+import { type TankContext, answerTargets, yieldOf } from './sheet-tank-parts.ts';
 import { type SheetText, readSheetText } from './sheet-text.ts';
-import type * as z from 'zod';
-
-type CellReply = Extract<Answer, { readonly ok: true; readonly ask: 'cell' }>;
-type AmountsReply = Extract<Answer, { readonly ok: true; readonly ask: 'amounts' }>;
-
-/** A part of a sheet that could not be answered; the fault is placed in the sheet's text. */
-export interface SheetFault {
-  readonly name: string;
-  readonly fault: Fault;
-}
-
-/** One run: what it makes of every species, or its fault. */
-export type RunAnswer =
-  SheetFault | { readonly name: string; readonly note: string | null; readonly amounts: AmountsReply };
-
-/** One tank: its cell reaction, the yield of a stated charge, and its runs; or its fault. */
-export type TankAnswer =
-  | SheetFault
-  | {
-      readonly name: string;
-      readonly purpose: string | null;
-      readonly product: string;
-      readonly cell: CellReply;
-      /** What 1 kA h makes: electrons per mole of each species. */
-      readonly yield: AmountsReply | SheetFault;
-      readonly runs: readonly RunAnswer[];
-    };
-
-/** A plant: its tanks in the order of the sheet. */
-export interface SheetAnswer {
-  readonly plant: string;
-  readonly about: string | null;
-  /** True where the sheet says that its figures are invented. */
-  readonly invented: boolean;
-  readonly tanks: readonly TankAnswer[];
-}
-
-type Path = readonly PropertyKey[];
-
-/** A part of the sheet against its schema; the fault is placed in the sheet. */
-const checked = <T>(
-  sheet: SheetText,
-  schema: z.ZodType<T> & { readonly shape: object },
-  value: unknown,
-  path: Path,
-  where: string,
-): Result<T> => {
-  const parsed = schema.safeParse(value);
-  if (parsed.success) return success(parsed.data);
-  const fault = issueFault(foremost(parsed.error.issues), Object.keys(schema.shape), where);
-  return failure(sheet.place(fault, path));
-};
-
-/** The name of a tank or run that may be broken, for its heading. */
-const nameOf = (value: unknown, key: 'name' | 'label', fallback: string): string => {
-  const name = fieldsOf(value)?.[key];
-  return typeof name === 'string' && name !== '' ? name : fallback;
-};
-
-const common = ({ where, define }: SheetHead): object => ({
-  ...(where === undefined ? {} : { where }),
-  ...(define === undefined ? {} : { define }),
-});
-
-const cellOf = ({ anode, cathode, medium, separator }: SheetTank): object => ({
-  anode,
-  cathode,
-  ...(medium === undefined ? {} : { medium }),
-  ...(separator === undefined ? {} : { separator: separator === 'true' || separator === 'yes' }),
-});
+import { type CountedRun, totalsOf } from './sheet-totals.ts';
 
 /** What the tank is run for: as stated, else the first product of the first cathode reaction. */
-const productOf = ({ product }: SheetTank, { answer: cell }: CellReply): string => {
-  const terms = cell.cathode[0]?.reaction.terms ?? [];
-  return product ?? terms.find((term) => !term.nu.startsWith('-') && term.species !== 'e^-')?.species ?? '';
+const productFor = ({ product }: SheetTank, { answer: cell }: CellReply): string => {
+  const [first] = cell.cathode;
+  return product ?? (first === undefined ? '' : productOfHalf(first.reaction));
 };
 
-/** What belongs to a run and not to the law. */
-const BESIDES = new Set(['label', 'product', 'note', 'weighed']);
-
-const givenOf = (run: SheetRun): object => {
-  const quantities = Object.entries(run).filter(([name]) => !BESIDES.has(name));
-  return { ...Object.fromEntries(quantities), ...(run.weighed === undefined ? {} : { mass: run.weighed }) };
+const runsOf = (tank: TankAnswer): readonly CountedRun[] => {
+  if ('fault' in tank) return [];
+  const products = productsOf(tank.cell.answer.overall, tank.product);
+  return tank.runs.flatMap((run) => ('fault' in run ? [] : [{ run, products }]));
 };
 
-/** Fields of the ask as the sheet calls them: `given.current` is `current`, `given.mass` is `weighed`. */
-const sheetField = (fault: Fault): Fault => {
-  const field = (fault.field ?? '')
-    .replace(/^given\.mass$/, 'weighed')
-    .replace(/^given\.?/, '')
-    .replace(/^species$/, 'product');
-  return { ...fault, field };
+/** The gases of a cell as its reactions write them: `O2(g)`. */
+const gasesIn = ({ answer: cell }: CellReply): ReadonlySet<string> =>
+  new Set(cell.overall.terms.filter(({ state }) => state === 'g').map(({ species }) => species));
+
+/** cell -> runs and goals -> what they come to together */
+const wholeTank = (context: TankContext, cell: CellReply, records: Records): Result<WholeTank> => {
+  const { tank, product } = context;
+  const { runs, weighed } = answerRuns(context, records);
+  const answered = runs.flatMap((run) => ('fault' in run ? [] : [run]));
+  const products = productsOf(cell.answer.overall, product);
+  const gas = gasRatesOf(answered, products, gasesIn(cell));
+  return chain(tankCautions(context, gas.length > 0), (cautions) =>
+    success({
+      name: tank.name,
+      purpose: tank.purpose ?? null,
+      product,
+      present: tank.present ?? [],
+      cautions,
+      cell,
+      yield: yieldOf(context),
+      runs,
+      targets: answerTargets(context),
+      currentUse: currentUseOf(cell, product, answered),
+      weighed,
+      gas,
+      totals: totalsOf(answered.map((run) => ({ run, products }))),
+    }),
+  );
 };
 
-const amountsOf = (head: SheetHead, tank: SheetTank, species: string, given: object): Answer =>
-  answer({
-    ask: 'amounts',
-    cell: cellOf(tank),
-    species,
-    given,
-    want: { charge: 'A h', mass: 'kg' },
-    ...common(head),
-  });
-
-const answerRun = (
-  sheet: SheetText,
-  head: SheetHead,
-  tank: SheetTank,
-  product: string,
-  value: unknown,
-  path: Path,
-): RunAnswer => {
-  const name = nameOf(value, 'label', `run ${String(Number(path.at(-1)) + 1)}`);
-  const run = checked(sheet, runSchema, value, path, 'a run');
-  if (!run.ok) return { name, fault: run.fault };
-  const given = amountsOf(head, tank, run.value.product ?? product, givenOf(run.value));
-  if (!given.ok) return { name, fault: sheet.place(sheetField(given.fault), path) };
-  if (given.ask !== 'amounts') throw new RangeError('amounts were answered with something else');
-  return { name, note: run.value.note ?? null, amounts: given };
-};
-
-const yieldOf = (
-  sheet: SheetText,
-  head: SheetHead,
-  tank: SheetTank,
-  product: string,
-  path: Path,
-): AmountsReply | SheetFault => {
-  const given = amountsOf(head, tank, product, { charge: '1 kA h' });
-  if (given.ok && given.ask === 'amounts') return given;
-  if (given.ok) throw new RangeError('amounts were answered with something else');
-  return { name: tank.name, fault: sheet.place(sheetField(given.fault), path) };
-};
-
-const answerTank = (sheet: SheetText, head: SheetHead, value: unknown, at: number): TankAnswer => {
-  const path = ['cells', at];
-  const name = nameOf(value, 'name', `tank ${String(at + 1)}`);
+const answerTank = (sheet: SheetText, head: SheetHead, value: unknown, path: Path, records: Records): TankAnswer => {
+  const name = nameOf(value, 'name', `tank ${String(Number(path.at(-1)) + 1)}`);
   const tank = checked(sheet, tankSchema, value, path, 'a tank');
   if (!tank.ok) return { name, fault: tank.fault };
-  const cell = answer({ ask: 'cell', ...cellOf(tank.value), ...common(head) });
+  const cell = answer({ ask: 'cell', ...cellOf(tank.value), ...commonOf(head) });
   if (!cell.ok) return { name, fault: sheet.place(cell.fault, path) };
   if (cell.ask !== 'cell') throw new RangeError('a cell was answered with something else');
-  const product = productOf(tank.value, cell);
-  const runs = (tank.value.runs ?? []).map((run, index) =>
-    answerRun(sheet, head, tank.value, product, run, [...path, 'runs', index]),
-  );
-  const made = yieldOf(sheet, head, tank.value, product, path);
-  return { name, purpose: tank.value.purpose ?? null, product, cell, yield: made, runs };
+  const context = { sheet, head, tank: tank.value, product: productFor(tank.value, cell), path };
+  const whole = wholeTank(context, cell, records);
+  return whole.ok ? whole.value : { name, fault: sheet.place(whole.fault, path) };
 };
 
 /** A tank whose name another has already is not answered: nobody could tell which is meant. */
@@ -166,18 +80,40 @@ const repeatedName = (sheet: SheetText, cells: readonly unknown[], at: number): 
   return { name, fault: sheet.place(fault, ['cells', at]) };
 };
 
-const answerHead = (sheet: SheetText, head: SheetHead): SheetAnswer => ({
-  plant: head.plant,
-  about: head.about ?? null,
-  invented: head.figures === 'invented',
-  tanks: head.cells.map((value, at) => repeatedName(sheet, head.cells, at) ?? answerTank(sheet, head, value, at)),
-});
-
-/**
- * The answers to a sheet: every tank by itself, so that a fault in one does not lose the others.
- * Faults, of the whole sheet only: `too-long`, and `bad-ask` for YAML or a head that cannot be read.
- */
-export const answerSheet = (text: string): Result<SheetAnswer> =>
-  chain(readSheetText(text), (sheet) =>
-    chain(checked(sheet, sheetSchema, sheet.value, [], 'a sheet'), (head) => success(answerHead(sheet, head))),
+const answerHead = (sheet: SheetText, head: SheetHead, records: Records): SheetAnswer => {
+  const tanks = head.cells.map(
+    (value, at) => repeatedName(sheet, head.cells, at) ?? answerTank(sheet, head, value, ['cells', at], records),
   );
+  return {
+    plant: head.plant,
+    about: head.about ?? null,
+    invented: head.figures === 'invented',
+    cautions: gatherCautions(tanks.flatMap((tank) => ('fault' in tank ? [] : [tank]))),
+    totals: totalsOf(tanks.flatMap(runsOf)),
+    tanks,
+  };
+};
+
+/** A sheet whose YAML and head are read; its tanks are not. */
+export interface ReadSheet {
+  readonly sheet: SheetText;
+  readonly head: SheetHead;
+  /** What the shell reads before the tanks are answered. */
+  readonly records: readonly NamedRecord[];
+}
+
+/** Reads a sheet and says which records it names. Faults: `too-long`, and `bad-ask` for YAML or a head that cannot be read. */
+export const readSheet = (text: string): Result<ReadSheet> =>
+  chain(readSheetText(text), (sheet) =>
+    chain(checked(sheet, sheetSchema, sheet.value, [], 'a sheet'), (head) =>
+      success({ sheet, head, records: recordsNamed(sheet) }),
+    ),
+  );
+
+/** The answers to a sheet that was read, with its records: every tank by itself, so that a fault in one does not lose the others. */
+export const answerReadSheet = ({ sheet, head }: ReadSheet, records: Records): SheetAnswer =>
+  answerHead(sheet, head, records);
+
+/** The answers to a sheet that names no records; runs that name one are at fault. Faults: those of `readSheet`. */
+export const answerSheet = (text: string): Result<SheetAnswer> =>
+  chain(readSheet(text), (read) => success(answerReadSheet(read, new Map())));

@@ -34,26 +34,3 @@ export const cautionLines = (cautions: readonly ShownCaution[], look: Look): rea
     ...hanging('', ABSENCE, look.paint.faint),
   ];
 };
-
-/** Cautions of several parts, each once with the names of the parts that call for it. */
-export const gatheredCautions = (
-  parts: readonly { readonly name: string; readonly cautions: readonly ShownCaution[] }[],
-  look: Look,
-): readonly (readonly string[])[] => {
-  // Each part brings its gravest first; so does the whole.
-  const all = parts.flatMap(({ cautions }) => cautions.map((caution, rank) => ({ caution, rank })));
-  const distinct = all
-    .toSorted((one, other) => one.rank - other.rank)
-    .map(({ caution }) => caution)
-    .filter((one, at, list) => list.findIndex((other) => other.text === one.text) === at);
-  const namesOf = (caution: ShownCaution): string =>
-    parts
-      .filter(({ cautions }) => cautions.some((one) => one.text === caution.text))
-      .map(({ name }) => name)
-      .join(', ');
-  const blocks = distinct.map((caution) => [
-    look.paint.strong(namesOf(caution)),
-    ...hanging('', cautionText(caution), isGrave(caution) ? look.paint.bad : asIs).map((line) => line.trim()),
-  ]);
-  return distinct.length === 0 ? [] : [...blocks, [look.paint.faint(ABSENCE)]];
-};

@@ -1,32 +1,33 @@
-import type { AmountsAnswerShown, CellAnswer } from '../desk/schema/answer.ts';
-import type { Quantity } from '../desk/schema/shape.ts';
-import type { RunAnswer, SheetAnswer, TankAnswer } from '../desk/sheet.ts';
-import { hanging, labelled, page } from './block.ts';
-import { type Cell, columns } from './columns.ts';
-import { figureOf } from './figure.ts';
+import { ABSENCE } from '../caution/cautions.ts';
+import type { CellAnswer } from '../desk/schema/answer.ts';
+import type { SheetAnswer, SheetCaution, WholeTank } from '../desk/sheet-answer.ts';
+import { productsOf } from '../desk/sheet-products.ts';
+import { hanging, labelled, page, wrapped } from './block.ts';
+import { type Cell, columns, indented } from './columns.ts';
 import type { Look } from './look.ts';
 import { halfRows } from './reactions.ts';
-import { gatheredCautions, noteLines } from './remarks.ts';
+import { graveOf, othersOf } from './sheet-cautions.ts';
+import { tankNotes } from './sheet-notes.ts';
+import { runTable, standsOut } from './sheet-table.ts';
+import {
+  GAS_BASIS,
+  type Writing,
+  fourUnits,
+  gasSentence,
+  recordSentence,
+  targetSentence,
+  totalRows,
+  weighedSentence,
+} from './sheet-words.ts';
 import { reactionText, speciesText } from './spelling.ts';
+import { printable } from '../report/excerpt.ts';
 
-type Whole = Exclude<TankAnswer, { readonly fault: unknown }>;
-type WholeRun = Exclude<RunAnswer, { readonly fault: unknown }>;
-
-/** What the medium lends is made and used everywhere; nobody runs a tank for it. */
-const LENT = new Set(['H2O', 'H^+', 'OH^-', 'e^-']);
-
-/** What the cell makes, the tank's product first. */
-const productsOf = ({ cell, product }: Whole): readonly string[] => {
-  const made = cell.answer.overall.terms
-    .filter((term) => !term.nu.startsWith('-') && !LENT.has(term.species))
-    .map((term) => term.species);
-  const first = made.filter((species) => product.startsWith(species));
-  return [...new Set([...first, ...made])];
-};
-
-/** The quantities of one species, whether it is the one asked or stands alongside. */
-const quantitiesOf = (amounts: AmountsAnswerShown, species: string): Readonly<Record<string, Quantity>> =>
-  amounts.alongside[species] ?? amounts.quantities;
+/** Names of the sheet cannot move the cursor; what is doubtful is painted by the line, so that lines can be broken. */
+const writingFor = (look: Look): Writing => ({
+  text: printable,
+  species: (plain) => speciesText(plain, look),
+  alarm: (written) => written.toUpperCase(),
+});
 
 const reactionLines = (cell: CellAnswer, look: Look): readonly string[] =>
   columns(
@@ -42,98 +43,126 @@ const reactionLines = (cell: CellAnswer, look: Look): readonly string[] =>
     ['left', 'right', 'left'],
   );
 
-const perMole = (tank: Whole, look: Look): string => {
-  if ('fault' in tank.yield) return '';
-  const { electronsPerMole } = tank.yield.answer;
-  return productsOf(tank)
-    .flatMap((species) => {
-      const electrons = electronsPerMole[species];
-      return electrons === undefined ? [] : [`${electrons} per ${speciesText(species, look)}`];
-    })
-    .join(',  ');
-};
-
-const SHOWN = ['mass', 'volume'] as const;
-
-interface Column {
-  readonly species: string;
-  readonly name: (typeof SHOWN)[number];
-  readonly unit: string;
-}
-
-const columnsOf = (tank: Whole, runs: readonly WholeRun[]): readonly Column[] =>
-  productsOf(tank).flatMap((species) =>
-    SHOWN.flatMap((name) => {
-      const found = runs.map((run) => quantitiesOf(run.amounts.answer, species)[name]).find((one) => one !== undefined);
-      return found === undefined ? [] : [{ species, name, unit: found.unit }];
-    }),
+const electronLines = (tank: WholeTank, look: Look): readonly string[] => {
+  const { overall, electrons } = tank.cell.answer;
+  const perMole = 'fault' in tank.yield ? {} : tank.yield.answer.electronsPerMole;
+  const told = productsOf(overall, tank.product).flatMap((species) =>
+    perMole[species] === undefined ? [] : [`${perMole[species]} per mole of ${speciesText(species, look)}`],
   );
-
-const four = (quantity: Quantity | undefined): string =>
-  quantity === undefined ? '' : figureOf({ value: Number(quantity.value.toPrecision(4)), unit: quantity.unit });
-
-const runRow = (run: WholeRun, wanted: readonly Column[]): readonly string[] => {
-  const { answer } = run.amounts;
-  const { charge, efficiency } = answer.quantities;
-  return [
-    run.name,
-    four(charge),
-    four(efficiency),
-    ...wanted.map(({ species, name }) => four(quantitiesOf(answer, species)[name])),
-  ];
+  const [first, ...rest] = told;
+  const each = first === undefined ? '' : `   ${[first, ...rest.map((one) => one.replace(' mole of', ''))].join(', ')}`;
+  return labelled([['electrons', `${electrons}${each}`]], look);
 };
 
 /** The runs of a tank: charge, efficiency, and what each makes of every product. */
-const runLines = (tank: Whole, look: Look): readonly string[] => {
-  const runs = tank.runs.filter((run): run is WholeRun => !('fault' in run));
-  if (runs.length === 0) return [];
-  const wanted = columnsOf(tank, runs);
+const runLines = (tank: WholeTank, look: Look): readonly string[] => {
+  const table = runTable(tank);
+  if (table === null) return [];
   const faint = (text: string): Cell => ({ text, paint: look.paint.faint });
-  const head = ['run', 'charge', 'efficiency', ...wanted.map(({ species }) => speciesText(species, look))].map(faint);
-  const charge = runs.map((run) => run.amounts.answer.quantities['charge']).find((one) => one !== undefined);
-  const units = ['', charge?.unit ?? '', '%', ...wanted.map(({ unit }) => unit)].map(faint);
-  const rows = runs.map((run) => runRow(run, wanted));
-  return columns([head, units, ...rows], ['left', ...head.map(() => 'right' as const)]);
+  const names = table.columns.map(({ heading, isSpecies }) => (isSpecies ? speciesText(heading, look) : heading));
+  const head = ['run', ...names].map(faint);
+  const units = ['', ...table.columns.map(({ unit }) => unit)].map(faint);
+  const rows = table.rows.map(({ run, cells }) => {
+    const name = printable(run.name);
+    return [standsOut(run) === null ? name : { text: `! ${name}`, paint: look.paint.bad }, ...cells];
+  });
+  return columns([head, units, ...rows], ['left', ...names.map(() => 'right' as const)]);
 };
 
-/** Water and its ions are what is summed over reactions; they stand in no column here. */
-const notesOf = (tank: Whole): Whole['cell']['notes'] => {
-  const runs = tank.runs.flatMap((run) => ('fault' in run ? [] : run.amounts.notes));
-  const all = [...tank.cell.notes, ...runs].filter(({ code }) => code !== 'summed');
-  return all.filter((one, at) => all.findIndex((other) => other.message === one.message) === at);
+const asIs = (text: string): string => text;
+
+/** What came of the runs and goals, one line each behind its label. */
+const outcomeLines = (tank: WholeTank, look: Look): readonly string[] => {
+  const write = writingFor(look);
+  const runs = tank.runs.flatMap((run) => ('fault' in run ? [] : [run]));
+  const weighed = tank.weighed === null ? [] : hanging('weighed', weighedSentence(tank.weighed, write), asIs);
+  const out = runs.flatMap((run) => {
+    const why = standsOut(run);
+    return why === null ? [] : hanging('', `${printable(run.name)} stands out: ${why}`, look.paint.bad);
+  });
+  const goals = tank.targets.flatMap((target) => {
+    if ('fault' in target) return [];
+    return hanging('goal', targetSentence(target, write), target.reached === false ? look.paint.bad : asIs);
+  });
+  const records = runs.flatMap(({ name, record }) => {
+    if (record === null) return [];
+    const remarks = record.remarks.flatMap((remark) => hanging('', printable(remark), look.paint.warn));
+    return [...hanging('record', `${printable(name)}: ${recordSentence(record, write)}`, asIs), ...remarks];
+  });
+  const gas = tank.gas.flatMap((one) => hanging('gas', gasSentence(one, write), asIs));
+  const notes = tankNotes(tank).flatMap((note) => hanging('note', printable(note), look.paint.warn));
+  return [...weighed, ...out, ...goals, ...records, ...gas, ...presentLines(tank, look), ...notes];
 };
+
+const presentLines = ({ present }: WholeTank, look: Look): readonly string[] =>
+  present.length === 0
+    ? []
+    : hanging(
+        'present',
+        `${present.map((species) => speciesText(printable(species), look)).join(', ')}, taking no part`,
+        asIs,
+      );
 
 /** A tank as a page of its own; its faults are shown elsewhere. */
-export const renderTank = (tank: Whole, look: Look): string => {
-  const head = look.paint.strong(tank.name) + (tank.purpose === null ? '' : `   ${tank.purpose}`);
-  const { cell } = tank;
-  const told = perMole(tank, look);
-  const numbers: readonly (readonly [string, string])[] = [
-    ['electrons', cell.answer.electrons],
-    ...(told === '' ? [] : [['per mole', told] as const]),
-  ];
-  return `${head}\n${page([
-    reactionLines(cell.answer, look),
-    labelled(numbers, look),
+export const renderTank = (tank: WholeTank, look: Look): string => {
+  const purpose = tank.purpose === null ? '' : `   ${printable(tank.purpose)}`;
+  return `${look.paint.strong(printable(tank.name))}${purpose}\n${page([
+    [...reactionLines(tank.cell.answer, look), ...electronLines(tank, look)],
     runLines(tank, look),
-    noteLines(notesOf(tank), look),
+    outcomeLines(tank, look),
   ])}`;
 };
 
-/** The heading of a sheet. */
-export const renderHead = ({ plant, about }: SheetAnswer, look: Look): string =>
-  [
-    look.paint.strong(plant),
-    ...(about === null ? [] : hanging('', about, look.paint.faint).map((line) => line.trim())),
-  ].join('\n') + '\n';
+/** Columns of the cautions. */
+const WIDE = 108;
 
-/** The cautions of all tanks, each once; "" where there are none. */
-export const renderCautions = ({ tanks }: SheetAnswer, look: Look): string => {
-  const parts = tanks.flatMap((tank) => ('fault' in tank ? [] : [{ name: tank.name, cautions: tank.cell.cautions }]));
-  const blocks = gatheredCautions(parts, look);
-  return blocks.length === 0 ? '' : `${look.paint.strong('Cautions')}\n${page(blocks)}`;
+const cautionLines = (caution: SheetCaution, look: Look, paint: (text: string) => string): readonly string[] => {
+  const because = caution.because.map((species) => speciesText(species, look)).join(', ');
+  const basis = [because, caution.basis].filter((part) => part !== '').join('; ');
+  return wrapped(`${caution.tanks.map(printable).join(', ')}: ${caution.text} (${basis})`, WIDE).map((line, at) =>
+    paint(at === 0 ? line : `  ${line}`),
+  );
+};
+
+/** The heading of a sheet, and the cautions that come before everything else. */
+export const renderHead = (sheet: SheetAnswer, look: Look): string => {
+  const about = sheet.about === null ? [] : wrapped(printable(sheet.about)).map(look.paint.faint);
+  const grave = graveOf(sheet).flatMap((caution) => cautionLines(caution, look, look.paint.bad));
+  const first = grave.length === 0 ? [] : ['', look.paint.strong('Read first'), ...indented(grave)];
+  return `${[look.paint.strong(printable(sheet.plant)), ...about, ...first].join('\n')}\n`;
+};
+
+/** What the whole plant came to. */
+export const renderTotals = ({ totals }: SheetAnswer, look: Look): string => {
+  if (totals.runs === 0) return '';
+  const [charge, ...rest] = totalRows(totals, writingFor(look));
+  const energy = rest.filter(([name]) => name === 'energy');
+  const made = rest.filter(([name]) => name !== 'energy').map(([name, value]) => `${name} ${value}`);
+  const rows: readonly (readonly [string, string])[] = [['charge', charge?.[1] ?? fourUnits(totals.charge)], ...energy];
+  const products = made.length === 0 ? [] : hanging('made', made.join(';  '), asIs);
+  return `${look.paint.strong('Altogether')}\n${page([[...labelled(rows, look), ...products]])}`;
+};
+
+/** The first sentence of a caution that may apply: the other formats show it whole. */
+const firstSentence = (says: string): string => says.split(/(?<=\.) (?=[A-Z])/)[0] ?? says;
+
+/** A condition on the left, what may happen behind it. */
+const conditionLines = ({ says, when, tanks, basis }: SheetCaution, look: Look): readonly string[] =>
+  wrapped(`${when ?? ''}: ${firstSentence(says)} (${tanks.map(printable).join(', ')}; ${basis})`, WIDE).map(
+    (line, at) => (at === 0 ? `${look.paint.strong(when ?? '')}${line.slice((when ?? '').length)}` : `  ${line}`),
+  );
+
+/** The cautions that are left: those that hold, then in short those of which only the reader knows whether they do. */
+export const renderCautions = (sheet: SheetAnswer, look: Look): string => {
+  const others = othersOf(sheet);
+  const holding = others.filter(({ when }) => when === null).flatMap((caution) => cautionLines(caution, look, asIs));
+  const open = others.filter(({ when }) => when !== null).flatMap((caution) => conditionLines(caution, look));
+  const short = open.length === 0 ? [] : [look.paint.faint('In short, where it applies:'), ...open];
+  const gas = sheet.tanks.some((tank) => !('fault' in tank) && tank.gas.length > 0) ? wrapped(GAS_BASIS, WIDE) : [];
+  const last = [...gas, ...wrapped(ABSENCE, WIDE)].map(look.paint.faint);
+  return `${look.paint.strong('Cautions')}\n${indented([...holding, ...short, ...last]).join('\n')}\n`;
 };
 
 /** The last line of a sheet. */
 export const renderFoot = ({ plant, invented }: SheetAnswer): string =>
-  invented ? `${plant} and all its figures are invented.\n` : '';
+  invented ? `${printable(plant)} and all its figures are invented.\n` : '';

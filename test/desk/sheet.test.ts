@@ -1,7 +1,7 @@
 import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { answerSheet } from '../../src/desk/sheet.ts';
-import type { SheetAnswer } from '../../src/desk/sheet.ts';
+import type { SheetAnswer } from '../../src/desk/sheet-answer.ts';
 import { LONGEST_SHEET } from '../../src/desk/sheet-text.ts';
 import type { Fault } from '../../src/report/fault.ts';
 

@@ -1,0 +1,114 @@
+import type { ShownScaledHalf } from '../desk/schema/shape.ts';
+import type { RunAnswer, WholeTank } from '../desk/sheet-answer.ts';
+import { escaped, formulaHtml } from './markup.ts';
+import { tankPictures } from './report-pictures.ts';
+import { REPORT_WRITING, capital, faultHtml, saidList } from './report-words.ts';
+import { runTable, standsOut } from './sheet-table.ts';
+import { tankNotes } from './sheet-notes.ts';
+import {
+  GAS_BASIS,
+  budgetWords,
+  efficiencyText,
+  gasSentence,
+  recordSentence,
+  targetSentence,
+  weighedSentence,
+} from './sheet-words.ts';
+
+const halfRow = (name: string, half: ShownScaledHalf, at: number): string => {
+  const times = half.multiplier === undefined || half.multiplier === '1' ? '' : `${escaped(half.multiplier)} ×`;
+  const head = at === 0 ? name : '';
+  return `<tr><th scope="row">${head}</th><td class="times">${times}</td><td>${formulaHtml(half.reaction.plain)}</td></tr>`;
+};
+
+const reactionTable = ({ cell: { answer: cell } }: WholeTank): string => {
+  const halves = [
+    ...cell.anode.map((half, at) => halfRow('anode', half, at)),
+    ...cell.cathode.map((half, at) => halfRow('cathode', half, at)),
+  ];
+  const overall = cell.overall.plain === '' ? 'nothing is left' : formulaHtml(cell.overall.plain);
+  const electrons = `<p class="basis">${escaped(cell.electrons)} electrons in the overall reaction</p>`;
+  return (
+    `<div><table class="reactions"><caption>Reactions</caption><tbody>${halves.join('')}` +
+    `<tr><th scope="row">overall</th><td class="times"></td><td>${overall}</td></tr></tbody></table>${electrons}</div>`
+  );
+};
+
+const runsTable = (tank: WholeTank): string => {
+  const table = runTable(tank);
+  if (table === null) return '';
+  const head = table.columns.map(({ heading, isSpecies, unit }) => {
+    const name = isSpecies ? formulaHtml(heading) : heading;
+    return `<th scope="col">${name}<span>${escaped(unit)}</span></th>`;
+  });
+  const rows = table.rows.map(({ run, cells }) => {
+    const name = escaped(run.name);
+    const marked = standsOut(run) === null ? name : `<span class="alarm">${name}</span>`;
+    return `<tr><td>${marked}</td>${cells.map((cell) => `<td>${escaped(cell)}</td>`).join('')}</tr>`;
+  });
+  return (
+    `<div class="wide"><table><caption>Runs</caption><thead><tr><th scope="col">run</th>${head.join('')}</tr></thead>` +
+    `<tbody>${rows.join('')}</tbody></table></div>`
+  );
+};
+
+const weighedLines = (tank: WholeTank): readonly string[] => {
+  if (tank.weighed === null) return [];
+  const runs = tank.runs.flatMap((run) => {
+    if ('fault' in run || run.weighed === null) return [];
+    const name = `<b>${escaped(run.name)}</b>`;
+    const { standsOut } = run.weighed;
+    const budget = budgetWords(run.weighed, REPORT_WRITING);
+    const made = `${name}: ${escaped(efficiencyText(run.weighed))}${budget === '' ? '' : ` (${budget})`}`;
+    return [standsOut === null ? made : `${made}. <span class="alarm">${escaped(standsOut)}</span>`];
+  });
+  return [`<b>Tank</b>: ${weighedSentence(tank.weighed, REPORT_WRITING)}`, ...runs];
+};
+
+const recordLines = (tank: WholeTank): readonly string[] =>
+  tank.runs.flatMap((run) => {
+    if ('fault' in run || run.record === null) return [];
+    const remarks = run.record.remarks.map((remark) => `<span class="basis">${escaped(remark)}</span>`);
+    return [[`<b>${escaped(run.name)}</b>: ${recordSentence(run.record, REPORT_WRITING)}`, ...remarks].join('<br>')];
+  });
+
+const targetLines = ({ targets }: WholeTank): readonly string[] =>
+  targets.flatMap((target) => ('fault' in target ? [] : [capital(targetSentence(target, REPORT_WRITING))]));
+
+const gasLines = ({ gas }: WholeTank): readonly string[] =>
+  gas.length === 0
+    ? []
+    : [
+        ...gas.map((one) => `${capital(gasSentence(one, REPORT_WRITING))}.`),
+        `<span class="basis">${escaped(GAS_BASIS)}</span>`,
+      ];
+
+const noteLines = (tank: WholeTank): readonly string[] => {
+  const present = tank.present.map(formulaHtml).join(', ');
+  return [
+    ...(present === '' ? [] : [`There, and taking no part: ${present}.`]),
+    ...tankNotes(tank).map((note) => escaped(capital(note))),
+  ];
+};
+
+const isFault = (part: RunAnswer | WholeTank['targets'][number]): part is Extract<RunAnswer, { fault: unknown }> =>
+  'fault' in part;
+
+/** One tank of the report: what runs there and what came of it, beside its pictures. `at` numbers its elements. */
+export const tankSection = (tank: WholeTank, at: number, sheetText: string): string => {
+  const id = `tank${String(at + 1)}`;
+  const purpose = tank.purpose === null ? '' : `<p class="purpose">${escaped(capital(tank.purpose))}</p>`;
+  const broken = [...tank.runs, ...tank.targets, ...('fault' in tank.yield ? [tank.yield] : [])].filter(isFault);
+  return [
+    `<section class="tank" aria-labelledby="${id}"><h2 id="${id}">${escaped(tank.name)}</h2>${purpose}`,
+    `<div class="halves"><div>${reactionTable(tank)}${runsTable(tank)}`,
+    saidList('Goals', targetLines(tank)),
+    saidList('Current efficiency by weighing', weighedLines(tank)),
+    broken.map(({ name, fault }) => faultHtml(name, fault, sheetText)).join(''),
+    `</div><div>${tankPictures(tank, id)}`,
+    saidList('Records', recordLines(tank)),
+    saidList('Gas', gasLines(tank)),
+    saidList('Notes', noteLines(tank)),
+    '</div></div></section>',
+  ].join('\n');
+};

@@ -1,0 +1,25 @@
+import type { Fault } from '../report/fault.ts';
+import { excerpt } from '../report/excerpt.ts';
+import { escaped, formulaHtml } from './markup.ts';
+import type { Writing } from './sheet-words.ts';
+
+/** How the report writes: names escaped, formulas with their digits lowered and raised. */
+export const REPORT_WRITING: Writing = {
+  text: escaped,
+  species: formulaHtml,
+  alarm: (written) => `<span class="alarm">${written}</span>`,
+};
+
+/** A fault with the text it stands in. */
+export const faultHtml = (name: string, fault: Fault, sheetText: string): string =>
+  `<div class="fault"><p><span class="alarm">${escaped(name)} was not answered</span></p>` +
+  `<pre>${escaped(excerpt(fault, sheetText))}</pre></div>`;
+
+/** A list of sentences; nothing where there are none. */
+export const saidList = (heading: string, lines: readonly string[]): string =>
+  lines.length === 0
+    ? ''
+    : `<div><h3>${heading}</h3><ul class="said">${lines.map((line) => `<li>${line}</li>`).join('')}</ul></div>`;
+
+/** A word that begins a line of prose. */
+export const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);

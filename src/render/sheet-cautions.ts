@@ -1,0 +1,9 @@
+import type { SheetAnswer, SheetCaution } from '../desk/sheet-answer.ts';
+
+/** What comes before everything else, in every format. */
+export const graveOf = ({ cautions }: SheetAnswer): readonly SheetCaution[] =>
+  cautions.filter(({ grave }) => grave === true);
+
+/** The rest, for the end of the page. */
+export const othersOf = ({ cautions }: SheetAnswer): readonly SheetCaution[] =>
+  cautions.filter(({ grave }) => grave !== true);
