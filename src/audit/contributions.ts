@@ -9,6 +9,7 @@ import { type Side, draftOf } from './writing.ts';
 export interface Contribution {
   readonly species: Species;
   readonly side: Side;
+  readonly coefficient: Rational;
   /** Atoms of each element, and the charge where it is not 0, coefficient included. */
   readonly amounts: ReadonlyMap<Label, Rational>;
 }
@@ -20,5 +21,5 @@ export const contributionsOf = (equation: Equation): readonly Contribution[] =>
     const amounts = each.flatMap(([label, amount]) =>
       isZero(amount) ? [] : [[label, amount.mul(coefficient)] as const],
     );
-    return { species, side, amounts: new Map(amounts) };
+    return { species, side, coefficient, amounts: new Map(amounts) };
   });

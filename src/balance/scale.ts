@@ -19,10 +19,17 @@ export const wholeFactor = (reaction: Reaction): Rational => {
 /** `reaction` in lowest whole numbers. */
 export const lowestWhole = (reaction: Reaction): Reaction => scaled(reaction, wholeFactor(reaction));
 
+/** What takes the number of `species` to 1 or -1. Undefined where it takes no part. */
+export const factorPerMole = (reaction: Reaction, species: Species): Rational | undefined =>
+  reaction.terms
+    .find((one) => sameSpecies(one.species, species))
+    ?.nu.abs()
+    .inverse();
+
 /** `reaction` per mole of `species`: its number becomes 1 or -1, the others fractions. Undefined where it takes no part. */
 export const perMole = (reaction: Reaction, species: Species): Reaction | undefined => {
-  const term = reaction.terms.find((one) => sameSpecies(one.species, species));
-  return term === undefined ? undefined : scaled(reaction, term.nu.abs().inverse());
+  const factor = factorPerMole(reaction, species);
+  return factor === undefined ? undefined : scaled(reaction, factor);
 };
 
 /** A half-reaction per electron. Undefined where it exchanges none. */

@@ -8,14 +8,15 @@ import { note } from '../report/note.ts';
 import { type Result, chain, failure, inField, map, success } from '../report/result.ts';
 import { wholeSpan } from '../report/span.ts';
 import type { Equation } from '../species/equation.ts';
-import { type ReadingOptions, readEquation } from '../species/read.ts';
 import { isElectron, sameSpecies } from '../species/species.ts';
 import { type SkeletonFields, balanceSkeleton, composeDiagram, readElectrodes, under } from './electrodes.ts';
+import { type DeskOptions, readSketch, readWritten } from './hydronium.ts';
 import { allByRank } from './precedence.ts';
-import type { AskOf, CellFields } from './schema/ask.ts';
+import type { AskOf, CellFields, SeriesCell } from './schema/ask.ts';
 import { readMedium } from './settings.ts';
 
-type AmountsAsk = AskOf<'amounts'>;
+/** What says which reactions the charge flows through: an ask of amounts, or a further cell in series. */
+type AmountsAsk = AskOf<'amounts'> | SeriesCell;
 
 /** The terms as written, a species that stands twice counted once; what nets to 0 is left out. */
 const writtenReaction = ({ left, right }: Equation): Reaction => {
@@ -48,7 +49,7 @@ const noElectrons = (reaction: Reaction, field: string, text: string): Result<ne
 const parallelReaction = (
   equation: Equation,
   fields: SkeletonFields,
-  options: ReadingOptions,
+  options: DeskOptions,
 ): Result<ParallelReaction> => {
   const written = writtenReaction(equation);
   const conserves = written.terms.length > 0 && isEven(ledgerOf(written));
@@ -58,10 +59,12 @@ const parallelReaction = (
     return success({ reaction: written, electrons: electronsIn(written) }, [used]);
   }
   return chain(readMedium(fields.medium, options, fields.mediumField), (medium) =>
-    map(balanceSkeleton({ skeleton: equation, medium, share: null }, fields), ({ reaction, electrons }) => ({
-      reaction,
-      electrons,
-    })),
+    chain(readSketch(fields.text, options, fields.medium), (skeleton) =>
+      map(balanceSkeleton({ skeleton, medium, share: null }, fields), ({ reaction, electrons }) => ({
+        reaction,
+        electrons,
+      })),
+    ),
   );
 };
 
@@ -74,9 +77,9 @@ interface AskedHalf {
 const readHalves = (
   halves: readonly AskedHalf[],
   ask: AmountsAsk,
-  options: ReadingOptions,
+  options: DeskOptions,
 ): Result<readonly ParallelReaction[]> => {
-  const read = allByRank(halves.map(({ half, field }) => inField(readEquation(half, options), field)));
+  const read = allByRank(halves.map(({ half, field }) => inField(readWritten(half, options), field)));
   return chain(read, (equations) =>
     allByRank(
       equations.map((equation, at) => {
@@ -96,7 +99,7 @@ const readHalves = (
   );
 };
 
-const cellCircuit = (cell: CellFields, ask: AmountsAsk, options: ReadingOptions): Result<Circuit> => {
+const cellCircuit = (cell: CellFields, ask: AmountsAsk, options: DeskOptions): Result<Circuit> => {
   if ('diagram' in cell) {
     return map(composeDiagram(cell.diagram, options), (composed) => ({
       kind: 'cell',
@@ -115,7 +118,7 @@ const cellCircuit = (cell: CellFields, ask: AmountsAsk, options: ReadingOptions)
 };
 
 /** What the charge of an amounts ask flows through: a half-reaction, an electrode, or a cell. */
-export const readCircuit = (ask: AmountsAsk, options: ReadingOptions): Result<Circuit> => {
+export const readCircuit = (ask: AmountsAsk, options: DeskOptions): Result<Circuit> => {
   if ('cell' in ask) return under(cellCircuit(ask.cell, ask, options), 'cell');
   if ('half' in ask) {
     return chain(readHalves([{ half: ask.half, field: 'half' }], ask, options), ([half]) => {

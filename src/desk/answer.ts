@@ -1,8 +1,6 @@
-import { computeAmounts } from '../amounts/amounts.ts';
 import type { Fault } from '../report/fault.ts';
 import { type Result, chain, inField, map } from '../report/result.ts';
-import { readDiagram } from '../species/diagram.ts';
-import { type ReadingOptions, readEquation, readSpecies } from '../species/read.ts';
+import { readSpecies } from '../species/read.ts';
 import {
   type SkeletonFields,
   balanceSkeleton,
@@ -13,12 +11,15 @@ import {
 } from './electrodes.ts';
 import { type Addressee, type Reply, CONTRACT, addresseeOf, distinctNotes, faulted } from './envelope.ts';
 import { auditOfCell, auditOfEquation } from './audits.ts';
-import { cautionsOfCell, cautionsOfCircuit, cautionsOfHalf, cautionsOfReaction } from './cautions.ts';
-import { readCircuit } from './amounts.ts';
-import { allByRank } from './precedence.ts';
+import { dividedOf } from './divided.ts';
+import { cautionsOfCell, cautionsOfCircuits, cautionsOfHalf, cautionsOfReaction } from './cautions.ts';
+import { amountsOf } from './amounts-reply.ts';
+import { type DeskOptions, readWritten } from './hydronium.ts';
+import { withIrreducible } from './irreducible.ts';
+import { cellPer, halfPer, redoxPer } from './per.ts';
 import { readAsk } from './read-ask.ts';
 import type { Answer } from './schema/answer.ts';
-import type { Ask, AskOf, CellFields } from './schema/ask.ts';
+import type { Ask, AskOf } from './schema/ask.ts';
 import { readSettings } from './settings.ts';
 import { showAudit, showCellAudit } from './show/audit.ts';
 import { showCell, showHalf, showRedox } from './show/reactions.ts';
@@ -33,87 +34,88 @@ const skeletonFields = ({ skeleton, medium, settle }: AskOf<'half'> | AskOf<'red
 });
 
 /** text -> species -> composition, molar mass, oxidation numbers */
-const answerSpecies = (ask: AskOf<'species'>, options: ReadingOptions): Result<Reply> =>
+const answerSpecies = (ask: AskOf<'species'>, options: DeskOptions): Result<Reply> =>
   chain(inField(readSpecies(ask.text, options), 'text'), (reading) =>
     map(showReading(reading), (answer) => ({ ask: 'species', answer, cautions: [] })),
   );
 
 /** text -> species and coefficients, nothing balanced */
-const answerEquation = (ask: AskOf<'equation'>, options: ReadingOptions): Result<Reply> =>
-  map(inField(readEquation(ask.text, options), 'text'), (equation) => ({
+const answerEquation = (ask: AskOf<'equation'>, options: DeskOptions): Result<Reply> =>
+  map(inField(readWritten(ask.text, options), 'text'), (equation) => ({
     ask: 'equation',
     answer: showEquation(equation),
     cautions: [],
   }));
 
-/** text -> skeleton -> half-reaction */
-const answerHalf = (ask: AskOf<'half'>, options: ReadingOptions): Result<Reply> => {
+/** text -> skeleton -> half-reaction -> the scale asked for */
+const answerHalf = (ask: AskOf<'half'>, options: DeskOptions): Result<Reply> => {
   const fields = skeletonFields(ask);
-  return chain(readSkeleton(fields, options), (skeleton) =>
-    map(balanceSkeleton(skeleton, fields), (half) => ({
-      ask: 'half',
-      answer: showHalf(half),
-      cautions: cautionsOfHalf(half),
-    })),
-  );
+  return chain(readSkeleton(fields, options), (skeleton) => {
+    const balanced = balanceSkeleton(skeleton, fields);
+    const half = ask.irreducible === true ? withIrreducible(balanced, skeleton, true) : balanced;
+    return chain(half, (found) =>
+      map(halfPer(found, ask.per, options), (scaled) => ({
+        ask: 'half',
+        answer: showHalf(scaled),
+        cautions: cautionsOfHalf(found),
+      })),
+    );
+  });
 };
 
-/** text -> skeleton -> overall reaction -> its two halves */
-const answerRedox = (ask: AskOf<'redox'>, options: ReadingOptions): Result<Reply> => {
+/** text -> skeleton -> overall reaction -> its two halves -> the scale asked for */
+const answerRedox = (ask: AskOf<'redox'>, options: DeskOptions): Result<Reply> => {
   const fields = skeletonFields(ask);
-  return chain(readSkeleton(fields, options), (skeleton) =>
-    map(balanceWhole(skeleton, fields), (redox) => ({
-      ask: 'redox',
-      answer: showRedox(redox),
-      cautions: cautionsOfReaction(redox.overall, redox.medium),
-    })),
-  );
+  return chain(readSkeleton(fields, options), (skeleton) => {
+    const balanced = balanceWhole(skeleton, fields);
+    const redox = ask.irreducible === true ? withIrreducible(balanced, skeleton, false) : balanced;
+    return chain(redox, (found) =>
+      map(redoxPer(found, ask.per, options), (scaled) => ({
+        ask: 'redox',
+        answer: showRedox(scaled),
+        cautions: cautionsOfReaction(found.overall, found.medium),
+      })),
+    );
+  });
 };
 
-/** True where something keeps the electrolytes apart: a separator, the bridge of a diagram. null: the ask does not say. */
-const dividedOf = (cell: CellFields, options: ReadingOptions): boolean | null => {
-  if (!('diagram' in cell)) return cell.separator ?? null;
-  const diagram = readDiagram(cell.diagram, options);
-  return diagram.ok ? diagram.value.bridge : null;
-};
-
-/** texts -> skeletons -> half-reactions -> cell reaction */
-const answerCell = (ask: AskOf<'cell'>, options: ReadingOptions): Result<Reply> => {
+/** texts -> skeletons -> half-reactions -> cell reaction -> the scale asked for */
+const answerCell = (ask: AskOf<'cell'>, options: DeskOptions): Result<Reply> => {
   const cell = 'diagram' in ask ? composeDiagram(ask.diagram, options) : composeFields(ask, options);
-  return map(cell, (composed) => ({
-    ask: 'cell',
-    answer: showCell(composed),
-    cautions: cautionsOfCell(composed, dividedOf(ask, options)),
-  }));
+  return chain(cell, (composed) =>
+    map(cellPer(composed, ask.per, options), (scaled) => ({
+      ask: 'cell',
+      answer: showCell(scaled),
+      cautions: cautionsOfCell(composed, dividedOf(ask, options)),
+    })),
+  );
 };
 
 /** text -> equation as written -> ledger, verdict, repairs; of a whole cell for each part, then all together */
-const answerAudit = (ask: AskOf<'audit'>, options: ReadingOptions): Result<Reply> =>
-  'equation' in ask
-    ? map(auditOfEquation(ask, options), (audit) => ({ ask: 'audit', answer: showAudit(audit), cautions: [] }))
-    : map(auditOfCell(ask, options), (audit) => ({ ask: 'audit', answer: showCellAudit(audit), cautions: [] }));
-
-/** texts -> reactions with their electron numbers -> what Faraday's law makes of what is given */
-const answerAmounts = (ask: AskOf<'amounts'>, options: ReadingOptions): Result<Reply> => {
-  const circuit = readCircuit(ask, options);
-  const asked = inField(readSpecies(ask.species, options), 'species');
-  return chain(allByRank<unknown>([circuit, asked]), () =>
-    chain(circuit, (through) =>
-      chain(asked, ({ species }) =>
-        map(computeAmounts({ circuit: through, species, given: ask.given, ...wanted(ask) }), (amounts) => ({
-          ask: 'amounts',
-          answer: amounts,
-          cautions: cautionsOfCircuit(through, 'cell' in ask ? dividedOf(ask.cell, options) : null),
-        })),
-      ),
-    ),
-  );
+const answerAudit = (ask: AskOf<'audit'>, options: DeskOptions): Result<Reply> => {
+  const listed = ask.contributions === true;
+  return 'equation' in ask
+    ? map(auditOfEquation(ask, options), ({ audit, written }) => ({
+        ask: 'audit',
+        answer: showAudit(audit, listed ? written : null),
+        cautions: [],
+      }))
+    : map(auditOfCell(ask, options), ({ audit, written }) => ({
+        ask: 'audit',
+        answer: showCellAudit(audit, listed ? written : null),
+        cautions: [],
+      }));
 };
 
-const wanted = ({ want }: AskOf<'amounts'>): { readonly want?: Readonly<Record<string, string>> } =>
-  want === undefined ? {} : { want };
+/** texts -> reactions with their electron numbers -> what Faraday's law makes of what is given */
+const answerAmounts = (ask: AskOf<'amounts'>, options: DeskOptions): Result<Reply> =>
+  map(amountsOf(ask, options), ({ answer: amounts, circuits }) => ({
+    ask: 'amounts',
+    answer: amounts,
+    cautions: cautionsOfCircuits(circuits),
+  }));
 
-const reply = (ask: Ask, options: ReadingOptions): Result<Reply> => {
+const reply = (ask: Ask, options: DeskOptions): Result<Reply> => {
   switch (ask.ask) {
     case 'species':
       return answerSpecies(ask, options);

@@ -105,8 +105,25 @@ const gasSources = (weighted: readonly WeightedHalf[]): readonly GasSource[] =>
 const kindOf = (reaction: Reaction): 'reduction' | 'oxidation' =>
   sideOf(reaction, 'left').some(({ species }) => isElectron(species)) ? 'reduction' : 'oxidation';
 
+/** How grave: what kills at once first; of equals, what holds as it stands before what depends on a condition. */
+const gravity = ({ grave, conditional }: ShownCaution): number =>
+  (grave === true ? 0 : 2) + (conditional === true ? 1 : 0);
+
+/** The cautions of all that one charge flows through, each once, the gravest first. */
+export const cautionsOfCircuits = (
+  circuits: readonly { readonly circuit: Circuit; readonly divided: boolean | null }[],
+): readonly ShownCaution[] => {
+  const lists = circuits.map(({ circuit, divided }) => cautionsOfCircuit(circuit, divided));
+  const [only, ...others] = lists;
+  if (only !== undefined && others.length === 0) return only;
+  const all = lists.flat();
+  return all
+    .filter((one, at) => all.findIndex(({ text }) => text === one.text) === at)
+    .toSorted((one, other) => gravity(one) - gravity(other));
+};
+
 /** The cautions of what the charge of an amounts ask flows through; `divided` as in `cautionsOfCell`. */
-export const cautionsOfCircuit = (circuit: Circuit, divided: boolean | null = null): readonly ShownCaution[] => {
+const cautionsOfCircuit = (circuit: Circuit, divided: boolean | null = null): readonly ShownCaution[] => {
   if (circuit.kind === 'cell') return cautionsOfCell(circuit.cell, divided);
   const reactions =
     circuit.kind === 'half' ? [circuit.half.reaction] : circuit.reactions.map(({ reaction }) => reaction);

@@ -9,7 +9,7 @@ import type { Rational } from '../exact/rational.ts';
 import { type Result, chain, failure, inField, map, success } from '../report/result.ts';
 import type { Equation } from '../species/equation.ts';
 import { readDiagram } from '../species/diagram.ts';
-import { type ReadingOptions, readEquation } from '../species/read.ts';
+import { type DeskOptions, readSketch } from './hydronium.ts';
 import { allByRank } from './precedence.ts';
 import type { AskedMedium, CellFields } from './schema/ask.ts';
 import { readMedium, readShare } from './settings.ts';
@@ -35,8 +35,8 @@ export interface ReadSkeleton {
 }
 
 /** The first step for a skeleton: its text, its helpers and its share. */
-export const readSkeleton = (fields: SkeletonFields, options: ReadingOptions): Result<ReadSkeleton> =>
-  chain(inField(readEquation(fields.text, options), fields.field), (skeleton) =>
+export const readSkeleton = (fields: SkeletonFields, options: DeskOptions): Result<ReadSkeleton> =>
+  chain(inField(readSketch(fields.text, options, fields.medium), fields.field), (skeleton) =>
     chain(readMedium(fields.medium, options, fields.mediumField), (medium) =>
       map(shareOf(fields), (share) => ({ skeleton, medium, share })),
     ),
@@ -85,7 +85,7 @@ const crowded = (cell: ComposedFields): Result<never> | null => {
  * Both electrodes of a cell: all skeletons are read before one is balanced. Of several faults the first in the
  * contract's order is told; `too-hard` for more than `MOST_REACTIONS` at one electrode.
  */
-export const readElectrodes = (cell: ComposedFields, options: ReadingOptions): Result<Electrodes> => {
+export const readElectrodes = (cell: ComposedFields, options: DeskOptions): Result<Electrodes> => {
   const full = crowded(cell);
   if (full !== null) return full;
   const anode = fieldsAt(cell, 'anode');
@@ -105,11 +105,11 @@ const placed = (skeleton: ReadSkeleton, fields: SkeletonFields | undefined): Res
 };
 
 /** Two electrodes to their cell reaction: read, balanced, composed. */
-export const composeFields = (cell: ComposedFields, options: ReadingOptions): Result<CellReaction> =>
+export const composeFields = (cell: ComposedFields, options: DeskOptions): Result<CellReaction> =>
   chain(readElectrodes(cell, options), (electrodes) => composeCell(electrodes, { separator: cell.separator === true }));
 
 /** A cell diagram to its cell reaction: read, told apart into electrodes, composed. */
-export const composeDiagram = (text: string, options: ReadingOptions): Result<CellReaction> =>
+export const composeDiagram = (text: string, options: DeskOptions): Result<CellReaction> =>
   chain(inField(readDiagram(text, options), 'diagram'), (diagram) =>
     inField(
       chain(electrodesOfDiagram(diagram), (electrodes) => composeCell(electrodes)),

@@ -46,6 +46,12 @@ const NESTED_FIELDS = [
   'cathode',
   'separator',
   'diagram',
+  'electrode',
+  'species',
+  'given',
+  'want',
+  'between',
+  'coefficient',
 ];
 
 const TYPES: Readonly<Record<string, string>> = {

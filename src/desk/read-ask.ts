@@ -32,7 +32,7 @@ const schemaFor = (kind: AskKind, fields: Fields): z.ZodType<Ask> & { readonly s
 
 /** Two forms in one ask: which is meant is not ours to guess. */
 const EXCLUSIVE: readonly (readonly [AskKind, string, readonly string[]])[] = [
-  ['cell', 'diagram', ['anode', 'cathode', 'medium', 'separator', 'settle']],
+  ['cell', 'diagram', ['anode', 'cathode', 'medium', 'separator', 'settle', 'foldHydronium']],
   ['audit', 'equation', ['anode', 'cathode', 'overall', 'electrons']],
   ['amounts', 'cell', ['half', 'electrode']],
   ['amounts', 'electrode', ['half']],

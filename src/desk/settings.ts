@@ -3,6 +3,7 @@ import type { MediumChoice } from '../redox/choose-medium.ts';
 import { type Result, all, chain, failure, inField, map, success } from '../report/result.ts';
 import { wholeSpan } from '../report/span.ts';
 import { type ReadingOptions, readDefinitions, readSpecies } from '../species/read.ts';
+import type { DeskOptions } from './hydronium.ts';
 import type { Ask, AskedMedium } from './schema/ask.ts';
 
 /** "0.4", "2/5": at most 40 digits on either side of the point or the stroke. */
@@ -42,9 +43,10 @@ const tooMany = (field: string, most: number, what: string): Result<never> =>
     hint: `Give only the ${what} that take part.`,
   });
 
-const NONE: ReadingOptions = {};
+const NONE: DeskOptions = {};
+const FOLDING: DeskOptions = { foldHydronium: true };
 
-type Common = Pick<Ask, 'where' | 'define' | 'strict'>;
+type Common = Pick<Ask, 'where' | 'define' | 'strict'> & { readonly foldHydronium?: boolean | undefined };
 
 const readWhere = (where: Readonly<Record<string, string>>): Result<ReadonlyMap<string, Rational>> => {
   if (Object.keys(where).length > MOST_SUBSCRIPTS) return tooMany('where', MOST_SUBSCRIPTS, 'unknown subscripts');
@@ -55,10 +57,11 @@ const readWhere = (where: Readonly<Record<string, string>>): Result<ReadonlyMap<
 };
 
 /** What an ask says of how to read its texts. Faults: `bad-ask` and faults of reading, in `where.x` and `define.NAME`. */
-export const readSettings = ({ where, define, strict }: Common): Result<ReadingOptions> => {
-  if (where === undefined && define === undefined && strict !== true) return success(NONE);
+export const readSettings = ({ where, define, strict, foldHydronium }: Common): Result<DeskOptions> => {
+  const folding = foldHydronium === true ? FOLDING : NONE;
+  if (where === undefined && define === undefined && strict !== true) return success(folding);
   return chain(readWhere(where ?? {}), (values) => {
-    const options: ReadingOptions = { where: values, strict: strict === true };
+    const options: DeskOptions = { ...folding, where: values, strict: strict === true };
     if (define === undefined) return success(options);
     return map(inField(readDefinitions(define, options), 'define'), (names) => ({ ...options, define: names }));
   });

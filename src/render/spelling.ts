@@ -1,11 +1,5 @@
 import { ONE, ZERO } from '../exact/rational.ts';
-import {
-  type PrintStyle,
-  type PrintedTerm,
-  printReaction,
-  printSpecies,
-  printTerm,
-} from '../notation/print/print.ts';
+import { type PrintStyle, type PrintedTerm, printReaction, printSpecies, printTerm } from '../notation/print/print.ts';
 import type { Spelled } from '../notation/print/pieces.ts';
 import { readSpecies } from '../species/read.ts';
 import type { Look } from './look.ts';

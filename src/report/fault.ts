@@ -65,6 +65,8 @@ export type Fault =
       readonly dimension: number;
       readonly family: readonly ShownReaction[];
       readonly couplings: readonly ShownCoupling[];
+      /** Only where asked for: the Hilbert basis. */
+      readonly irreducible?: readonly ShownReaction[];
     })
   | (Common & { readonly code: 'no-electrons'; readonly reaction: ShownReaction })
   | (Common & { readonly code: 'not-enough-given'; readonly missing: readonly string[] })

@@ -18,6 +18,8 @@ export const NOTE_CODES = {
   'coefficients-ignored': 'coefficients in a skeleton were ignored',
   'species-dropped': 'a species on both sides came out at 0 and was left out',
   'other-balances': 'other balances exist; the only elementary one was taken',
+  'hydronium-folded': 'H3O^+ was read as H^+ and H2O, as asked',
+  scaled: 'the answer stands at the scale asked for, not in lowest whole numbers',
   settled: 'a solution that was not unique was settled by the assumption given',
   'no-molar-mass': 'an element or nuclide here has no standard atomic weight',
   'no-oxidation-numbers': 'convention does not decide the oxidation numbers',

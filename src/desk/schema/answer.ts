@@ -71,6 +71,14 @@ const repair = z.strictObject({
   improbable: z.exactOptional(z.literal(true)),
 });
 
+const contribution = z
+  .strictObject({
+    term: z.string().describe('The term as written, its coefficient with it.'),
+    side: z.enum(['left', 'right']),
+    amounts: z.record(z.string(), exactSchema).describe('Atoms of each element, and the charge where it is not 0.'),
+  })
+  .describe('What one written term puts into the ledger.');
+
 /** The audit of one equation. */
 export const equationAuditSchema = z.strictObject({
   verdict: z.enum(['balanced', 'not-lowest', 'unbalanced']),
@@ -78,6 +86,9 @@ export const equationAuditSchema = z.strictObject({
   dimension: z.number().int().describe('Of the written species only.'),
   ledger: ledgerSchema,
   repairs: z.array(repair).readonly().describe('The likeliest first; an improbable one never first.'),
+  contributions: z
+    .exactOptional(z.array(contribution).readonly())
+    .describe('Only where asked for: each term in the order written.'),
 });
 
 const cellAuditSchema = z.strictObject({
@@ -94,7 +105,27 @@ const cellAuditSchema = z.strictObject({
 });
 
 const quantities = z.record(z.string(), quantitySchema);
-const amountsAnswer = z.strictObject({
+const budgetLine = z
+  .strictObject({
+    input: z.string().describe('A quantity given, a share, or "atomic weight of Cu".'),
+    uncertainty: z.number().describe('Its standard uncertainty in SI base units.'),
+    sensitivity: z.number().describe('The sensitivity coefficient in SI base units (JCGM 100:2008, 5.1.3).'),
+    part: z.number().describe('Its part of the variance, 0 to 1, inputs taken as uncorrelated.'),
+  })
+  .describe('What one input contributes to an uncertainty.');
+
+const gain = z.exactOptional(quantitySchema);
+const tankBalance = z
+  .strictObject({
+    acid: gain.describe('mol of H^+.'),
+    base: gain.describe('mol of OH^-.'),
+    water: z.exactOptional(
+      z.strictObject({ amount: quantitySchema, mass: quantitySchema, volume: quantitySchema }).describe('Of H2O(l).'),
+    ),
+  })
+  .describe('What the tank gains (negative: loses) by stoichiometry alone; absent where nothing of it changes.');
+
+const amountsShape = {
   quantities: quantities.describe('Of the species asked.'),
   alongside: z.record(z.string(), quantities).describe('Of every other species, for the same charge.'),
   electronsPerMole: z.record(z.string(), exactSchema).describe('Moles of electrons per mole of each species.'),
@@ -102,6 +133,17 @@ const amountsAnswer = z.strictObject({
     .array(z.strictObject({ quantity: z.string(), relation: z.string() }))
     .readonly()
     .describe('In the order of derivation: each quantity with the relation it follows from.'),
+  budgets: z
+    .exactOptional(z.record(z.string(), z.array(budgetLine).readonly()))
+    .describe('Only where asked for: who contributes what to the uncertainty of each quantity, the largest first.'),
+};
+
+const amountsAnswer = z.strictObject({
+  ...amountsShape,
+  tank: z.exactOptional(tankBalance).describe('Only where asked for.'),
+  series: z
+    .exactOptional(z.array(z.strictObject(amountsShape)).readonly())
+    .describe('Of the further cells in series, in the order of the ask.'),
 });
 
 const kind = z.enum(ASK_KINDS);
@@ -149,3 +191,4 @@ export type CellAnswer = z.infer<typeof cellAnswer>;
 export type EquationAuditAnswer = z.infer<typeof equationAuditSchema>;
 export type CellAuditAnswer = z.infer<typeof cellAuditSchema>;
 export type AmountsAnswerShown = z.infer<typeof amountsAnswer>;
+export type TankBalanceShown = z.infer<typeof tankBalance>;

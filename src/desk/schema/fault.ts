@@ -57,6 +57,9 @@ export const faultSchema = z
       dimension: z.number().int(),
       family: z.array(reactionSchema).readonly(),
       couplings: z.array(couplingSchema).readonly(),
+      irreducible: z
+        .exactOptional(z.array(reactionSchema).readonly())
+        .describe('Only where asked for: whole balances that are no sum of two others; every other is a sum of them.'),
     }),
     z.strictObject({ code: z.literal('no-electrons'), ...common, reaction: reactionSchema }),
     z.strictObject({ code: z.literal('not-enough-given'), ...common, missing: z.array(z.string()).readonly() }),
