@@ -171,6 +171,48 @@ describe('the text of a record', () => {
     );
   });
 
+  test('whatever it holds, it is a fault or every line is accounted for', () => {
+    const shards = [
+      '0,1',
+      '1;2',
+      '\t',
+      '"',
+      "'",
+      '10:00',
+      '2026-01-01',
+      '-',
+      '1e999',
+      '\ufffd',
+      'time_s',
+      'I (A)',
+      '# ',
+      ';;',
+      ',',
+    ];
+    const anything = fc
+      .array(fc.oneof(fc.constantFrom(...shards, '\n', '\r', '\r\n', ' '), fc.string({ maxLength: 6 })), {
+        maxLength: 60,
+      })
+      .map((parts) => parts.join(''));
+    fc.assert(
+      fc.property(anything, fc.boolean(), (text, headed) => {
+        const reader = openRecord({ timeUnit: 's', currentUnit: 'A' });
+        if (!reader.ok) throw new Error('no options');
+        reader.value.take(headed ? `time_s,current_A\n0,1\n1,1\n${text}` : text);
+        const record = reader.value.end();
+        if (!record.ok) {
+          expect(headed).toBe(false);
+          expect(record.fault.message).not.toBe('');
+          return;
+        }
+        const { total, used, bad, blank, comments, before } = record.value.lines;
+        expect(used + bad + blank + comments + before).toBe(total);
+        expect(Number.isFinite(record.value.charge.value)).toBe(true);
+      }),
+      { numRuns: 400 },
+    );
+  });
+
   test('means what its readings mean', () => {
     fc.assert(
       fc.property(readings, (rows) => {
