@@ -37,6 +37,8 @@ export interface WeighedRun extends Efficiency {
 export interface WeighedTank extends Efficiency {
   /** How many runs were weighed. */
   readonly runs: number;
+  /** The same without the runs that stand out; null where none does, or where none is left. */
+  readonly without: Efficiency | null;
 }
 
 /** A stretch of a record for a picture: s from its start, the least and greatest A, net A h at its end. */

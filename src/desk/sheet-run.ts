@@ -1,7 +1,7 @@
 import { type Result, chain, failure, success } from '../report/result.ts';
 import { answer } from './answer.ts';
 import { type SheetRun, runSchema } from './schema/sheet.ts';
-import type { RunAnswer, WeighedTank, WholeRun } from './sheet-answer.ts';
+import type { Efficiency, RunAnswer, WeighedTank, WholeRun } from './sheet-answer.ts';
 import { type FoundEfficiency, foundEfficiency, showEfficiency, togetherOf } from './sheet-efficiency.ts';
 import { checked, nameOf, sheetField } from './sheet-part.ts';
 import { type Records, type UsedRecord, useRecord } from './sheet-record.ts';
@@ -67,9 +67,17 @@ const judged = (all: readonly Answered[], product: string): ReadonlyMap<WholeRun
   return new Map(weighed.map(({ run }, at) => [run, verdicts[at] ?? null]));
 };
 
-const together = (all: readonly Answered[], product: string): WeighedTank | null => {
-  const found = all.flatMap((one) => (one.found === null || one.run.product !== product ? [] : [one.found]));
-  return found.length === 0 ? null : { ...showEfficiency(togetherOf(found)), runs: found.length };
+const together = (
+  all: readonly Answered[],
+  product: string,
+  verdicts: ReadonlyMap<WholeRun, string | null>,
+): WeighedTank | null => {
+  const weighed = all.flatMap(({ run, found }) => (found === null || run.product !== product ? [] : [{ run, found }]));
+  if (weighed.length === 0) return null;
+  const kept = weighed.filter(({ run }) => (verdicts.get(run) ?? null) === null);
+  const shown = (some: typeof weighed): Efficiency => showEfficiency(togetherOf(some.map(({ found }) => found)));
+  const without = kept.length === 0 || kept.length === weighed.length ? null : shown(kept);
+  return { ...shown(weighed), runs: weighed.length, without };
 };
 
 /** The runs of a tank, each by itself, and their weighings held against one another. */
@@ -87,5 +95,5 @@ export const answerRuns = (
     const standsOut = verdicts.get(run) ?? null;
     return run.weighed === null ? run : { ...run, weighed: { ...run.weighed, standsOut } };
   });
-  return { runs, weighed: together(all, context.product) };
+  return { runs, weighed: together(all, context.product, verdicts) };
 };

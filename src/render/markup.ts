@@ -44,11 +44,14 @@ export const formulaParts = (plain: string): readonly FormulaPart[] => {
   return parts;
 };
 
+/** A coefficient and the blank behind it: a line is not broken between it and its species. */
+const COEFFICIENT = /(?<=^| )([\d./]+) (?=\S)/g;
+
 const TAGS = { line: '', low: 'sub', high: 'sup' } as const;
 
 /** A canonical species or reaction in HTML. */
 export const formulaHtml = (plain: string): string =>
-  formulaParts(plain)
+  formulaParts(plain.replace(COEFFICIENT, '$1\u00a0'))
     .map(({ text, place }) => {
       const tag = TAGS[place];
       return tag === '' ? escaped(text) : `<${tag}>${escaped(text)}</${tag}>`;

@@ -7,7 +7,7 @@ import { tankSection } from './report-tank.ts';
 import { REPORT_WRITING, capital, faultHtml } from './report-words.ts';
 import { graveOf, othersOf } from './sheet-cautions.ts';
 import { tankSummary } from './sheet-summary.ts';
-import { totalRows } from './sheet-words.ts';
+import { GAS_BASIS, totalRows } from './sheet-words.ts';
 
 const cautionItem = (caution: SheetCaution): string => {
   const basis = [caution.because.map(formulaHtml).join(', '), escaped(caution.basis)].filter((part) => part !== '');
@@ -23,35 +23,49 @@ const graveSection = (sheet: SheetAnswer): string => {
   return `<section class="grave" aria-labelledby="first"><h2 id="first">Read first</h2><ul>${grave.map(cautionItem).join('')}</ul></section>`;
 };
 
+const gasBasis = ({ tanks }: SheetAnswer): string =>
+  tanks.some((tank) => !('fault' in tank) && tank.gas.length > 0) ? `${escaped(GAS_BASIS)}<br>` : '';
+
 const otherSection = (sheet: SheetAnswer): string => {
   const others = othersOf(sheet);
   const list = others.length === 0 ? '' : `<ul>${others.map(cautionItem).join('')}</ul>`;
   return (
     `<section class="tank others" aria-labelledby="cautions"><h2 id="cautions">Cautions</h2>${list}` +
-    `<p class="basis">${escaped(ABSENCE)}</p></section>`
+    `<p class="basis">${gasBasis(sheet)}${escaped(ABSENCE)}</p></section>`
   );
 };
 
+const glanceCell = (heading: string, cell: string): string =>
+  cell === '' ? '<td class="none"></td>' : `<td data-of="${heading}">${cell}</td>`;
+
 const glanceRow = (tank: TankAnswer, at: number): string => {
   if ('fault' in tank) {
-    return `<tr><td>${escaped(tank.name)}</td><td></td><td></td><td></td><td><span class="alarm">not answered</span></td></tr>`;
+    const empty = '<td class="none"></td>'.repeat(3);
+    return `<tr><td>${escaped(tank.name)}</td>${empty}<td><span class="alarm">not answered</span></td></tr>`;
   }
   const { product, made, charge, efficiency, alarms } = tankSummary(tank, REPORT_WRITING);
   const link = `<a href="#tank${String(at + 1)}">${escaped(tank.name)}</a>`;
   const remark = alarms.map((alarm) => `<span class="alarm">${alarm}</span>`).join('<br>');
-  return `<tr><td>${link}</td><td>${made === '' ? '' : `${made} ${product}`}</td><td>${charge}</td><td>${efficiency}</td><td>${remark}</td></tr>`;
+  const cells = [
+    glanceCell('made', made === '' ? '' : `${made} ${product}`),
+    glanceCell('charge', charge),
+    glanceCell('efficiency', efficiency),
+    remark === '' ? '<td class="none"></td>' : `<td>${remark}</td>`,
+  ];
+  return `<tr><td>${link}</td>${cells.join('')}</tr>`;
 };
 
 const glanceSection = (sheet: SheetAnswer): string => {
-  const sums = totalRows(sheet.totals, REPORT_WRITING).map(
-    ([name, value]) => `<div><dt>${name}</dt><dd>${escaped(value)}</dd></div>`,
-  );
+  const sums = totalRows(sheet.totals, REPORT_WRITING).map(({ name, value, aside }) => {
+    const small = aside === '' ? '' : `<span class="basis">${escaped(aside)}</span>`;
+    return `<div><dt>${name}</dt><dd>${escaped(value)}${small}</dd></div>`;
+  });
   return [
     '<section aria-labelledby="glance"><h2 id="glance">At a glance</h2>',
     sheet.totals.runs === 0 ? '' : `<dl class="sum">${sums.join('')}</dl>`,
-    '<div class="wide"><table class="glance"><thead><tr><th scope="col">tank</th><th scope="col">made</th>',
+    '<table class="rows glance"><thead><tr><th scope="col">tank</th><th scope="col">made</th>',
     '<th scope="col">charge</th><th scope="col">efficiency</th><th scope="col"><span class="basis">to look at</span></th></tr></thead>',
-    `<tbody>${sheet.tanks.map(glanceRow).join('')}</tbody></table></div></section>`,
+    `<tbody>${sheet.tanks.map(glanceRow).join('')}</tbody></table></section>`,
   ].join('\n');
 };
 

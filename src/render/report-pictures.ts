@@ -12,7 +12,8 @@ export const PATTERNS =
   '<rect width="5" height="5" fill="#fff" style="stroke:none"/><line x1="0" y1="0" x2="0" y2="5" stroke="#5b6770" stroke-width="2"/>' +
   '</pattern></defs></svg>';
 
-const bandFigure = ({ name, currentUse, product }: WholeTank, id: string): string => {
+/** Where the current of a tank went: a band of shares for each electrode. `id` begins the names of its elements. */
+export const bandFigure = ({ name, currentUse, product }: WholeTank, id: string): string => {
   const cathode = electrodeBand('cathode', currentUse.cathode, 0);
   const anode = electrodeBand('anode', currentUse.anode, cathode.height + 10);
   const title = `${name}, where the current went. Cathode: ${bandText(currentUse.cathode)}. Anode: ${bandText(currentUse.anode)}.`;
@@ -47,10 +48,6 @@ const recordFigure = (run: WholeRun, tank: WholeTank, id: string): string => {
   );
 };
 
-/** The pictures of a tank: where the current went, then a chart for each run with a record. */
-export const tankPictures = (tank: WholeTank, id: string): string => {
-  const charts = tank.runs.map((run, at) =>
-    'fault' in run ? '' : recordFigure(run, tank, `${id}-run${String(at + 1)}`),
-  );
-  return bandFigure(tank, id) + charts.join('');
-};
+/** A chart of charge, mass and current over time for each run with a record. */
+export const recordFigures = (tank: WholeTank, id: string): string =>
+  tank.runs.map((run, at) => ('fault' in run ? '' : recordFigure(run, tank, `${id}-run${String(at + 1)}`))).join('');

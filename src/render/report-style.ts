@@ -26,7 +26,7 @@ th,td{padding:.28rem 0 .28rem 1.1rem;text-align:right;vertical-align:baseline;fo
 th:first-child,td:first-child{text-align:left;padding-left:0;white-space:normal;overflow-wrap:anywhere;min-width:6.5rem}
 thead th{color:var(--soft);font-size:.86rem}
 thead th span{display:block;font-size:.78rem}
-.wide{overflow-x:auto}
+.tank>.rows{margin-top:1.4rem}
 .glance td:nth-child(2),.glance th:nth-child(2){text-align:left}
 .reactions th{color:var(--soft);width:4.6rem;min-width:0;white-space:nowrap}
 .reactions td{text-align:left;white-space:normal}
@@ -37,7 +37,9 @@ thead th span{display:block;font-size:.78rem}
 .sum{display:flex;flex-wrap:wrap;gap:.9rem 2.2rem;margin:.6rem 0 1.4rem;padding:0}
 .sum div{min-width:5.5rem}
 .sum dt{font-size:.82rem;color:var(--soft)}
-.sum dd{margin:0;font-size:1.16rem}
+.sum dd{margin:0;font-size:1.1rem}
+.sum .basis{display:block}
+a{color:inherit;text-decoration-color:var(--sea);text-underline-offset:.2em}
 ul{list-style:none;margin:0;padding:0}
 .said li{padding:.28rem 0;border-bottom:1px solid var(--hair);overflow-wrap:anywhere}
 .said li:last-child{border-bottom:0}
@@ -75,19 +77,32 @@ svg .envelope{fill:var(--deep);stroke:var(--deep);stroke-width:.9;stroke-linejoi
 .hidden{position:absolute;width:0;height:0}
 footer{margin-top:2.6rem;border-top:1px solid var(--hair);padding-top:.8rem;color:var(--soft);font-size:.86rem}
 @media (max-width:56rem){.halves{grid-template-columns:minmax(0,1fr)}.others ul{columns:1}}
-@media (max-width:30rem){main{padding:1.3rem 1rem 2rem}h1{font-size:1.9rem}body{font-size:14.5px}th,td{padding-left:.7rem}.grave{padding:.8rem .9rem}}
-@page{size:A4;margin:15mm 14mm}
+@media (max-width:38rem){
+main{padding:1.3rem 1rem 2rem}
+h1{font-size:1.9rem}
+.grave{padding:.8rem .9rem}
+.rows,.rows caption,.rows tbody,.rows tr,.rows td{display:block}
+.rows thead{display:none}
+.rows tr{display:grid;grid-template-columns:repeat(auto-fill,minmax(6.6rem,1fr));gap:.35rem .9rem;padding:.6rem 0 .65rem;border-bottom:1px solid var(--hair)}
+.rows td,.rows td:first-child{padding:0;border:0;text-align:left;white-space:normal;min-width:0}
+.rows td:first-child,.rows td:not([data-of]){grid-column:1/-1}
+.rows td:first-child{font-weight:600}
+.rows td.none{display:none}
+.rows td[data-of]::before{content:attr(data-of);display:block;color:var(--soft);font-size:.76rem}
+}
+@page{size:A4;margin:14mm 14mm 15mm}
 @media print{
 :root{--paper:#fff;--stop-paper:#fff}
-body{font-size:9.6pt;-webkit-print-color-adjust:exact;print-color-adjust:exact}
+html,body{font-size:11.6px;line-height:1.42}
+body{-webkit-print-color-adjust:exact;print-color-adjust:exact}
 main{max-width:none;padding:0}
-h1{font-size:20pt}h2{font-size:13.5pt}
-section{margin-top:1.4rem}
-.halves{grid-template-columns:minmax(0,1fr) 74mm;gap:1rem 1.6rem}
+section{margin-top:1.5rem}
+.halves{grid-template-columns:minmax(0,1fr) 78mm;gap:.9rem 1.8rem;margin-top:.8rem}
+.tank>.rows{margin-top:1rem}
 .others ul{columns:2}
-th,td{padding-left:.7rem}
-.tank,.grave li,.said li,figure,table,.sum{break-inside:avoid}
-h2,h3,caption{break-after:avoid}
-.wide{overflow:visible}
+.others li{padding:.3rem 0}
+.halves,.grave li,.said li,figure,table,.sum{break-inside:avoid}
+h2,h3,caption,.purpose{break-after:avoid}
+a{text-decoration:none}
 }
 `.trim();

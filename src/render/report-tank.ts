@@ -1,12 +1,13 @@
 import type { ShownScaledHalf } from '../desk/schema/shape.ts';
 import type { RunAnswer, WholeTank } from '../desk/sheet-answer.ts';
 import { escaped, formulaHtml } from './markup.ts';
-import { tankPictures } from './report-pictures.ts';
+import { UNPAINTED } from './look.ts';
+import { speciesText } from './spelling.ts';
+import { bandFigure, recordFigures } from './report-pictures.ts';
 import { REPORT_WRITING, capital, faultHtml, saidList } from './report-words.ts';
-import { runTable, standsOut } from './sheet-table.ts';
+import { type RunColumn, runTable, standsOut } from './sheet-table.ts';
 import { tankNotes } from './sheet-notes.ts';
 import {
-  GAS_BASIS,
   budgetWords,
   efficiencyText,
   gasSentence,
@@ -44,12 +45,20 @@ const runsTable = (tank: WholeTank): string => {
   const rows = table.rows.map(({ run, cells }) => {
     const name = escaped(run.name);
     const marked = standsOut(run) === null ? name : `<span class="alarm">${name}</span>`;
-    return `<tr><td>${marked}</td>${cells.map((cell) => `<td>${escaped(cell)}</td>`).join('')}</tr>`;
+    return `<tr><td>${marked}</td>${cells.map((cell, at) => numberCell(cell, table.columns[at])).join('')}</tr>`;
   });
   return (
-    `<div class="wide"><table><caption>Runs</caption><thead><tr><th scope="col">run</th>${head.join('')}</tr></thead>` +
-    `<tbody>${rows.join('')}</tbody></table></div>`
+    `<table class="rows"><caption>Runs</caption><thead><tr><th scope="col">run</th>${head.join('')}</tr></thead>` +
+    `<tbody>${rows.join('')}</tbody></table>`
   );
+};
+
+/** A number, which on a narrow page carries the heading of its column with it. */
+const numberCell = (cell: string, column: RunColumn | undefined): string => {
+  if (column === undefined || cell === '') return '<td class="none"></td>';
+  const { heading, isSpecies, unit } = column;
+  const name = isSpecies ? speciesText(heading, { unicode: true, paint: UNPAINTED }) : heading;
+  return `<td data-of="${escaped(`${name}, ${unit}`)}">${escaped(cell)}</td>`;
 };
 
 const weighedLines = (tank: WholeTank): readonly string[] => {
@@ -57,10 +66,10 @@ const weighedLines = (tank: WholeTank): readonly string[] => {
   const runs = tank.runs.flatMap((run) => {
     if ('fault' in run || run.weighed === null) return [];
     const name = `<b>${escaped(run.name)}</b>`;
-    const { standsOut } = run.weighed;
+    const doubt = standsOut(run);
     const budget = budgetWords(run.weighed, REPORT_WRITING);
     const made = `${name}: ${escaped(efficiencyText(run.weighed))}${budget === '' ? '' : ` (${budget})`}`;
-    return [standsOut === null ? made : `${made}. <span class="alarm">${escaped(standsOut)}</span>`];
+    return [doubt === null ? made : `${made}. <span class="alarm">Stands out</span>: ${escaped(doubt)}`];
   });
   return [`<b>Tank</b>: ${weighedSentence(tank.weighed, REPORT_WRITING)}`, ...runs];
 };
@@ -76,12 +85,7 @@ const targetLines = ({ targets }: WholeTank): readonly string[] =>
   targets.flatMap((target) => ('fault' in target ? [] : [capital(targetSentence(target, REPORT_WRITING))]));
 
 const gasLines = ({ gas }: WholeTank): readonly string[] =>
-  gas.length === 0
-    ? []
-    : [
-        ...gas.map((one) => `${capital(gasSentence(one, REPORT_WRITING))}.`),
-        `<span class="basis">${escaped(GAS_BASIS)}</span>`,
-      ];
+  gas.map((one) => `${capital(gasSentence(one, REPORT_WRITING))}.`);
 
 const noteLines = (tank: WholeTank): readonly string[] => {
   const present = tank.present.map(formulaHtml).join(', ');
@@ -101,14 +105,16 @@ export const tankSection = (tank: WholeTank, at: number, sheetText: string): str
   const broken = [...tank.runs, ...tank.targets, ...('fault' in tank.yield ? [tank.yield] : [])].filter(isFault);
   return [
     `<section class="tank" aria-labelledby="${id}"><h2 id="${id}">${escaped(tank.name)}</h2>${purpose}`,
-    `<div class="halves"><div>${reactionTable(tank)}${runsTable(tank)}`,
+    `<div class="halves"><div>${reactionTable(tank)}</div><div>${bandFigure(tank, id)}</div></div>`,
+    runsTable(tank),
+    `<div class="halves"><div>`,
     saidList('Goals', targetLines(tank)),
     saidList('Current efficiency by weighing', weighedLines(tank)),
     broken.map(({ name, fault }) => faultHtml(name, fault, sheetText)).join(''),
-    `</div><div>${tankPictures(tank, id)}`,
+    saidList('Notes', noteLines(tank)),
+    `</div><div>${recordFigures(tank, id)}`,
     saidList('Records', recordLines(tank)),
     saidList('Gas', gasLines(tank)),
-    saidList('Notes', noteLines(tank)),
     '</div></div></section>',
   ].join('\n');
 };

@@ -131,7 +131,17 @@ const tankLines = (tank: TankAnswer, sheetText: string): readonly string[] => [
 ];
 
 const totals = (sheet: SheetAnswer): readonly string[] =>
-  sheet.totals.runs === 0 ? [] : ['', '## Altogether', '', ...table(['', 'sum'], totalRows(sheet.totals, WRITING))];
+  sheet.totals.runs === 0
+    ? []
+    : [
+        '',
+        '## Altogether',
+        '',
+        ...table(
+          ['', 'sum', ''],
+          totalRows(sheet.totals, WRITING).map(({ name, value, aside }) => [name, value, aside]),
+        ),
+      ];
 
 /** A sheet's answers in Markdown, the grave cautions first. `sheetText` is shown where a part is at fault. */
 export const sheetMarkdown = (sheet: SheetAnswer, sheetText: string): string => {

@@ -72,7 +72,9 @@ export const weighedSentence = (weighed: WeighedTank, write: Writing): string =>
   const runs = weighed.runs === 1 ? 'one weighed run' : `${String(weighed.runs)} weighed runs`;
   const budget = budgetWords(weighed, write);
   const made = budget === '' ? '; no uncertainty is stated' : `; its uncertainty comes from ${budget}`;
-  return `${write.text(efficiencyText(weighed))} by ${runs}${made}.`;
+  const { without } = weighed;
+  const rest = without === null ? '' : ` (${efficiencyText(without)} without what stands out)`;
+  return `${write.text(efficiencyText(weighed))} by ${runs}${rest}${made}.`;
 };
 
 /** A gas rate and the air for it. */
@@ -96,20 +98,25 @@ export const recordSentence = ({ path, rows, time, reversed }: RecordedRun, writ
   return `${many} rows of ${write.text(path)} over ${durationText(time.value)}${both}`;
 };
 
-/** Charge, energy and products of a sum, each as label and value. */
-export const totalRows = (totals: Totals, write: Writing): readonly (readonly [label: string, value: string])[] => {
+/** A sum with its name; `aside` says what it leaves out. */
+export interface TotalRow {
+  readonly name: string;
+  readonly value: string;
+  readonly aside: string;
+}
+
+/** Charge, energy and products of a sum. */
+export const totalRows = (totals: Totals, write: Writing): readonly TotalRow[] => {
   const energy =
-    totals.energy === null ? [] : [['energy', `${fourUnits(totals.energy)}${withoutVoltage(totals)}`] as const];
+    totals.energy === null ? [] : [{ name: 'energy', value: fourUnits(totals.energy), aside: withoutVoltage(totals) }];
   const products = totals.products.flatMap(({ species, mass, volume }) => {
     const both = [mass, volume].flatMap((one) => (one === undefined ? [] : [fourUnits(one)]));
-    return both.length === 0 ? [] : [[write.species(species), both.join(', ')] as const];
+    return both.length === 0 ? [] : [{ name: write.species(species), value: both.join(', '), aside: '' }];
   });
-  return [['charge', fourUnits(totals.charge)], ...energy, ...products];
+  return [{ name: 'charge', value: fourUnits(totals.charge), aside: '' }, ...energy, ...products];
 };
 
 const withoutVoltage = ({ withoutVoltage: count }: Totals): string => {
   if (count === 0) return '';
-  return count === 1
-    ? ', one run without a voltage not counted'
-    : `, ${String(count)} runs without a voltage not counted`;
+  return count === 1 ? 'one run states no voltage' : `${String(count)} runs state no voltage`;
 };

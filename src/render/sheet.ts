@@ -12,7 +12,6 @@ import { runTable, standsOut } from './sheet-table.ts';
 import {
   GAS_BASIS,
   type Writing,
-  fourUnits,
   gasSentence,
   recordSentence,
   targetSentence,
@@ -135,12 +134,14 @@ export const renderHead = (sheet: SheetAnswer, look: Look): string => {
 /** What the whole plant came to. */
 export const renderTotals = ({ totals }: SheetAnswer, look: Look): string => {
   if (totals.runs === 0) return '';
-  const [charge, ...rest] = totalRows(totals, writingFor(look));
-  const energy = rest.filter(([name]) => name === 'energy');
-  const made = rest.filter(([name]) => name !== 'energy').map(([name, value]) => `${name} ${value}`);
-  const rows: readonly (readonly [string, string])[] = [['charge', charge?.[1] ?? fourUnits(totals.charge)], ...energy];
+  const rows = totalRows(totals, writingFor(look));
+  const isFlow = ({ name }: (typeof rows)[number]): boolean => name === 'charge' || name === 'energy';
+  const flows = rows
+    .filter(isFlow)
+    .map(({ name, value, aside }) => [name, aside === '' ? value : `${value}, ${aside}`] as const);
+  const made = rows.filter((row) => !isFlow(row)).map(({ name, value }) => `${name} ${value}`);
   const products = made.length === 0 ? [] : hanging('made', made.join(';  '), asIs);
-  return `${look.paint.strong('Altogether')}\n${page([[...labelled(rows, look), ...products]])}`;
+  return `${look.paint.strong('Altogether')}\n${page([[...labelled(flows, look), ...products]])}`;
 };
 
 /** The first sentence of a caution that may apply: the other formats show it whole. */

@@ -8,7 +8,7 @@ const LEFT = 44;
 const RIGHT = PICTURE_WIDTH - 42;
 const TOP = 22;
 const MIDDLE = 132;
-const GAP = 24;
+const GAP = 34;
 const CURRENT_TOP = MIDDLE + GAP;
 const BOTTOM = CURRENT_TOP + 44;
 /** Pixels of the whole picture. */
@@ -106,13 +106,13 @@ export const recordChart = (trace: readonly TraceStretch[], making: Making | nul
     least((one) => one.least),
     most((one) => one.greatest),
     [BOTTOM, CURRENT_TOP],
-    2,
+    3,
   );
   return [
     ruled(charge, 'A h', [9, 'charge']),
     making === null ? '' : massAxis(charge, making),
     chargeLine(trace, time, charge),
-    ruled(current, 'A', [CURRENT_TOP - 9, 'current']),
+    ruled(current, 'A', [CURRENT_TOP - 12, 'current']),
     currentShape(trace, time, current),
     timeAxis(time),
   ].join('');
