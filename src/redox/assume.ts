@@ -2,7 +2,7 @@ import { speciesMatrix } from '../balance/matrix.ts';
 import type { Numbers } from '../balance/solve.ts';
 import type { Unknown } from '../balance/unknowns.ts';
 import { type IntegerVector, nullSpace, range } from '../exact/matrix.ts';
-import { type Species, isElectron, plainSpecies } from '../species/species.ts';
+import { type Species, ELECTRON, isElectron, plainSpecies } from '../species/species.ts';
 
 /** A balance and the assumption, in words, that singles it out. */
 export interface Assumed {
@@ -11,7 +11,7 @@ export interface Assumed {
 }
 
 /** One condition  row nu = 0  on the numbers, in words without "if". */
-interface Condition {
+export interface Condition {
   readonly words: string;
   readonly row: IntegerVector;
 }
@@ -24,8 +24,9 @@ const triesAmong = (count: number): number => Math.min(400, Math.floor(400_000 /
 /**
  * The balances that `dimension` - 1 simple conditions single out and in which every species with a side takes part on
  * it. Conditions, the first tried first: a reactant gives a product one to one, of a couple or of two forms of an element;
- * an unwritten helper takes no part (a later one before an earlier one, so that the order of the list is its preference);
- * two products, or two reactants, go one to one, those of like elements first.
+ * two products, or two reactants, go one to one, those of like elements first; an unwritten helper takes no part (a later
+ * one before an earlier one, so that the order of the list is its preference), first of these where helpers depend on one
+ * another.
  */
 export const assumedBalances = (unknowns: readonly Unknown[], dimension: number): readonly Assumed[] => {
   const { rows } = speciesMatrix(unknowns.map((unknown) => unknown.species));
@@ -56,34 +57,50 @@ interface Standing {
   readonly index: number;
 }
 
+const standing = (unknowns: readonly Unknown[], side: Unknown['side']): readonly Standing[] =>
+  unknowns.flatMap(({ species, side: own }, index) =>
+    own === side && !isElectron(species) ? [{ species, index }] : [],
+  );
+
+/** Conditions that two products form one to one, those of like elements first. */
+export const ratiosOfProducts = (unknowns: readonly Unknown[]): readonly Condition[] =>
+  oneToOne(unknowns, standing(unknowns, 'right'), 'form');
+
+const oneToOne = (unknowns: readonly Unknown[], all: readonly Standing[], verb: string): readonly Condition[] =>
+  pairsOf(all).map(([a, b]) => ({
+    words: `${plainSpecies(a.species)} and ${plainSpecies(b.species)} ${verb} one to one`,
+    row: rowOf(unknowns, a, b, -1n),
+  }));
+
+/**  nu_a + sign nu_b = 0,  or without b  nu_a = 0. */
+const rowOf = (unknowns: readonly Unknown[], a: Standing, b: Standing | null, sign: bigint): IntegerVector =>
+  range(unknowns.length).map((index) => (index === a.index ? 1n : index === b?.index ? sign : 0n));
+
 const conditionsOn = (unknowns: readonly Unknown[]): readonly Condition[] => {
-  const standing = (side: Unknown['side']): readonly Standing[] =>
-    unknowns.flatMap(({ species, side: own }, index) =>
-      own === side && !isElectron(species) ? [{ species, index }] : [],
-    );
-  const row = (a: Standing, b: Standing | null, sign: bigint): IntegerVector =>
-    range(unknowns.length).map((index) => (index === a.index ? 1n : index === b?.index ? sign : 0n));
-  const pairs = (all: readonly Standing[], verb: string): readonly Condition[] =>
-    pairsOf(all).map(([a, b]) => ({
-      words: `${plainSpecies(a.species)} and ${plainSpecies(b.species)} ${verb} one to one`,
-      row: row(a, b, -1n),
-    }));
-  const [reactants, products] = [standing('left'), standing('right')];
+  const [reactants, products] = [standing(unknowns, 'left'), standing(unknowns, 'right')];
   const isCouple = reactants.length === 1 && products.length === 1;
   const couples = reactants.flatMap((a) => products.map((b): readonly [Standing, Standing] => [a, b]));
   const likely = couples.filter(([a, b]) => isCouple || areForms(a.species, b.species));
+  const free = standing(unknowns, 'free');
+  const idle = free
+    .toReversed()
+    .map((a) => ({ words: `${plainSpecies(a.species)} takes no part`, row: rowOf(unknowns, a, null, 0n) }));
+  const dependent = areDependent(free.map(({ species }) => species));
   return [
     ...likely.map(([a, b]) => ({
       words: `1 ${plainSpecies(a.species)} gives 1 ${plainSpecies(b.species)}`,
-      row: row(a, b, 1n),
+      row: rowOf(unknowns, a, b, 1n),
     })),
-    ...standing('free')
-      .toReversed()
-      .map((a) => ({ words: `${plainSpecies(a.species)} takes no part`, row: row(a, null, 0n) })),
-    ...pairs(products, 'form'),
-    ...pairs(reactants, 'are used'),
+    ...(dependent ? idle : []),
+    ...ratiosOfProducts(unknowns),
+    ...oneToOne(unknowns, reactants, 'are used'),
+    ...(dependent ? [] : idle),
   ].slice(0, MOST_CONDITIONS);
 };
+
+/** Helpers that depend on one another, the electron beside them: to leave one out is then natural, and arbitrary else. */
+const areDependent = (helpers: readonly Species[]): boolean =>
+  nullSpace(speciesMatrix([...helpers, ELECTRON]).rows, helpers.length + 1).length > 0;
 
 /** Two forms of one element: O3 and O2. */
 const areForms = (a: Species, b: Species): boolean => a.composition.size === 1 && unlike(a, b) === 0;

@@ -8,6 +8,7 @@ import { isElectron } from '../species/species.ts';
 import { type Attempt, attempt, finish, notesOf } from './attempt.ts';
 import { type MediumChoice, chooseMedium } from './choose-medium.ts';
 import type { HalfReaction } from './half-reaction.ts';
+import { needless } from './needless.ts';
 import { settleHalf } from './settle-half.ts';
 
 /**
@@ -21,7 +22,10 @@ export const completeHalf = (skeleton: Equation, choice: MediumChoice, settle?: 
 
 const complete = (tried: Attempt, settle: string | undefined): Result<HalfReaction> => {
   const { verdict } = tried;
-  if (verdict.kind === 'unique') return halfOf(tried, finish(tried, verdict.numbers), verdict.dimension);
+  if (verdict.kind === 'unique') {
+    if (settle !== undefined) return needless(settle);
+    return halfOf(tried, finish(tried, verdict.numbers), verdict.dimension);
+  }
   if (verdict.kind !== 'family') return failure(explain(verdict, tried.asWritten));
   return chain(settleHalf(tried, verdict.dimension, settle), ({ reaction, notes }) =>
     halfOf(tried, reaction, verdict.dimension, notes),

@@ -9,6 +9,8 @@ export interface Label {
   readonly name: string;
   readonly element: string;
   readonly number: Rational;
+  /** The atom that one form of an element has more than another, O3 more than O2; its name says so too. */
+  readonly odd?: true;
 }
 
 /** The labels in one formula unit of a species, with their atoms. */

@@ -33,7 +33,7 @@ export const HYDROXIDE = helper(
 );
 const CHLORIDE = helper([['Cl', 1n]], -1n);
 const FLUORIDE = helper([['F', 1n]], -1n);
-const OXIDE = helper([['O', 1n]], -2n);
+export const OXIDE = helper([['O', 1n]], -2n);
 const NITRIDE = helper([['N', 1n]], -3n);
 const CARBONATE = helper(
   [

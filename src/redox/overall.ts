@@ -1,29 +1,28 @@
 import { explain } from '../balance/explain.ts';
 import { type Reaction, showReaction } from '../balance/reaction.ts';
 import type { Numbers } from '../balance/solve.ts';
-import { type Rational, isZero, showRational } from '../exact/rational.ts';
+import { showRational } from '../exact/rational.ts';
 import type { Note } from '../report/note.ts';
-import { type Result, chain, failure, success } from '../report/result.ts';
+import { type Result, type Success, chain, failure, success } from '../report/result.ts';
 import type { Equation } from '../species/equation.ts';
 import { isElectron } from '../species/species.ts';
 import { assumedBalances } from './assume.ts';
 import { type Attempt, attempt, finish, notesOf } from './attempt.ts';
 import { type MediumChoice, chooseMedium } from './choose-medium.ts';
-import { exchangedElectrons } from './exchange.ts';
 import type { Medium } from './medium.ts';
 import { nameCouplings } from './name-coupling.ts';
 import { type PairHalves, halvesOfPair } from './pair-halves.ts';
 import { pairHalves } from './pairs.ts';
+import { needless } from './needless.ts';
 import { settled, severalBalances } from './several.ts';
+import { type RedoxSplit, type Unsplit, splitReaction } from './split.ts';
 
 /** One way to settle a redox skeleton: an oxidation paired with a reduction, or a simple ratio. */
 export interface Coupling {
   readonly assume: string;
   readonly overall: Reaction;
-  /** Exchanged between the halves at the scale of `overall`. */
-  readonly electrons: Rational;
-  /** Each whole and primitive, with its electrons; null where they are not known. */
-  readonly halves: { readonly oxidation: Reaction; readonly reduction: Reaction } | null;
+  /** Its halves, electrons and changes, and the notes on them: what is promised is what settling gives. */
+  readonly split: Success<RedoxSplit>;
 }
 
 /** An overall reaction in lowest whole numbers, recounted, before it is split into halves. */
@@ -62,7 +61,9 @@ const balance = (tried: Attempt, settle: string | undefined): Result<OverallBala
   if (verdict.kind !== 'unique' && verdict.kind !== 'family') return failure(explain(verdict, tried.asWritten));
   const found = (reaction: Reaction, coupling: Coupling | null, notes: readonly Note[]): Result<OverallBalance> =>
     success({ reaction, dimension: verdict.dimension, medium, coupling }, [...notesOf(tried, reaction), ...notes]);
-  if (verdict.kind === 'unique') return found(finish(tried, verdict.numbers), null, []);
+  if (verdict.kind === 'unique') {
+    return settle === undefined ? found(finish(tried, verdict.numbers), null, []) : needless(settle);
+  }
   const couplings = couplingsOf(tried, verdict.dimension);
   if (settle === undefined) return severalBalances(tried, verdict.dimension, couplings.map(showCoupling));
   return chain(
@@ -77,24 +78,36 @@ const couplingsOf = (tried: Attempt, dimension: number): readonly Coupling[] => 
   if (paired.length > 0) return paired;
   return assumedBalances(tried.unknowns, dimension).flatMap(({ assume, numbers }) => {
     const overall = finish(tried, numbers);
-    const electrons = exchangedElectrons(overall);
-    return electrons === undefined || isZero(electrons) ? [] : [{ assume, overall, electrons, halves: null }];
+    return couplingOf(assume, { reaction: overall, medium: tried.medium, halves: null, exchanged: null });
   });
 };
+
+/** The coupling of a reaction in which electrons pass; none else. */
+const couplingOf = (assume: string, unsplit: Unsplit): readonly Coupling[] => {
+  const split = splitReaction(unsplit);
+  return split.ok ? [{ assume, overall: unsplit.reaction, split }] : [];
+};
+
+/** Pairs whose two halves are known, where there are any. */
 
 const pairedCouplings = (tried: Attempt): readonly Coupling[] => {
   const { unknowns } = tried;
   const pairs = pairHalves(unknowns).map((pair) => ({ pair, halves: halvesOfPair(unknowns, pair) }));
-  const names = nameCouplings(unknowns, pairs);
-  return pairs.map(({ pair, halves }, index) => ({
-    assume: names[index] ?? '',
-    overall: finish(tried, pair.numbers),
-    electrons: pair.electrons,
-    halves: reactionsOf(tried, halves),
-  }));
+  const split = pairs.flatMap(({ pair, halves }) =>
+    couplingOf('', {
+      reaction: finish(tried, pair.numbers),
+      medium: tried.medium,
+      halves: reactionsOf(tried, halves),
+      exchanged: pair.electrons,
+    }).map((coupling) => ({ pair, halves, coupling })),
+  );
+  const whole = split.filter(({ coupling }) => coupling.split.value.oxidation !== null);
+  const kept = whole.length > 0 ? whole : split;
+  const names = nameCouplings(unknowns, kept);
+  return kept.map(({ coupling }, index) => ({ ...coupling, assume: names[index] ?? '' }));
 };
 
-const reactionsOf = (tried: Attempt, { unknowns, oxidation, reduction }: PairHalves): Coupling['halves'] => {
+const reactionsOf = (tried: Attempt, { unknowns, oxidation, reduction }: PairHalves): Unsplit['halves'] => {
   if (oxidation === null || reduction === null) return null;
   const reaction = (numbers: Numbers): Reaction => finish({ ...tried, unknowns }, numbers);
   return { oxidation: reaction(oxidation), reduction: reaction(reduction) };
@@ -103,5 +116,5 @@ const reactionsOf = (tried: Attempt, { unknowns, oxidation, reduction }: PairHal
 const showCoupling = (coupling: Coupling): Parameters<typeof severalBalances>[2][number] => ({
   assume: coupling.assume,
   overall: showReaction(coupling.overall),
-  electrons: showRational(coupling.electrons),
+  electrons: showRational(coupling.split.value.electrons),
 });

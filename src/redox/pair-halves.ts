@@ -5,13 +5,15 @@ import { lcmOf } from '../exact/integer.ts';
 import { type IntegerMatrix, nullSpace, primitiveVector, range } from '../exact/matrix.ts';
 import { denominatorOf, numeratorOf } from '../exact/rational.ts';
 import { ELECTRON, sameSpecies } from '../species/species.ts';
-import { type Labelled, labelRows, labelsOfAll } from './labels.ts';
-import { PROTON } from './media.ts';
+import { type Labelled, labelRows } from './labels.ts';
+import { PROTON, WATER } from './media.ts';
+import { labelsInSkeleton } from './odd-atom.ts';
 import type { MeasuredChange, Pair } from './pair.ts';
+import { isSolvent } from './solvent.ts';
 
 /** The halves of a pair, each whole and primitive; null where conservation label by label leaves one of them open. */
 export interface PairHalves {
-  /** Those of the skeleton, then H^+ if it was not among them, then the electron. */
+  /** Those of the skeleton, then H^+ and H2O if they were not among them, then the electron. */
   readonly unknowns: readonly Unknown[];
   readonly oxidation: Numbers | null;
   readonly reduction: Numbers | null;
@@ -19,22 +21,20 @@ export interface PairHalves {
 
 /**
  * The halves of `pair`: beside elements and charge each oxidation number is conserved but for the half's own change. Only
- * what the overall reaction holds is used if that settles the half, else what the medium lends, else H^+ too, which the
- * halves of a molecular skeleton hand to one another.
+ * what the overall reaction holds is used if that settles the half, else what the medium lends, else H^+ too, then H2O,
+ * which the halves of a molecular skeleton hand to one another.
  */
 export const halvesOfPair = (skeletonUnknowns: readonly Unknown[], pair: Pair): PairHalves => {
   const lent = (species: Unknown['species']): Unknown => ({ species, side: 'free', written: false, helper: true });
-  const hasProton = skeletonUnknowns.some(({ species }) => sameSpecies(species, PROTON));
-  const extra = [...(hasProton ? [] : [lent(PROTON)]), { ...lent(ELECTRON), helper: false }];
-  const unknowns = [...skeletonUnknowns, ...extra];
-  const labelled = labelsOfAll(unknowns.map(({ species }) => species)) ?? [];
+  const extra = [PROTON, WATER].filter((one) => !skeletonUnknowns.some(({ species }) => sameSpecies(species, one)));
+  const unknowns = [...skeletonUnknowns, ...extra.map(lent), { ...lent(ELECTRON), helper: false }];
+  const labelled = labelsInSkeleton(unknowns) ?? [];
   const all = range(unknowns.length);
   const electron = unknowns.length - 1;
   const sets = [
-    [...all.filter((index) => (pair.numbers[index] ?? 0n) !== 0n), electron],
-    [...range(skeletonUnknowns.length), electron],
-    all,
-  ];
+    all.filter((index) => (pair.numbers[index] ?? 0n) !== 0n),
+    ...range(extra.length + 1).map((more) => range(skeletonUnknowns.length + more)),
+  ].map((columns) => [...columns, electron]);
   const half = (change: MeasuredChange): Numbers | null => {
     for (const columns of sets) {
       const numbers = solveHalf(unknowns, labelled, change, columns);
@@ -71,9 +71,9 @@ const solveHalf = (
   return staysOnSides(unknowns, numbers) ? primitiveVector(numbers) : null;
 };
 
-/** Written species stand where they are written, or not at all. */
+/** Written species stand where they are written, or not at all; what the solvent gives in one half the other may take. */
 const staysOnSides = (unknowns: readonly Unknown[], numbers: Numbers): boolean =>
-  unknowns.every(({ side }, index) => {
-    const nu = numbers[index] ?? 0n;
-    return side === 'free' || (side === 'left' ? nu <= 0n : nu >= 0n);
+  unknowns.every((unknown, index) => {
+    const [nu, side] = [numbers[index] ?? 0n, unknown.side];
+    return isSolvent(unknown) || side === 'free' || (side === 'left' ? nu <= 0n : nu >= 0n);
   });

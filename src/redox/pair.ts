@@ -22,4 +22,6 @@ export interface Pair {
   readonly numbers: Numbers;
   /** Exchanged at that scale. */
   readonly electrons: Rational;
+  /** What is assumed besides, in words, where the two changes leave a choice: "HO2^- and O2 form one to one". */
+  readonly also?: string;
 }

@@ -21,12 +21,11 @@ export interface RedoxReaction extends RedoxSplit {
  * `no-oxidation-numbers`.
  */
 export const balanceRedox = (skeleton: Equation, choice: MediumChoice, settle?: string): Result<RedoxReaction> =>
-  chain(balanceOverall(skeleton, choice, settle), ({ reaction, dimension, medium, coupling }) => {
-    const [halves, exchanged] = [coupling?.halves ?? null, coupling?.electrons ?? null];
-    return map(splitReaction({ reaction, medium, halves, exchanged }), (split) => ({
+  chain(balanceOverall(skeleton, choice, settle), ({ reaction, dimension, medium, coupling }) =>
+    map(coupling?.split ?? splitReaction({ reaction, medium, halves: null, exchanged: null }), (split) => ({
       ...split,
       overall: reaction,
       dimension,
       medium,
-    }));
-  });
+    })),
+  );

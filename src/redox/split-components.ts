@@ -35,7 +35,8 @@ export const isLent = (background: Background, element: string, number: Rational
 
 /**
  * The species of a reaction, helpers aside, in groups: two belong together where they share an element that no helper
- * holds, or where atoms pass between them that could not be a helper's (H2O2 -> O2).
+ * holds, or where atoms pass between them that could not be a helper's, whether they change (H2O2 -> O2) or keep their
+ * oxidation number (O3 -> O2, H2O2 -> HO2^-).
  */
 export const componentsOf = (
   terms: readonly Term[],
@@ -61,10 +62,28 @@ export const componentsOf = (
     const lent = isLent(background, flow.element, flow.from) || isLent(background, flow.element, flow.to);
     if (!lent) join(flow.source.key, flow.sink.key);
   }
+  for (const one of own) {
+    for (const other of own)
+      if (signOf(one.nu) !== signOf(other.nu) && shareAtoms(one, other, background))
+        join(one.species.key, other.species.key);
+  }
   return [...new Set(group.values())].map((label) => {
     const members = own.filter(({ species }) => group.get(species.key) === label);
     return { terms: members, flows: flows.filter((flow) => concerns(flow, members, background)) };
   });
+};
+
+/** Atoms with one oxidation number in both that could not be a helper's. */
+const shareAtoms = (one: Term, other: Term, background: Background): boolean => {
+  const [here, there] = [oxidationNumbers(one.species), oxidationNumbers(other.species)];
+  if (here.kind === 'undecided' || there.kind === 'undecided') return false;
+  return [...here.numbers].some(([element, numbers]) =>
+    numbers.some(
+      (number) =>
+        !isLent(background, element, number) &&
+        there.numbers.get(element)?.some((same) => same.equals(number)) === true,
+    ),
+  );
 };
 
 /** A flow concerns a component where atoms of its own, not of a helper's kind, begin or end there. */

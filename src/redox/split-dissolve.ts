@@ -29,6 +29,7 @@ const dissolves = (keys: readonly string[]): boolean => {
   const others = keys.filter((key) => !DISSOLVING_CATIONS.has(key));
   const meets = (set: ReadonlySet<string>): boolean => others.some((key) => set.has(key));
   const onlyDissolving = others.length < keys.length && !others.some((key) => key.endsWith('+'));
+  if (others.includes('O^2-')) return false;
   if (onlyDissolving) return true;
   if (others.includes('H^+')) return meets(STRONG_ACIDS);
   if (others.includes('OH^-')) return meets(DISSOLVED_BASES);

@@ -1,15 +1,14 @@
 import type { Reaction, Term } from '../balance/reaction.ts';
 import { type Rational, ONE, ZERO, isZero, signOf } from '../exact/rational.ts';
-import type { Species } from '../species/species.ts';
-import { HYDROXIDE, PROTON, WATER, mediumRow } from './media.ts';
+import { HYDROXIDE, PROTON, WATER } from './media.ts';
 import type { Medium } from './medium.ts';
 import { hasTwoStates, sumOfTerms, termsOf } from './split-amounts.ts';
 import { type SplitHalf, completeTerms, electronsOf, halfOfTerms, helpersOf } from './split-complete.ts';
 import { type Background, type Component, backgroundOf, componentsOf, sidesOf } from './split-components.ts';
 import { divide } from './split-divide.ts';
-import { flowsOf } from './split-flows.ts';
-import { speciesOf } from './split-salt.ts';
-import { type IonicReaction, type Reach, ionicReaction } from './split-ionic.ts';
+import { elementsOf, flowsOf } from './split-flows.ts';
+import { ionicForms } from './split-forms.ts';
+import type { IonicReaction } from './split-ionic.ts';
 
 /** The two halves of an overall reaction and the electrons that they exchange at its scale. */
 export interface Halves {
@@ -20,66 +19,61 @@ export interface Halves {
 
 /**
  * The oxidation and the reduction that add up to `reaction`, spectators aside: by connected elements, and by oxidation
- * numbers where both sides share an element. Null where no two halves give the reaction back.
+ * numbers where both sides share an element. Null where no two halves give the reaction back. What only changes partners
+ * is put into a half (Cu^2+ -> CuO beside NO3^- -> NO2) where nothing else helps.
  */
 export const halvesOf = (reaction: Reaction, medium: Medium): Halves | null => {
   if (hasTwoStates(reaction)) return null;
-  for (const reach of ['dissolved', 'every salt'] as const) {
-    for (const ionic of ionicForms(reaction, medium, reach)) {
-      const found = splitIonic(ionic);
+  const forms = ionicForms(reaction, medium);
+  for (const hosts of [null, reaction]) {
+    for (const form of forms) {
+      const found = splitIonic(form, hosts);
       if (found !== null) return found;
     }
   }
   return null;
 };
 
-/**
- * As the medium has it; where that lends no water but an ion of water is written, in acid or base; where carbonate gives
- * carbon dioxide, with these two as helpers; and with an alkali ion that one half hands to the other, as host to host.
- */
-const ionicForms = (reaction: Reaction, medium: Medium, reach: Reach): readonly IonicReaction[] => {
-  const ionic = ionicReaction(reaction, medium, reach);
-  const has = (helper: Species): boolean => ionic.amounts.has(helper.key);
-  const carbonate = mediumRow('molten-carbonate');
-  const gives = carbonate?.helpers.every(has) === true;
-  const handed = handedOver(ionic);
-  const shown = has(PROTON) ? mediumRow('acid') : has(HYDROXIDE) ? mediumRow('base') : undefined;
-  const lacks = shown !== undefined && !ionic.medium.helpers.some(({ key }) => key === WATER.key);
-  return [
-    ionic,
-    ...(lacks ? [{ ...ionic, medium: { name: shown.name, helpers: shown.helpers } }] : []),
-    ...(gives ? [{ ...ionic, medium: { name: carbonate.name, helpers: carbonate.helpers } }] : []),
-    ...(handed === null ? [] : [{ ...ionic, medium: { name: null, helpers: [...ionic.medium.helpers, handed] } }]),
-  ];
-};
-
-const ALKALI = ['Li', 'Na', 'K'];
-
-/** The ion of an alkali metal that stands in several species but not as an ion. */
-const handedOver = ({ amounts }: IonicReaction): Species | null => {
-  const holders = (element: string): number =>
-    termsOf(amounts).filter(({ species }) => species.composition.has(element)).length;
-  const symbol = ALKALI.find((element) => holders(element) > 1 && !amounts.has(`${element}^+`));
-  if (symbol === undefined) return null;
-  return speciesOf([{ multiplier: ONE, members: [{ kind: 'atom', symbol, massNumber: null, count: ONE }] }], ONE);
-};
-
-const splitIonic = ({ amounts, medium }: IonicReaction): Halves | null => {
+/** `hosts`: the reaction whose formulas say with which half bystanders go; null: there may be none. */
+const splitIonic = ({ amounts, medium }: IonicReaction, hosts: Reaction | null): Halves | null => {
   const terms = termsOf(amounts);
   const background = backgroundOf(helpersOf(medium));
   const { flows, decided } = flowsOf(terms);
   const components = componentsOf(terms, flows, { ...background, keys: new Set(medium.helpers.map(({ key }) => key)) });
   const oxidised: Term[] = [];
   const reduced: Term[] = [];
+  const bystanders: Component[] = [];
   for (const component of components) {
     const parts = partsOf(component, background, medium);
     if (parts === null) return null;
     oxidised.push(...parts.oxidised);
     reduced.push(...parts.reduced);
+    if (parts.oxidised.length + parts.reduced.length === 0) bystanders.push(component);
+  }
+  if (bystanders.length > 0 && hosts === null) return null;
+  for (const one of bystanders) {
+    const meets = (half: readonly Term[]): boolean => stoodTogether(one.terms, half, hosts, background);
+    (meets(oxidised) && !meets(reduced) ? oxidised : reduced).push(...one.terms);
   }
   const halves = joined(oxidised, reduced, { amounts, medium });
   const given = components.reduce((sum, component) => sum.add(givenBy(component, background)), ZERO);
   return halves === null || !decided || halves.electrons.equals(given) ? halves : null;
+};
+
+/** Elements of both, those of helpers aside, stand in one formula of the reaction: Cu and N in Cu(NO3)2. */
+const stoodTogether = (
+  one: readonly Term[],
+  other: readonly Term[],
+  hosts: Reaction | null,
+  background: Background,
+): boolean => {
+  const own = (terms: readonly Term[]): readonly string[] =>
+    terms.flatMap(({ species }) => elementsOf(species)).filter((element) => !background.elements.has(element));
+  const [here, there] = [own(one), own(other)];
+  return (hosts?.terms ?? []).some(({ species }) => {
+    const elements = elementsOf(species);
+    return elements.some((element) => here.includes(element)) && elements.some((element) => there.includes(element));
+  });
 };
 
 /** Electrons that the oxidised atoms of a component give, by their oxidation numbers. */

@@ -16,7 +16,7 @@ const SALT_IONS = `
   V^2+ V^3+ VO^2+ VO2^+ Cr^2+ Cr^3+ Mn^2+ Mn^3+ Fe^2+ Fe^3+ Co^2+ Co^3+ Ni^2+ Cu^2+ Cu^+ Ag^+ Au^3+ Au^+ Zn^2+ Cd^2+
   Hg^2+ Hg2^2+ Pd^2+ Pt^2+ Rh^3+ Ru^3+ Ir^3+ Th^4+ U^3+ U^4+ UO2^2+ Cu(NH3)4^2+ Ag(NH3)2^+ Co(NH3)6^3+ Co(NH3)6^2+
   Ni(NH3)6^2+ Zn(NH3)4^2+ Cr(H2O)6^3+ Fe(H2O)6^2+ Fe(H2O)6^3+ N(CH3)4^+ N(C4H9)4^+
-  F^- Cl^- Br^- I^- I3^- H^- OH^- HO^- CN^- SCN^- NCS^- CNS^- OCN^- NCO^- CNO^- N3^- S^2- HS^- S2^2- Se^2- Te^2- O2^2- O2^-
+  F^- Cl^- Br^- I^- I3^- H^- OH^- HO^- CN^- SCN^- NCS^- CNS^- OCN^- NCO^- CNO^- N3^- S^2- HS^- S2^2- Se^2- Te^2- O^2- O2^2- O2^-
   ClO^- ClO2^- ClO3^- ClO4^- BrO^- BrO3^- BrO4^- IO^- IO3^- IO4^- OCl^- OBr^- OI^- HF2^-
   SO4^2- HSO4^- SO3^2- HSO3^- S2O3^2- S2O4^2- S2O5^2- S2O6^2- S2O7^2- S2O8^2- S3O6^2- S4O6^2- SeO4^2- SeO3^2- TeO4^2-
   TeO3^2- NO3^- NO2^- PO4^3- HPO4^2- H2PO4^- HPO3^2- H2PO2^- P2O7^4- AsO4^3- HAsO4^2- H2AsO4^- AsO3^3- AsO2^- SbO3^-
@@ -84,12 +84,12 @@ const fewestUnits = (members: readonly Member[]): readonly Portion[] | null => {
   return null;
 };
 
-/** Peroxides and superoxides are those of the first two groups: MnO2 is no salt. Common practice, no source. */
+/** Oxides, peroxides and superoxides of ions are those of the first two groups: MnO2 is no salt. Common practice, no source. */
 const isLikely = (ions: readonly Portion[]): boolean =>
-  !ions.some(({ species }) => species.formula === 'O2') ||
-  ions.every(({ species }) => PEROXIDE_PARTNERS.has(species.key));
+  !ions.some(({ species }) => species.formula === 'O2' || species.key === 'O^2-') ||
+  ions.every(({ species }) => OXIDE_PARTNERS.has(species.key));
 
-const PEROXIDE_PARTNERS = new Set('O2^2- O2^- H^+ Li^+ Na^+ K^+ Rb^+ Cs^+ Mg^2+ Ca^2+ Sr^2+ Ba^2+ NH4^+'.split(' '));
+const OXIDE_PARTNERS = new Set('O^2- O2^2- O2^- H^+ Li^+ Na^+ K^+ Rb^+ Cs^+ Mg^2+ Ca^2+ Sr^2+ Ba^2+ NH4^+'.split(' '));
 
 /**
  * `members` cut into `kinds` ions, the charge so far and theirs together 0.

@@ -2,9 +2,10 @@ import { type Reaction, plainReaction, showReaction } from '../balance/reaction.
 import { type Rational, isZero } from '../exact/rational.ts';
 import { type Note, note } from '../report/note.ts';
 import { type Result, failure, success } from '../report/result.ts';
+import { PROTON, mediumRow } from './media.ts';
 import type { Medium } from './medium.ts';
 import { type SplitHalf, electronsOf, halfOfTerms } from './split-complete.ts';
-import { type OxidationChange, distinctChanges, flowsOf, increaseIn } from './split-flows.ts';
+import { type Flow, type OxidationChange, distinctChanges, elementsOf, flowsOf, increaseIn } from './split-flows.ts';
 import { type Halves, halvesOf } from './split-halves.ts';
 
 /** What is split: an overall reaction in its medium, with the halves of a coupling where one settled it. */
@@ -41,7 +42,7 @@ export const splitReaction = (unsplit: Unsplit): Result<RedoxSplit> => {
     electrons,
     oxidation: halves?.oxidation ?? null,
     reduction: halves?.reduction ?? null,
-    changes: distinctChanges(flows),
+    changes: distinctChanges(halves === null ? flows : flowsInHalves(halves, reaction)),
   };
   return success(split, [...(halves === null ? [halvesOmitted()] : []), ...(decided ? [] : [undecided()])]);
 };
@@ -51,10 +52,26 @@ const chosenHalves = ({ reaction, medium, halves, exchanged }: Unsplit, found: H
   if (halves === null || exchanged === null || found?.electrons.equals(exchanged) === true) return found;
   const spelled = reaction.terms.map(({ species }) => species);
   const taken = (half: Reaction): SplitHalf => ({
-    half: halfOfTerms(half.terms, medium, spelled).half,
+    half: halfOfTerms(half.terms, mediumOf(half, medium), spelled).half,
     multiplier: exchanged.div(electronsOf(half.terms).abs()),
   });
   return { oxidation: taken(halves.oxidation), reduction: taken(halves.reduction), electrons: exchanged };
+};
+
+/** Acid where a half hands H^+ to the other though the medium lends none. */
+const mediumOf = (half: Reaction, medium: Medium): Medium => {
+  const acid = mediumRow('acid');
+  const handsOver = half.terms.some(({ species }) => species.key === PROTON.key);
+  if (acid === undefined || !handsOver || medium.helpers.some(({ key }) => key === PROTON.key)) return medium;
+  return { name: acid.name, helpers: acid.helpers };
+};
+
+/** The changes in each half by itself, the elements in the order of the reaction: what two halves show, the sum may hide. */
+const flowsInHalves = ({ oxidation, reduction }: Halves, reaction: Reaction): readonly Flow[] => {
+  const elements = [...new Set(reaction.terms.flatMap(({ species }) => elementsOf(species)))];
+  return [oxidation, reduction]
+    .flatMap(({ half }) => flowsOf(half.reaction.terms).flows)
+    .toSorted((a, b) => elements.indexOf(a.element) - elements.indexOf(b.element));
 };
 
 const noElectrons = (reaction: Reaction, decided: boolean): Result<never> => {

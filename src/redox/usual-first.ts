@@ -4,13 +4,14 @@ import { range } from '../exact/matrix.ts';
 import { ZERO, signOf } from '../exact/rational.ts';
 import { type Labelled, countOf } from './labels.ts';
 import type { Pair } from './pair.ts';
+import { isSolvent } from './solvent.ts';
 import { untracedElements } from './untraced.ts';
 
 /**
  * The chemist's usual answer first: pairs in which all that changes in a half goes the same way, up in the oxidation and
- * down in the reduction; then those with the fewest changes; then of two partners rather than one; then those whose
- * products keep the elements of the reactant; then with the fewest electrons per atom that changes; then with the smallest
- * numbers.
+ * down in the reduction; then those with the fewest changes; then those that leave the solvent and other helpers alone;
+ * then of two partners rather than one; then those whose products keep the elements of the reactant; then those that assume
+ * nothing besides; then with the fewest electrons per atom that changes; then with the smallest numbers.
  */
 export const usualFirst =
   (unknowns: readonly Unknown[], labelled: readonly Labelled[]) =>
@@ -23,8 +24,10 @@ export const usualFirst =
       return [
         isPure(pair) ? 0 : 1,
         oxidation.transitions.length + reduction.transitions.length,
+        unknowns.filter((one, at) => isSolvent(one) && (oxidation.index === at || reduction.index === at)).length,
         oxidation.index === reduction.index ? 1 : 0,
         strange,
+        pair.also === undefined ? 0 : 1,
         electrons.div(atoms).valueOf(),
         Number(size),
       ];

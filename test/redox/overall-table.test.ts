@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { showRational } from '../../src/exact/rational.ts';
-import { exchangedElectrons } from '../../src/redox/exchange.ts';
 import { balanceOverall } from '../../src/redox/overall.ts';
+import { flowsOf, increaseIn } from '../../src/redox/split-flows.ts';
 import { plainReaction } from '../../src/balance/reaction.ts';
 import { plainEquation, residualByHand } from '../support/plain.ts';
 import { readTable } from '../support/table.ts';
@@ -29,7 +29,7 @@ describe('the table of overall reactions', () => {
     const result = balanceOverall(plainEquation(`${left} -> ${right}`), medium);
     if (!result.ok) throw new Error(result.fault.message);
     expect(terms(plainReaction(result.value.reaction))).toEqual(terms(reaction));
-    const exchanged = exchangedElectrons(result.value.reaction);
-    expect(exchanged === undefined ? undefined : showRational(exchanged)).toBe(electrons);
+    const { flows, decided } = flowsOf(result.value.reaction.terms);
+    expect(decided ? showRational(increaseIn(flows)) : '').toBe(electrons);
   });
 });

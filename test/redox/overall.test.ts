@@ -1,8 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { plainReaction } from '../../src/balance/reaction.ts';
 import { showRational } from '../../src/exact/rational.ts';
-import { exchangedElectrons } from '../../src/redox/exchange.ts';
 import { balanceOverall } from '../../src/redox/overall.ts';
+import { flowsOf, increaseIn } from '../../src/redox/split-flows.ts';
 import type { ShownCoupling } from '../../src/report/fault.ts';
 import { plainEquation } from '../support/plain.ts';
 import { faultWith, overall } from '../support/redox.ts';
@@ -71,17 +71,18 @@ describe('couplings', () => {
   it('bring their two halves', () => {
     const skeleton = plainEquation('MnO4^- + H2O2 -> Mn^2+ + O2');
     const result = balanceOverall(skeleton, 'acid', 'if H2O2 is only oxidised, to O2');
-    const halves = result.ok ? result.value.coupling?.halves : null;
-    expect(halves && plainReaction(halves.oxidation)).toBe('H2O2 -> O2 + 2 H^+ + 2 e^-');
-    expect(halves && plainReaction(halves.reduction)).toBe('MnO4^- + 8 H^+ + 5 e^- -> Mn^2+ + 4 H2O');
+    const split = result.ok ? result.value.coupling?.split.value : undefined;
+    expect(split?.oxidation && plainReaction(split.oxidation.half.reaction)).toBe('H2O2 -> O2 + 2 H^+ + 2 e^-');
+    expect(split?.reduction && plainReaction(split.reduction.half.reaction)).toBe(
+      'MnO4^- + 8 H^+ + 5 e^- -> Mn^2+ + 4 H2O',
+    );
   });
 });
 
 describe('the electrons exchanged', () => {
   const electrons = (skeleton: string, medium: string): string | undefined => {
     const result = balanceOverall(plainEquation(skeleton), medium);
-    const count = result.ok ? exchangedElectrons(result.value.reaction) : undefined;
-    return count === undefined ? undefined : showRational(count);
+    return result.ok ? showRational(increaseIn(flowsOf(result.value.reaction.terms).flows)) : undefined;
   };
 
   it('are the sum of all increases in oxidation number', () => {
