@@ -1,11 +1,17 @@
 import type { AmountsAnswerShown } from '../desk/schema/answer.ts';
 import type { Quantity } from '../desk/schema/shape.ts';
+import { budgetLines } from './budget.ts';
 import { type Alignment, type Cell, columns } from './columns.ts';
 import { figureOf, uncertaintyOf } from './figure.ts';
 import type { Look } from './look.ts';
 import { speciesText } from './spelling.ts';
+import { tankLines } from './tank-balance.ts';
 
 type Blocks = readonly (readonly string[])[];
+type Quantities = Readonly<Record<string, Quantity>>;
+
+/** One cell's answer: of the ask itself, or of a further cell in series. */
+type OneCell = Pick<AmountsAnswerShown, 'quantities' | 'alongside' | 'electronsPerMole' | 'derived'>;
 
 const worded = (name: string): string => name.replaceAll('_', ' ');
 
@@ -14,42 +20,72 @@ const exactDecimal = (exact: string): string => {
   return denominator === undefined ? exact : `${exact} (${(Number(numerator) / Number(denominator)).toPrecision(6)})`;
 };
 
-const quantityRow = (name: string, quantity: Quantity, look: Look): readonly (Cell | string)[] => [
-  { text: worded(name).padEnd(10), paint: look.paint.faint },
-  figureOf(quantity),
-  { text: uncertaintyOf(quantity), paint: look.paint.faint },
-  quantity.unit,
-];
+const quantityRows = ({ quantities, derived }: OneCell, look: Look): readonly (readonly (Cell | string)[])[] =>
+  Object.entries(quantities).map(([name, quantity]) => [
+    { text: worded(name).padEnd(10), paint: look.paint.faint },
+    figureOf(quantity),
+    { text: uncertaintyOf(quantity), paint: look.paint.faint },
+    quantity.unit,
+    // what was given has no relation
+    { text: derived.find((one) => one.quantity === name)?.relation ?? '', paint: look.paint.faint },
+  ]);
 
-/** What goes into the table of the other species: what differs between them. */
+/** What goes into a table of species: what differs between them. */
 const PER_SPECIES = ['amount', 'mass', 'volume', 'mass_per_charge'] as const;
 
-const alongsideRows = (answer: AmountsAnswerShown, look: Look): readonly (readonly (Cell | string)[])[] => {
-  const others = Object.entries(answer.alongside);
-  const shown = PER_SPECIES.filter((name) => others.some(([, quantities]) => quantities[name] !== undefined));
-  const head = ['for the same charge', 'e- per mole', ...shown.flatMap((name) => [worded(name), ''])];
-  const rows = others.map(([species, quantities]) => [
+interface SpeciesRow {
+  readonly species: string;
+  readonly electronsPerMole: string | undefined;
+  readonly quantities: Quantities;
+}
+
+const speciesTable = (heading: string, rows: readonly SpeciesRow[], look: Look): readonly string[] => {
+  if (rows.length === 0) return [];
+  const shown = PER_SPECIES.filter((name) => rows.some(({ quantities }) => quantities[name] !== undefined));
+  const head = [heading, 'e- per mole', ...shown.flatMap((name) => [worded(name), ''])];
+  const lines = rows.map(({ species, electronsPerMole, quantities }) => [
     speciesText(species, look),
-    exactDecimal(answer.electronsPerMole[species] ?? '-'),
+    exactDecimal(electronsPerMole ?? '-'),
     ...shown.flatMap((name) => {
       const quantity = quantities[name];
       return quantity === undefined ? ['', ''] : [figureOf(quantity), quantity.unit];
     }),
   ]);
-  return others.length === 0 ? [] : [head.map((text): Cell => ({ text, paint: look.paint.faint })), ...rows];
+  const side: readonly Alignment[] = ['left', 'right', ...PER_SPECIES.flatMap((): Alignment[] => ['right', 'left'])];
+  return columns([head.map((text): Cell => ({ text, paint: look.paint.faint })), ...lines], side);
 };
 
-/** The quantities of the species asked, then the other species for the same charge. */
+const alongsideRows = ({ alongside, electronsPerMole }: OneCell): readonly SpeciesRow[] =>
+  Object.entries(alongside).map(([species, quantities]) => ({
+    species,
+    electronsPerMole: electronsPerMole[species],
+    quantities,
+  }));
+
+/** The species asked: it alone does not stand alongside. */
+const askedOf = ({ electronsPerMole, alongside }: OneCell): string | undefined =>
+  Object.keys(electronsPerMole).find((name) => !(name in alongside));
+
+const seriesRows = (series: readonly OneCell[]): readonly SpeciesRow[] =>
+  series.map((cell) => {
+    const species = askedOf(cell) ?? '-';
+    return { species, electronsPerMole: cell.electronsPerMole[species], quantities: cell.quantities };
+  });
+
+/**
+ * The quantities of the species asked, each with the relation it follows from, then the other species for the same
+ * charge, the further cells in series, the balance of the tank and the budget, where they were asked for.
+ */
 export const amountsBlocks = (answer: AmountsAnswerShown, species: string, look: Look): Blocks => {
-  const asked = Object.keys(answer.electronsPerMole).find((name) => !(name in answer.alongside));
+  const asked = askedOf(answer);
   const electrons = asked === undefined ? undefined : answer.electronsPerMole[asked];
   const head = look.paint.strong(speciesText(asked ?? species, look));
-  const perMole = electrons === undefined ? [] : [`${head}   ${exactDecimal(electrons)} mol of electrons per mole`];
-  const quantities = Object.entries(answer.quantities).map(([name, quantity]) => quantityRow(name, quantity, look));
-  const side: readonly Alignment[] = ['left', 'right', ...PER_SPECIES.flatMap((): Alignment[] => ['right', 'left'])];
   return [
-    perMole.length === 0 ? [head] : perMole,
-    columns(quantities, ['left', 'right', 'left', 'left']),
-    columns(alongsideRows(answer, look), side),
+    [electrons === undefined ? head : `${head}   ${exactDecimal(electrons)} mol of electrons per mole`],
+    columns(quantityRows(answer, look), ['left', 'right', 'left', 'left', 'left']),
+    speciesTable('for the same charge', alongsideRows(answer), look),
+    speciesTable('in series', seriesRows(answer.series ?? []), look),
+    tankLines(answer.tank, look),
+    budgetLines(answer.budgets, look),
   ];
 };

@@ -12,10 +12,26 @@ const couplingRow = (coupling: ShownCoupling, look: Look): readonly string[] => 
   `--settle ${JSON.stringify(coupling.assume)}`,
 ];
 
-const list = (head: string, rows: readonly (readonly string[])[], look: Look): readonly string[] => {
-  const shown = columns(rows.slice(0, MOST), ['left', 'right', 'left']);
-  const more = rows.length > MOST ? [`and ${String(rows.length - MOST)} more`] : [];
+const list = (head: string, rows: readonly (readonly string[])[], look: Look, most = MOST): readonly string[] => {
+  const shown = columns(rows.slice(0, most), ['left', 'right', 'left']);
+  const more = rows.length > most ? [`and ${String(rows.length - most)} more`] : [];
   return rows.length === 0 ? [] : [look.paint.faint(head), ...indented([...shown, ...more])];
+};
+
+const reactionRows = (reactions: readonly ShownReaction[], look: Look): readonly (readonly string[])[] =>
+  reactions.map(({ plain }) => [reactionText(plain, look)]);
+
+/** The assumptions that settle it, else what balances; then, where asked for, what every balance is a sum of. */
+const waysOut = (fault: Fault & { readonly code: 'several-balances' }, look: Look): readonly string[] => {
+  const { couplings, family, irreducible = [] } = fault;
+  const rows = couplings.map((coupling) => couplingRow(coupling, look));
+  return [
+    ...(rows.length > 0 ? list('settle it with one of these', rows, look) : []),
+    ...(rows.length > 0 || irreducible.length > 0
+      ? []
+      : list('each of these balances', reactionRows(family, look), look)),
+    ...list('every whole balance is a sum of these', reactionRows(irreducible, look), look, irreducible.length),
+  ];
 };
 
 /** What a fault carries besides its sentence: the readings to choose from, the ways to settle it, how it would balance. */
@@ -28,14 +44,7 @@ const particulars = (fault: Fault, look: Look): readonly string[] => {
       look,
     );
   }
-  if (fault.code === 'several-balances' && fault.couplings.length > 0) {
-    return list(
-      'settle it with one of these',
-      fault.couplings.map((coupling) => couplingRow(coupling, look)),
-      look,
-    );
-  }
-  if (fault.code === 'several-balances') return list('each of these balances', fault.family.flatMap(one), look);
+  if (fault.code === 'several-balances') return waysOut(fault, look);
   if (fault.code === 'wrong-side') return list('as it would balance', one(fault.reaction), look);
   if (fault.code === 'no-electrons') return list('as it balances', one(fault.reaction), look);
   return fault.code === 'not-enough-given' ? list('missing', [[fault.missing.join(', ')]], look) : [];

@@ -1,6 +1,6 @@
 import { ABSENCE } from '../caution/cautions.ts';
 import type { ShownCaution, ShownNote } from '../desk/schema/shape.ts';
-import { hanging } from './block.ts';
+import { hanging, wrapped } from './block.ts';
 import type { Look, Paint } from './look.ts';
 
 /** The notes of an answer, one below the other. */
@@ -21,16 +21,16 @@ const asIs: Paint['strong'] = (text) => text;
 export const graveLines = (cautions: readonly ShownCaution[], look: Look): readonly string[] =>
   cautions.filter(isGrave).flatMap((one) => hanging('danger', cautionText(one), look.paint.bad));
 
-/** The other cautions, those that depend on a condition last, and the line that none shown does not mean safe. */
+/** Below the cautions: that none shown does not mean safe. */
+export const absenceLines = (cautions: readonly ShownCaution[], look: Look): readonly string[] =>
+  cautions.length === 0 ? [] : wrapped(ABSENCE).map(look.paint.faint);
+
+/** The other cautions, those that depend on a condition last. */
 export const cautionLines = (cautions: readonly ShownCaution[], look: Look): readonly string[] => {
-  if (cautions.length === 0) return [];
   const others = cautions.filter((one) => !isGrave(one));
   const lastOpen = [
     ...others.filter(({ conditional }) => conditional !== true),
     ...others.filter(({ conditional }) => conditional === true),
   ];
-  return [
-    ...lastOpen.flatMap((one) => hanging('caution', cautionText(one), asIs, look.paint.warn)),
-    ...hanging('', ABSENCE, look.paint.faint),
-  ];
+  return lastOpen.flatMap((one) => hanging('caution', cautionText(one), asIs, look.paint.warn));
 };

@@ -5,7 +5,7 @@ import { PATTERNS } from './report-pictures.ts';
 import { REPORT_STYLE } from './report-style.ts';
 import { tankSection } from './report-tank.ts';
 import { REPORT_WRITING, capital, faultHtml } from './report-words.ts';
-import { graveOf, othersOf } from './sheet-cautions.ts';
+import { graveOf, makesGas, othersOf } from './sheet-cautions.ts';
 import { tankSummary } from './sheet-summary.ts';
 import { GAS_BASIS, totalRows } from './sheet-words.ts';
 
@@ -23,15 +23,12 @@ const graveSection = (sheet: SheetAnswer): string => {
   return `<section class="grave" aria-labelledby="first"><h2 id="first">Read first</h2><ul>${grave.map(cautionItem).join('')}</ul></section>`;
 };
 
-const gasBasis = ({ tanks }: SheetAnswer): string =>
-  tanks.some((tank) => !('fault' in tank) && tank.gas.length > 0) ? `${escaped(GAS_BASIS)}<br>` : '';
-
 const otherSection = (sheet: SheetAnswer): string => {
   const others = othersOf(sheet);
   const list = others.length === 0 ? '' : `<ul>${others.map(cautionItem).join('')}</ul>`;
   return (
     `<section class="tank others" aria-labelledby="cautions"><h2 id="cautions">Cautions</h2>${list}` +
-    `<p class="basis">${gasBasis(sheet)}${escaped(ABSENCE)}</p></section>`
+    `<p class="basis">${makesGas(sheet) ? `${escaped(GAS_BASIS)}<br>` : ''}${escaped(ABSENCE)}</p></section>`
   );
 };
 
@@ -58,11 +55,11 @@ const glanceRow = (tank: TankAnswer, at: number): string => {
 const glanceSection = (sheet: SheetAnswer): string => {
   const sums = totalRows(sheet.totals, REPORT_WRITING).map(({ name, value, aside }) => {
     const small = aside === '' ? '' : `<span class="basis">${escaped(aside)}</span>`;
-    return `<div><dt>${name}</dt><dd>${escaped(value)}${small}</dd></div>`;
+    return `<li><span class="what">${name}</span>${escaped(value)}${small}</li>`;
   });
   return [
     '<section aria-labelledby="glance"><h2 id="glance">At a glance</h2>',
-    sheet.totals.runs === 0 ? '' : `<dl class="sum">${sums.join('')}</dl>`,
+    sheet.totals.runs === 0 ? '' : `<ul class="sum">${sums.join('')}</ul>`,
     '<table class="rows glance"><thead><tr><th scope="col">tank</th><th scope="col">made</th>',
     '<th scope="col">charge</th><th scope="col">efficiency</th><th scope="col"><span class="basis">to look at</span></th></tr></thead>',
     `<tbody>${sheet.tanks.map(glanceRow).join('')}</tbody></table></section>`,

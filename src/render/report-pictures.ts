@@ -12,8 +12,8 @@ export const PATTERNS =
   '<rect width="5" height="5" fill="#fff" style="stroke:none"/><line x1="0" y1="0" x2="0" y2="5" stroke="#5b6770" stroke-width="2"/>' +
   '</pattern></defs></svg>';
 
-/** Where the current of a tank went: a band of shares for each electrode. `id` begins the names of its elements. */
-export const bandFigure = ({ name, currentUse, product }: WholeTank, id: string): string => {
+/** Where the current of a tank went: a band of shares for each electrode. */
+export const bandFigure = ({ name, currentUse, product }: WholeTank): string => {
   const cathode = electrodeBand('cathode', currentUse.cathode, 0);
   const anode = electrodeBand('anode', currentUse.anode, cathode.height + 10);
   const title = `${name}, where the current went. Cathode: ${bandText(currentUse.cathode)}. Anode: ${bandText(currentUse.anode)}.`;
@@ -23,7 +23,7 @@ export const bandFigure = ({ name, currentUse, product }: WholeTank, id: string)
       ? 'Shares as the reactions are written.'
       : `Share of ${formulaHtml(product)} by the efficiency of the runs; the other electrode as its reactions are written.`;
   return (
-    `<figure><h3>Where the current went</h3>${picture(`${id}-band`, title, PICTURE_WIDTH, height, cathode.markup + anode.markup)}` +
+    `<figure><h3>Where the current went</h3>${picture(title, PICTURE_WIDTH, height, cathode.markup + anode.markup)}` +
     `<figcaption>${basis}</figcaption></figure>`
   );
 };
@@ -35,13 +35,13 @@ const makingOf = (run: WholeRun): Making | null => {
   return { species: run.product, unit: mass.unit, perCharge: mass.value / charge.value };
 };
 
-const recordFigure = (run: WholeRun, tank: WholeTank, id: string): string => {
+const recordFigure = (run: WholeRun, tank: WholeTank): string => {
   if (run.record === null || run.record.trace.length < 2) return '';
   const making = makingOf(run);
   const mass =
     making === null ? '' : ` The mass of ${formulaHtml(run.product)} follows the charge at the efficiency of the run.`;
   const title = `${tank.name}, ${run.name}: charge${making === null ? '' : ' and mass'} over time, and the current below.`;
-  const chart = picture(id, title, PICTURE_WIDTH, CHART_HEIGHT, recordChart(run.record.trace, making));
+  const chart = picture(title, PICTURE_WIDTH, CHART_HEIGHT, recordChart(run.record.trace, making));
   return (
     `<figure><h3>${escaped(run.name)}: charge${making === null ? '' : ' and mass'} over time</h3>${chart}` +
     `<figcaption>From ${escaped(run.record.path)}.${mass}</figcaption></figure>`
@@ -49,5 +49,5 @@ const recordFigure = (run: WholeRun, tank: WholeTank, id: string): string => {
 };
 
 /** A chart of charge, mass and current over time for each run with a record. */
-export const recordFigures = (tank: WholeTank, id: string): string =>
-  tank.runs.map((run, at) => ('fault' in run ? '' : recordFigure(run, tank, `${id}-run${String(at + 1)}`))).join('');
+export const recordFigures = (tank: WholeTank): string =>
+  tank.runs.map((run) => ('fault' in run ? '' : recordFigure(run, tank))).join('');

@@ -34,13 +34,12 @@ thead th span{display:block;font-size:.78rem}
 .reactions td:last-child{padding-left:.6rem}
 .reactions tr:last-child td{font-weight:600}
 .reactions tr:last-child th,.reactions tr:last-child td{border-bottom:0}
-.sum{display:flex;flex-wrap:wrap;gap:.9rem 2.2rem;margin:.6rem 0 1.4rem;padding:0}
-.sum div{min-width:5.5rem}
-.sum dt{font-size:.82rem;color:var(--soft)}
-.sum dd{margin:0;font-size:1.1rem}
+ul{list-style:none;margin:0;padding:0}
+.sum{display:flex;flex-wrap:wrap;gap:.9rem 2.2rem;margin:.6rem 0 1.4rem}
+.sum li{min-width:5.5rem;font-size:1.1rem}
+.sum .what{display:block;font-size:.82rem;color:var(--soft)}
 .sum .basis{display:block}
 a{color:inherit;text-decoration-color:var(--sea);text-underline-offset:.2em}
-ul{list-style:none;margin:0;padding:0}
 .said li{padding:.28rem 0;border-bottom:1px solid var(--hair);overflow-wrap:anywhere}
 .said li:last-child{border-bottom:0}
 .said b{font-weight:600}

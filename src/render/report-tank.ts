@@ -103,18 +103,26 @@ export const tankSection = (tank: WholeTank, at: number, sheetText: string): str
   const id = `tank${String(at + 1)}`;
   const purpose = tank.purpose === null ? '' : `<p class="purpose">${escaped(capital(tank.purpose))}</p>`;
   const broken = [...tank.runs, ...tank.targets, ...('fault' in tank.yield ? [tank.yield] : [])].filter(isFault);
-  return [
-    `<section class="tank" aria-labelledby="${id}"><h2 id="${id}">${escaped(tank.name)}</h2>${purpose}`,
-    `<div class="halves"><div>${reactionTable(tank)}</div><div>${bandFigure(tank, id)}</div></div>`,
-    runsTable(tank),
-    `<div class="halves"><div>`,
+  const left = [
     saidList('Goals', targetLines(tank)),
     saidList('Current efficiency by weighing', weighedLines(tank)),
     broken.map(({ name, fault }) => faultHtml(name, fault, sheetText)).join(''),
     saidList('Notes', noteLines(tank)),
-    `</div><div>${recordFigures(tank, id)}`,
-    saidList('Records', recordLines(tank)),
-    saidList('Gas', gasLines(tank)),
-    '</div></div></section>',
-  ].join('\n');
+  ];
+  const right = [recordFigures(tank), saidList('Records', recordLines(tank)), saidList('Gas', gasLines(tank))];
+  return [
+    `<section class="tank" aria-labelledby="${id}"><h2 id="${id}">${escaped(tank.name)}</h2>${purpose}`,
+    halves(reactionTable(tank), bandFigure(tank)),
+    runsTable(tank),
+    halves(left.join(''), right.join('')),
+    '</section>',
+  ]
+    .filter((part) => part !== '')
+    .join('\n');
+};
+
+/** Two columns side by side, one below the other on a narrow page; what is empty takes no room. */
+const halves = (left: string, right: string): string => {
+  const both = [left, right].filter((one) => one !== '').map((one) => `<div>${one}</div>`);
+  return both.length === 0 ? '' : `<div class="halves">${both.join('')}</div>`;
 };

@@ -7,3 +7,7 @@ export const graveOf = ({ cautions }: SheetAnswer): readonly SheetCaution[] =>
 /** The rest, for the end of the page. */
 export const othersOf = ({ cautions }: SheetAnswer): readonly SheetCaution[] =>
   cautions.filter(({ grave }) => grave !== true);
+
+/** True where a tank makes gas at a known rate: then the page says how the rates were found. */
+export const makesGas = ({ tanks }: SheetAnswer): boolean =>
+  tanks.some((tank) => !('fault' in tank) && tank.gas.length > 0);

@@ -3,7 +3,7 @@ import type { ShownScaledHalf } from '../desk/schema/shape.ts';
 import { excerpt } from '../report/excerpt.ts';
 import type { SheetAnswer, SheetCaution, SheetFault, TankAnswer, WholeTank } from '../desk/sheet-answer.ts';
 import { UNPAINTED } from './look.ts';
-import { graveOf, othersOf } from './sheet-cautions.ts';
+import { graveOf, makesGas, othersOf } from './sheet-cautions.ts';
 import { tankNotes } from './sheet-notes.ts';
 import { runTable } from './sheet-table.ts';
 import {
@@ -106,7 +106,7 @@ const fault = ({ name, fault: found }: SheetFault, sheetText: string): readonly 
 
 const wholeTank = (tank: WholeTank, sheetText: string): readonly string[] => {
   const targets = tank.targets.flatMap((one) => ('fault' in one ? [] : [targetSentence(one, WRITING)]));
-  const gas = tank.gas.length === 0 ? [] : [...tank.gas.map((one) => gasSentence(one, WRITING)), plain(GAS_BASIS)];
+  const gas = tank.gas.map((one) => gasSentence(one, WRITING));
   const present =
     tank.present.length === 0 ? [] : [`there, and taking no part: ${tank.present.map(WRITING.species).join(', ')}`];
   const broken = [...tank.runs, ...tank.targets, tank.yield].filter((part): part is SheetFault => 'fault' in part);
@@ -159,6 +159,7 @@ export const sheetMarkdown = (sheet: SheetAnswer, sheetText: string): string => 
     '',
     ...others.map(cautionLine),
     ...(others.length === 0 ? [] : ['']),
+    ...(makesGas(sheet) ? [GAS_BASIS, ''] : []),
     ABSENCE,
   ].join('\n')}\n`;
 };

@@ -6,7 +6,7 @@ import { hanging, labelled, page, wrapped } from './block.ts';
 import { type Cell, columns, indented } from './columns.ts';
 import type { Look } from './look.ts';
 import { halfRows } from './reactions.ts';
-import { graveOf, othersOf } from './sheet-cautions.ts';
+import { graveOf, makesGas, othersOf } from './sheet-cautions.ts';
 import { tankNotes } from './sheet-notes.ts';
 import { runTable, standsOut } from './sheet-table.ts';
 import {
@@ -159,7 +159,7 @@ export const renderCautions = (sheet: SheetAnswer, look: Look): string => {
   const holding = others.filter(({ when }) => when === null).flatMap((caution) => cautionLines(caution, look, asIs));
   const open = others.filter(({ when }) => when !== null).flatMap((caution) => conditionLines(caution, look));
   const short = open.length === 0 ? [] : [look.paint.faint('In short, where it applies:'), ...open];
-  const gas = sheet.tanks.some((tank) => !('fault' in tank) && tank.gas.length > 0) ? wrapped(GAS_BASIS, WIDE) : [];
+  const gas = makesGas(sheet) ? wrapped(GAS_BASIS, WIDE) : [];
   const last = [...gas, ...wrapped(ABSENCE, WIDE)].map(look.paint.faint);
   return `${look.paint.strong('Cautions')}\n${indented([...holding, ...short, ...last]).join('\n')}\n`;
 };

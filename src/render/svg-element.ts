@@ -41,9 +41,9 @@ export const pathThrough = (points: readonly (readonly [number, number])[]): str
   points.map(([x, y], at) => `${at === 0 ? 'M' : 'L'}${number(x)} ${number(y)}`).join('');
 
 /** A picture with a title that is read aloud; it is as wide as its place allows, up to `width` pixels. */
-export const picture = (id: string, title: string, width: number, height: number, inside: string): string =>
+export const picture = (title: string, width: number, height: number, inside: string): string =>
   element(
     'svg',
-    { role: 'img', 'aria-labelledby': id, viewBox: `0 0 ${number(width)} ${number(height)}`, width, height },
-    `<title id="${escaped(id)}">${escaped(title)}</title>${inside}`,
+    { role: 'img', 'aria-label': title, viewBox: `0 0 ${number(width)} ${number(height)}`, width, height },
+    `<title>${escaped(title)}</title>${inside}`,
   );

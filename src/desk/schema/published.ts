@@ -17,6 +17,8 @@ type Node = z.core.JSONSchema.BaseSchema;
  * of it. What is text there may be either.
  */
 const asWritten = (node: Node): void => {
+  // Keys are text in any reading.
+  delete node.propertyNames;
   if (node.type !== 'string') return;
   if (node.enum === undefined) Object.assign(node, { type: ['string', 'number'] });
   else if (node.enum.includes('true')) {
