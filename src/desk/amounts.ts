@@ -88,6 +88,7 @@ const readHalves = (
           text: half,
           medium: ask.medium,
           settle: ask.settle,
+          sharedSettle: halves.length > 1,
           field,
           mediumField: 'medium',
         };

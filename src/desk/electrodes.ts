@@ -4,6 +4,7 @@ import { electrodesOfDiagram } from '../cell/diagram.ts';
 import type { MediumChoice } from '../redox/choose-medium.ts';
 import type { HalfReaction } from '../redox/half-reaction.ts';
 import { completeHalf } from '../redox/half.ts';
+import { needless } from '../redox/needless.ts';
 import { type RedoxReaction, balanceRedox } from '../redox/redox.ts';
 import type { Rational } from '../exact/rational.ts';
 import { type Result, chain, failure, inField, map, success } from '../report/result.ts';
@@ -22,6 +23,8 @@ export interface SkeletonFields {
   readonly text: string;
   readonly medium: AskedMedium | undefined;
   readonly settle: string | undefined;
+  /** `settle` is said of several skeletons at once. */
+  readonly sharedSettle?: boolean;
   readonly share?: string | undefined;
   readonly field: string;
   readonly mediumField: string;
@@ -55,7 +58,13 @@ export const balanceWhole = ({ skeleton, medium }: ReadSkeleton, fields: Skeleto
 
 /** The second step for a half-reaction: helpers and electrons found. */
 export const balanceSkeleton = ({ skeleton, medium }: ReadSkeleton, fields: SkeletonFields): Result<HalfReaction> =>
-  inField(renamed(completeHalf(skeleton, medium, fields.settle), fields.mediumField), fields.field);
+  inField(renamed(completed(skeleton, medium, fields), fields.mediumField), fields.field);
+
+/** A `settle` that several skeletons share is for those that need it. */
+const completed = (skeleton: Equation, medium: MediumChoice, fields: SkeletonFields): Result<HalfReaction> => {
+  const alone = fields.sharedSettle === true ? completeHalf(skeleton, medium) : null;
+  return alone?.ok === true && alone.value.dimension === 1 ? alone : completeHalf(skeleton, medium, fields.settle);
+};
 
 const fieldsAt = (cell: ComposedFields, electrode: Electrode): readonly SkeletonFields[] =>
   cell[electrode].map((reaction, index) => {
@@ -65,6 +74,7 @@ const fieldsAt = (cell: ComposedFields, electrode: Electrode): readonly Skeleton
       text: own.skeleton,
       medium: own.medium ?? cell.medium,
       settle: own.settle ?? cell.settle,
+      sharedSettle: own.settle === undefined,
       share: own.share,
       field,
       mediumField: own.medium === undefined ? 'medium' : `${field}.medium`,
@@ -92,10 +102,10 @@ export const readElectrodes = (cell: ComposedFields, options: DeskOptions): Resu
   const fields = [...anode, ...fieldsAt(cell, 'cathode')];
   return chain(allByRank(fields.map((one) => readSkeleton(one, options))), (skeletons) => {
     const halves = skeletons.map((one, at) => placed(one, fields[at]));
-    return map(allByRank(halves), (list) => ({
-      anode: list.slice(0, anode.length),
-      cathode: list.slice(anode.length),
-    }));
+    return chain(allByRank(halves), (list) => {
+      if (list.every(({ half }) => half.dimension === 1) && cell.settle !== undefined) return needless(cell.settle);
+      return success({ anode: list.slice(0, anode.length), cathode: list.slice(anode.length) });
+    });
   });
 };
 

@@ -5,6 +5,6 @@ export const needless = (settle: string): Result<never> =>
   failure({
     code: 'bad-ask',
     field: 'settle',
-    message: `Nothing is to be settled by ${JSON.stringify(settle)}: this skeleton has one balance.`,
+    message: `Nothing is to be settled by ${JSON.stringify(settle)}: here conservation leaves one balance.`,
     hint: 'Leave settle out.',
   });

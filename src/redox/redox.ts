@@ -1,6 +1,7 @@
 import type { Reaction } from '../balance/reaction.ts';
-import { type Result, chain, map } from '../report/result.ts';
+import { type Result, chain, map, success } from '../report/result.ts';
 import type { Equation } from '../species/equation.ts';
+import { withMediumOfHalves } from './assumed-medium.ts';
 import type { MediumChoice } from './choose-medium.ts';
 import type { Medium } from './medium.ts';
 import { balanceOverall } from './overall.ts';
@@ -20,7 +21,12 @@ export interface RedoxReaction extends RedoxSplit {
  * Faults, in this order: those of `balanceOverall`, then `no-electrons`. Notes: theirs, `halves-omitted` and
  * `no-oxidation-numbers`.
  */
-export const balanceRedox = (skeleton: Equation, choice: MediumChoice, settle?: string): Result<RedoxReaction> =>
+export const balanceRedox = (skeleton: Equation, choice: MediumChoice, settle?: string): Result<RedoxReaction> => {
+  const result = balanceAndSplit(skeleton, choice, settle);
+  return result.ok ? success(result.value, withMediumOfHalves(result.notes, result.value)) : result;
+};
+
+const balanceAndSplit = (skeleton: Equation, choice: MediumChoice, settle?: string): Result<RedoxReaction> =>
   chain(balanceOverall(skeleton, choice, settle), ({ reaction, dimension, medium, coupling }) =>
     map(coupling?.split ?? splitReaction({ reaction, medium, halves: null, exchanged: null }), (split) => ({
       ...split,
