@@ -1,5 +1,14 @@
 import { Command, Option, type CommandUnknownOpts } from '@commander-js/extra-typings';
 import {
+  amountsFields,
+  budgetOption,
+  bypassOption,
+  cellsOption,
+  correlationOption,
+  seriesOption,
+  tankOption,
+} from './amounts-option.ts';
+import {
   anodeMediumOption,
   anodeOption,
   cathodeMediumOption,
@@ -17,11 +26,13 @@ import {
   collectPairs,
   commonFields,
   defineOption,
+  foldOption,
   given,
   helpersOption,
   jsonOption,
   mediumOption,
   plainOption,
+  requestFields,
   settleOption,
   strictOption,
   whereOption,
@@ -32,14 +43,15 @@ const halfOption = new Option(
   '--half <REACTION>',
   'a half-reaction; several run in parallel, each with " @ 95 %" behind it for its share; repeatable',
 ).argParser<readonly string[]>(collect);
-const speciesOption = new Option('--species <SPECIES>', 'whose amounts are asked').makeOptionMandatory();
+const speciesOption = new Option('--species <SPECIES>', 'whose amounts are asked: --species Cu').makeOptionMandatory();
 const givenOption = new Option(
   '--given <QUANTITY=VALUE>',
-  'what is known: current="2 A", time="1 h 30 min", efficiency="96 %", mass="12.4 g" ...; repeatable',
+  'what is known: --given current="2 A" --given time="1 h 30 min", efficiency, mass, volume ...; repeatable',
 ).argParser<Pairs>(collectPairs);
-const wantOption = new Option('--want <QUANTITY=UNIT>', 'the unit to answer in: mass=kg; repeatable').argParser<Pairs>(
-  collectPairs,
-);
+const wantOption = new Option(
+  '--want <QUANTITY=UNIT>',
+  'the unit to answer in: --want mass=kg; repeatable',
+).argParser<Pairs>(collectPairs);
 
 interface ReactionOptions {
   readonly half?: readonly string[] | undefined;
@@ -69,6 +81,13 @@ export const amountsCommand = (shell: Shell): CommandUnknownOpts => {
     .addOption(separatorOption)
     .addOption(diagramOption)
     .addOption(settleOption)
+    .addOption(cellsOption)
+    .addOption(bypassOption)
+    .addOption(seriesOption)
+    .addOption(tankOption)
+    .addOption(budgetOption)
+    .addOption(correlationOption)
+    .addOption(foldOption)
     .addOption(whereOption)
     .addOption(defineOption)
     .addOption(strictOption)
@@ -82,6 +101,11 @@ export const amountsCommand = (shell: Shell): CommandUnknownOpts => {
         'couplet amounts --half "Zn^2+ -> Zn @ 90 %" --half "H^+ -> H2" --species Zn --given charge="1 kA h"',
         'couplet amounts --anode "H2O -> O2(g)" --cathode "Cu^2+ -> Cu" --species O2 --given current="2 A" \\',
         '                --given time="1 h" --given temperature="25 °C" --given pressure="1 bar"',
+        'couplet amounts --anode "H2O -> O2" --cathode "Cu^2+ -> Cu" --species Cu --given charge="1 kA h" --tank',
+        'couplet amounts --half "Cl^- -> Cl2" --species Cl2 --given charge="1 kA h" --cells 24 --bypass "2 %"',
+        'couplet amounts --half "Cu^2+ -> Cu" --species Cu --given current="2.00(2) A" --given time="1 h ± 5 s" \\',
+        '                --budget --correlation current,time=0.5',
+        'couplet amounts --half "Cu^2+ -> Cu" --species Cu --series "Ag: Ag^+ -> Ag; mass=4.025 g"',
       ),
     );
   return command.action((options) => {
@@ -94,6 +118,7 @@ export const amountsCommand = (shell: Shell): CommandUnknownOpts => {
     const { medium, settle } = balancingFields(options);
     const cell = isCell ? { cell: cellFields(options) } : electrodeFields(options);
     const fields = given({ ...cell, species, given: options.given ?? {}, want, medium, settle });
-    return shell.ask({ ask: 'amounts', ...fields, ...commonFields(options) }, options);
+    const more = { ...amountsFields(options), ...requestFields(options), ...commonFields(options) };
+    return shell.ask({ ask: 'amounts', ...fields, ...more }, options);
   });
 };

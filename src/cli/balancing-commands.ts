@@ -3,12 +3,17 @@ import {
   balancingFields,
   commonFields,
   defineOption,
+  foldOption,
   helpersOption,
+  irreducibleOption,
   jsonOption,
   mediumOption,
+  perOption,
   plainOption,
+  requestFields,
   settleOption,
   strictOption,
+  styleOption,
   whereOption,
 } from './options.ts';
 import { type Shell, examples } from './shell.ts';
@@ -21,9 +26,13 @@ export const halfCommand = (shell: Shell): CommandUnknownOpts =>
     .addOption(mediumOption)
     .addOption(helpersOption)
     .addOption(settleOption)
+    .addOption(perOption)
+    .addOption(irreducibleOption)
+    .addOption(foldOption)
     .addOption(whereOption)
     .addOption(defineOption)
     .addOption(strictOption)
+    .addOption(styleOption)
     .addOption(plainOption)
     .addOption(jsonOption)
     .addHelpText(
@@ -33,10 +42,16 @@ export const halfCommand = (shell: Shell): CommandUnknownOpts =>
         'couplet half "Zn(OH)4^2- -> Zn" --medium base',
         'couplet half "Cu(CN)2^- -> Cu" --helpers "CN^-"',
         'couplet half "Li1-xCoO2 -> LiCoO2" --helpers "Li^+" --where x=0.4',
+        'couplet half "O2 -> H2O" --medium acid --per electron',
+        'couplet half "MnO4^- + H3O^+ -> Mn^2+ + H2O" --fold-hydronium',
+        'couplet half "MnO4^- -> Mn^2+" --medium acid --style latex',
       ),
     )
     .action((skeleton, options) =>
-      shell.ask({ ask: 'half', skeleton, ...balancingFields(options), ...commonFields(options) }, options),
+      shell.ask(
+        { ask: 'half', skeleton, ...balancingFields(options), ...requestFields(options), ...commonFields(options) },
+        options,
+      ),
     );
 
 /** `redox`: a skeleton to its overall reaction and halves. */
@@ -47,9 +62,13 @@ export const redoxCommand = (shell: Shell): CommandUnknownOpts =>
     .addOption(mediumOption)
     .addOption(helpersOption)
     .addOption(settleOption)
+    .addOption(perOption)
+    .addOption(irreducibleOption)
+    .addOption(foldOption)
     .addOption(whereOption)
     .addOption(defineOption)
     .addOption(strictOption)
+    .addOption(styleOption)
     .addOption(plainOption)
     .addOption(jsonOption)
     .addHelpText(
@@ -58,8 +77,13 @@ export const redoxCommand = (shell: Shell): CommandUnknownOpts =>
         'couplet redox "Cr2O7^2- + Fe^2+ -> Cr^3+ + Fe^3+" --medium acid',
         'couplet redox "Cl2 -> Cl^- + ClO3^-" --medium base',
         'couplet redox "CN^- + ClO^- -> CNO^- + Cl^-" --medium base --json',
+        'couplet redox "MnO4^- + Fe^2+ -> Mn^2+ + Fe^3+" --medium acid --per "Fe^2+"',
+        'couplet redox "MnO4^- + H2O2 -> Mn^2+ + O2" --medium acid --irreducible',
       ),
     )
     .action((skeleton, options) =>
-      shell.ask({ ask: 'redox', skeleton, ...balancingFields(options), ...commonFields(options) }, options),
+      shell.ask(
+        { ask: 'redox', skeleton, ...balancingFields(options), ...requestFields(options), ...commonFields(options) },
+        options,
+      ),
     );

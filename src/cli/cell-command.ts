@@ -13,12 +13,16 @@ import {
   balancingFields,
   commonFields,
   defineOption,
+  foldOption,
   helpersOption,
   jsonOption,
   mediumOption,
+  perOption,
   plainOption,
+  requestFields,
   settleOption,
   strictOption,
+  styleOption,
   whereOption,
 } from './options.ts';
 import { type Shell, examples } from './shell.ts';
@@ -36,9 +40,12 @@ export const cellCommand = (shell: Shell): CommandUnknownOpts => {
     .addOption(separatorOption)
     .addOption(diagramOption)
     .addOption(settleOption)
+    .addOption(perOption)
+    .addOption(foldOption)
     .addOption(whereOption)
     .addOption(defineOption)
     .addOption(strictOption)
+    .addOption(styleOption)
     .addOption(plainOption)
     .addOption(jsonOption)
     .addHelpText(
@@ -49,13 +56,20 @@ export const cellCommand = (shell: Shell): CommandUnknownOpts => {
         '             --cathode "H2O -> H2 @ 8 %" --medium base',
         'couplet cell --anode "Cl^- -> Cl2" --cathode "H2O -> H2" --cathode-medium base --separator',
         'couplet cell --diagram "Zn | Zn^2+ || Cu^2+ | Cu"',
+        'couplet cell --anode "H2O -> O2" --cathode "Cu^2+ -> Cu" --per "Cu" --style html',
       ),
     );
   return command.action((options) => {
     const missing = missingOfCell(options);
     if (missing !== null) command.error(missing);
     return shell.ask(
-      { ask: 'cell', ...cellFields(options), ...balancingFields(options), ...commonFields(options) },
+      {
+        ask: 'cell',
+        ...cellFields(options),
+        ...balancingFields(options),
+        ...requestFields(options),
+        ...commonFields(options),
+      },
       options,
     );
   });

@@ -1,9 +1,10 @@
 import { Chalk } from 'chalk';
+import type { PrintStyle } from '../notation/print/print.ts';
 import { type Look, UNPAINTED } from '../render/look.ts';
 import type { World } from './world.ts';
 
-/** What a terminal or a pipe gets; `plain` asks for the canonical spelling on a terminal too. */
-export const lookFor = ({ terminal, colour }: World, plain = false): Look => {
+/** What a terminal or a pipe gets; `plain` asks for the canonical spelling on a terminal too, `style` for its own. */
+export const lookFor = ({ terminal, colour }: World, plain = false, style?: PrintStyle): Look => {
   const chalk = new Chalk({ level: 1 });
   const paint = {
     strong: chalk.bold,
@@ -13,5 +14,6 @@ export const lookFor = ({ terminal, colour }: World, plain = false): Look => {
     bad: chalk.red,
     mark: chalk.underline,
   };
-  return { unicode: terminal && !plain, paint: colour ? paint : UNPAINTED };
+  const unicode = style === undefined ? terminal && !plain : style === 'unicode';
+  return { unicode, paint: colour ? paint : UNPAINTED };
 };

@@ -1,7 +1,11 @@
-import type { Answer } from '../desk/schema/answer.ts';
+import type { Answer, Answered } from '../desk/schema/answer.ts';
+import type { PrintStyle } from '../notation/print/print.ts';
 import type { Fault } from '../report/fault.ts';
-import { renderAnswer } from '../render/answer.ts';
+import { type Subject, renderAnswer, renderRemarks } from '../render/answer.ts';
+import { auditMarkdown } from '../render/audit-markdown.ts';
 import { renderFault } from '../render/fault.ts';
+import type { Look } from '../render/look.ts';
+import { type MarkupStyle, styledLines } from '../render/styled.ts';
 import { lookFor } from './look.ts';
 import type { ExitCode, World } from './world.ts';
 
@@ -12,7 +16,12 @@ export type AskFields = Readonly<Record<string, unknown>>;
 export interface Showing {
   readonly json?: true | undefined;
   readonly plain?: true | undefined;
+  readonly style?: PrintStyle | undefined;
+  /** Of an audit: a table to be pasted into a report. */
+  readonly markdown?: boolean | undefined;
 }
+
+const lookOf = ({ plain, style }: Showing, world: World): Look => lookFor(world, plain, style);
 
 /** The text that a fault's field names: of "anode[1]" the skeleton that stands there; null where there is none. */
 export const textAt = (ask: unknown, field: string | undefined): string | null => {
@@ -33,13 +42,37 @@ export const exitCodeOf = (given: Answer): ExitCode => {
 };
 
 /** What an answer is about, for its heading. */
-const subjectOf = (ask: AskFields): { readonly text: string } => {
-  const text = ask['equation'] ?? ask['species'];
-  return { text: typeof text === 'string' ? text : '' };
+const subjectOf = (ask: AskFields): Subject => {
+  const text = (name: string): string => {
+    const field = ask[name];
+    return typeof field === 'string' ? field : '';
+  };
+  const parts = { anode: text('anode'), cathode: text('cathode'), overall: text('overall') };
+  return { text: text('equation') || text('species'), parts };
 };
 
 const showFault = (fault: Fault, ask: AskFields, showing: Showing, world: World): void => {
-  world.err(renderFault(fault, textAt(ask, fault.field), lookFor(world, showing.plain)));
+  world.err(renderFault(fault, textAt(ask, fault.field), lookOf(showing, world)));
+};
+
+const markupOf = ({ style }: Showing): MarkupStyle | null =>
+  style === undefined || style === 'plain' || style === 'unicode' ? null : style;
+
+/** A page for a person; or the formulas alone, to be pasted: then what must be known besides goes to standard error. */
+const showAnswer = async (given: Answered, ask: AskFields, showing: Showing, world: World): Promise<void> => {
+  if (showing.markdown === true && given.ask === 'audit') {
+    await world.out(auditMarkdown(given, subjectOf(ask)));
+    return;
+  }
+  const markup = markupOf(showing);
+  const look = lookOf(showing, world);
+  if (markup === null) {
+    await world.out(renderAnswer(given, subjectOf(ask), look));
+    return;
+  }
+  await world.out(`${styledLines(given, subjectOf(ask), markup).join('\n')}\n`);
+  const remarks = renderRemarks(given, look);
+  if (remarks !== '') world.err(remarks);
 };
 
 /** Answers one ask and shows it: the contract's answer on one line with `json`, else a page for a person. */
@@ -48,7 +81,7 @@ export const answerAsk = async (ask: AskFields, showing: Showing, world: World):
   const { answer } = await import('../desk/answer.ts');
   const given = answer(ask);
   if (showing.json === true) await world.out(`${JSON.stringify(given)}\n`);
-  else if (given.ok) await world.out(renderAnswer(given, subjectOf(ask), lookFor(world, showing.plain)));
+  else if (given.ok) await showAnswer(given, ask, showing, world);
   else showFault(given.fault, ask, showing, world);
   return exitCodeOf(given);
 };

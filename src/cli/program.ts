@@ -8,8 +8,8 @@ import { equationCommand, speciesCommand } from './reading-commands.ts';
 import { recordCommand } from './record-command.ts';
 import { schemaCommand } from './schema-command.ts';
 import { type Shell, examples } from './shell.ts';
-
-const VERSION = '0.1.0';
+import { tableCommand } from './table-command.ts';
+import { VERSION } from './version.ts';
 
 const AFTER = `${examples(
   'couplet half "MnO4^- -> Mn^2+" --medium acid',
@@ -56,6 +56,7 @@ export const program = (shell: Shell): CommandUnknownOpts => {
     speciesCommand(shell),
     equationCommand(shell),
     sheetCommand(shell),
+    tableCommand(shell),
     recordCommand(shell),
     batchCommand(shell),
     schemaCommand(shell),

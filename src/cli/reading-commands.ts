@@ -1,5 +1,15 @@
 import { Command, type CommandUnknownOpts } from '@commander-js/extra-typings';
-import { commonFields, defineOption, jsonOption, plainOption, strictOption, whereOption } from './options.ts';
+import {
+  commonFields,
+  defineOption,
+  foldOption,
+  jsonOption,
+  plainOption,
+  requestFields,
+  strictOption,
+  styleOption,
+  whereOption,
+} from './options.ts';
 import { type Shell, examples } from './shell.ts';
 
 /** `species`: how a spelling is read. */
@@ -10,6 +20,7 @@ export const speciesCommand = (shell: Shell): CommandUnknownOpts =>
     .addOption(whereOption)
     .addOption(defineOption)
     .addOption(strictOption)
+    .addOption(styleOption)
     .addOption(plainOption)
     .addOption(jsonOption)
     .addHelpText(
@@ -19,6 +30,7 @@ export const speciesCommand = (shell: Shell): CommandUnknownOpts =>
         'couplet species "Li1-xCoO2" --where x=0.4',
         'couplet species "Cu(EDTA)^2-" --define "EDTA^4-=C10H12N2O8^4-"',
         'couplet species Fe3+ --strict',
+        'couplet species "[Fe(CN)6]^4-" --style html',
       ),
     )
     .action((text, options) => shell.ask({ ask: 'species', text, ...commonFields(options) }, options));
@@ -31,10 +43,18 @@ export const equationCommand = (shell: Shell): CommandUnknownOpts =>
     .addOption(whereOption)
     .addOption(defineOption)
     .addOption(strictOption)
+    .addOption(foldOption)
+    .addOption(styleOption)
     .addOption(plainOption)
     .addOption(jsonOption)
     .addHelpText(
       'after',
-      examples('couplet equation "Zn + Cu2+ = Zn2+ + Cu"', 'couplet equation "Na++Cl- -> NaCl" --strict --json'),
+      examples(
+        'couplet equation "Zn + Cu2+ = Zn2+ + Cu"',
+        'couplet equation "Na++Cl- -> NaCl" --strict --json',
+        'couplet equation "2 H3O^+ + 2 e^- -> H2 + 2 H2O" --fold-hydronium --style latex',
+      ),
     )
-    .action((text, options) => shell.ask({ ask: 'equation', text, ...commonFields(options) }, options));
+    .action((text, options) =>
+      shell.ask({ ask: 'equation', text, ...requestFields(options), ...commonFields(options) }, options),
+    );

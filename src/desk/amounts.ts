@@ -12,11 +12,18 @@ import { isElectron, sameSpecies } from '../species/species.ts';
 import { type SkeletonFields, balanceSkeleton, composeDiagram, readElectrodes, under } from './electrodes.ts';
 import { type DeskOptions, readSketch, readWritten } from './hydronium.ts';
 import { allByRank } from './precedence.ts';
-import type { AskOf, CellFields, SeriesCell } from './schema/ask.ts';
+import type { AskOf, AskedMedium, CellFields, SeriesCell } from './schema/ask.ts';
 import { readMedium } from './settings.ts';
 
 /** What says which reactions the charge flows through: an ask of amounts, or a further cell in series. */
-type AmountsAsk = AskOf<'amounts'> | SeriesCell;
+type CircuitFields = AskOf<'amounts'> | SeriesCell | LoneHalf;
+
+/** A half-reaction by itself. */
+interface LoneHalf {
+  readonly half: string;
+  readonly medium?: AskedMedium | undefined;
+  readonly settle?: string | undefined;
+}
 
 /** The terms as written, a species that stands twice counted once; what nets to 0 is left out. */
 const writtenReaction = ({ left, right }: Equation): Reaction => {
@@ -76,7 +83,7 @@ interface AskedHalf {
 
 const readHalves = (
   halves: readonly AskedHalf[],
-  ask: AmountsAsk,
+  ask: CircuitFields,
   options: DeskOptions,
 ): Result<readonly ParallelReaction[]> => {
   const read = allByRank(halves.map(({ half, field }) => inField(readWritten(half, options), field)));
@@ -100,7 +107,7 @@ const readHalves = (
   );
 };
 
-const cellCircuit = (cell: CellFields, ask: AmountsAsk, options: DeskOptions): Result<Circuit> => {
+const cellCircuit = (cell: CellFields, ask: CircuitFields, options: DeskOptions): Result<Circuit> => {
   if ('diagram' in cell) {
     return map(composeDiagram(cell.diagram, options), (composed) => ({
       kind: 'cell',
@@ -119,7 +126,7 @@ const cellCircuit = (cell: CellFields, ask: AmountsAsk, options: DeskOptions): R
 };
 
 /** What the charge of an amounts ask flows through: a half-reaction, an electrode, or a cell. */
-export const readCircuit = (ask: AmountsAsk, options: DeskOptions): Result<Circuit> => {
+export const readCircuit = (ask: CircuitFields, options: DeskOptions): Result<Circuit> => {
   if ('cell' in ask) return under(cellCircuit(ask.cell, ask, options), 'cell');
   if ('half' in ask) {
     return chain(readHalves([{ half: ask.half, field: 'half' }], ask, options), ([half]) => {

@@ -36,8 +36,8 @@ const gasesOf = (sources: readonly GasSource[]): readonly Gas[] => {
 const shown = (litres: number): string =>
   litres < 0.1 ? `${(litres * 1000).toPrecision(2)} mL/min` : `${litres.toPrecision(2)} L/min`;
 
-const BASIS =
-  "Faraday's law and the ideal gas equation; lower flammable limit of hydrogen 4 % by volume in air (ISO 10156)";
+const BASIS = "Faraday's law and the ideal gas equation";
+const LIMIT = 'lower flammable limit of hydrogen 4 % by volume in air (ISO 10156)';
 
 /**
  * What gas the electrodes make for each ampere and, for hydrogen, the fresh air that keeps it below a quarter of its
@@ -57,5 +57,11 @@ export const gasCautions = (electrodes: readonly (readonly GasSource[])[]): read
       ? ''
       : ` About ${shown(dilutionAir(hydrogen))} of fresh air per ampere, evenly mixed, keeps the hydrogen below a quarter of its lower flammable limit (4 % by volume).`;
   const text = `Each ampere makes up to about ${made} (dry, 25 °C, 101.325 kPa).${air} This is an estimate: local codes decide on ventilation.`;
-  return [{ text, because: [...new Set(rates.map(({ name }) => name))], basis: BASIS }];
+  return [
+    {
+      text,
+      because: [...new Set(rates.map(({ name }) => name))],
+      basis: hydrogen === 0 ? BASIS : `${BASIS}; ${LIMIT}`,
+    },
+  ];
 };

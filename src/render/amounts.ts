@@ -83,7 +83,7 @@ export const amountsBlocks = (answer: AmountsAnswerShown, species: string, look:
   return [
     [electrons === undefined ? head : `${head}   ${exactDecimal(electrons)} mol of electrons per mole`],
     columns(quantityRows(answer, look), ['left', 'right', 'left', 'left', 'left']),
-    speciesTable('for the same charge', alongsideRows(answer), look),
+    speciesTable('same charge', alongsideRows(answer), look),
     speciesTable('in series', seriesRows(answer.series ?? []), look),
     tankLines(answer.tank, look),
     budgetLines(answer.budgets, look),

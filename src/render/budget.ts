@@ -21,7 +21,7 @@ const linesOf = (name: string, lines: Budgets[string], look: Look): readonly (re
 
 /** Who contributes what to the variance of each quantity, the largest first. Nothing where it was not asked for. */
 export const budgetLines = (budgets: Budgets | undefined, look: Look): readonly string[] => {
-  const uncertain = Object.entries(budgets ?? {}).filter(([, lines]) => lines.length > 0);
+  const uncertain = Object.entries(budgets ?? {}).filter(([name, lines]) => lines.some(({ input }) => input !== name));
   if (uncertain.length === 0) return [];
   const head = [
     { text: 'budget', paint: look.paint.faint },

@@ -61,6 +61,7 @@ describe('the other cautions', () => {
   it('end with one line on absence and fit a terminal of 80 columns', () => {
     const lines = pageOf(ask).trimEnd().split('\n');
     expect(lines.every((line) => line.length <= 80)).toBe(true);
+    expect(lines.at(-3)).toBe('');
     expect(lines.slice(-2).join(' ').replaceAll(/\s+/g, ' ')).toContain('does not mean that it is safe');
   });
 });

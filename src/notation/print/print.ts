@@ -6,8 +6,7 @@ import { plainPiece } from './plain.ts';
 import { unicodePiece } from './unicode.ts';
 
 /** The ways to write a species: canonical plain text, Unicode, HTML, plain LaTeX math, MathML. */
-export const PRINT_STYLES = ['plain', 'unicode', 'html', 'latex', 'mathml'] as const;
-export type PrintStyle = (typeof PRINT_STYLES)[number];
+export type PrintStyle = 'plain' | 'unicode' | 'html' | 'latex' | 'mathml';
 
 /** A term of a reaction: its coefficient as text, "" for 1 ("5", "1/2"), and its species. */
 export interface PrintedTerm {
