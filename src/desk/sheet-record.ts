@@ -1,5 +1,6 @@
 import type { RecordOptions } from '../amounts/record-options.ts';
 import type { RecordSummary } from '../amounts/record-summary.ts';
+import type { Fault } from '../report/fault.ts';
 import { type Result, failure, success } from '../report/result.ts';
 import { fieldsOf } from './read-ask.ts';
 import { runSchema } from './schema/sheet.ts';
@@ -87,6 +88,16 @@ export interface UsedRecord {
   readonly given: { readonly charge: string; readonly time: string };
 }
 
+/** A fault of reading, with the path and in the words of a sheet: the option --current-unit is its key current_unit. */
+const placedFault = (path: string, { hint, ...fault }: Fault): Fault => ({
+  ...fault,
+  field: 'record',
+  message: fault.message.includes(path) ? fault.message : `${path}: ${fault.message}`,
+  ...(hint === undefined
+    ? {}
+    : { hint: hint.replace(/--([a-z]+(?:-[a-z]+)*)/g, (_, name: string) => name.replaceAll('-', '_')) }),
+});
+
 /** The record that `source` names. Faults: those of reading it, in `record`. */
 export const useRecord = (source: RecordSource, records: Records): Result<UsedRecord> => {
   const { key, path } = namedRecord(source);
@@ -94,7 +105,7 @@ export const useRecord = (source: RecordSource, records: Records): Result<UsedRe
   if (read === undefined) {
     return failure({ code: 'bad-ask', field: 'record', message: `The record ${path} was not read.` });
   }
-  if (!read.ok) return failure({ ...read.fault, field: 'record', message: `${path}: ${read.fault.message}` });
+  if (!read.ok) return failure(placedFault(path, read.fault));
   const meter = typeof source === 'string' || source.meter === undefined ? '' : ` ± ${source.meter}`;
   const { charge, duration } = read.value;
   return success({

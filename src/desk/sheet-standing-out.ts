@@ -41,7 +41,7 @@ const gapOf = (runs: readonly FoundEfficiency[], at: number, among: readonly num
   return { at, difference, ratio: Math.abs(difference) / uncertainty };
 };
 
-const OVER = 'The current efficiency is over 100 %: look at the weighing, the record and the reactions.';
+const OVER = 'the current efficiency is over 100 %: look at the weighing, the record and the reactions.';
 
 const sentence = ({ difference, ratio }: Gap, pair: boolean): string => {
   const points = `${(Math.abs(difference) * 100).toPrecision(2)} points ${difference > 0 ? 'above' : 'below'}`;

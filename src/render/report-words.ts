@@ -10,10 +10,18 @@ export const REPORT_WRITING: Writing = {
   alarm: (written) => `<span class="alarm">${written}</span>`,
 };
 
-/** A fault with the text it stands in. */
-export const faultHtml = (name: string, fault: Fault, sheetText: string): string =>
-  `<div class="fault"><p><span class="alarm">${escaped(name)} was not answered</span></p>` +
-  `<pre>${escaped(excerpt(fault, sheetText))}</pre></div>`;
+/** A fault with the line it stands in. */
+export const faultHtml = (name: string, fault: Fault, sheetText: string): string => {
+  const { hint, ...bare } = fault;
+  const place = excerpt({ ...bare, message: '' }, sheetText).trimEnd();
+  const words = [fault.message, hint ?? ''].map(sentence).join(' ').trim();
+  return (
+    `<div class="fault"><p><span class="alarm">${escaped(name)} was not answered</span></p>` +
+    `<pre>${escaped(place)}</pre><p>${escaped(words)}</p></div>`
+  );
+};
+
+const sentence = (text: string): string => (text === '' || /[.?!]$/.test(text) ? capital(text) : `${capital(text)}.`);
 
 /** A list of sentences; nothing where there are none. */
 export const saidList = (heading: string, lines: readonly string[]): string =>

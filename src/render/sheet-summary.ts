@@ -22,6 +22,9 @@ const efficiencyOf = ({ weighed, currentUse, product }: WholeTank): string => {
   return share === undefined ? '' : `${four({ value: share * 100, unit: '%' })} %`;
 };
 
+/** Faults that are named one by one. */
+const MOST_NAMED = 2;
+
 const alarmsOf = (tank: WholeTank, write: Writing): readonly string[] => {
   const out = tank.runs.flatMap((run) => ('fault' in run || standsOut(run) === null ? [] : [run.name]));
   const missed = tank.targets.flatMap((target) => ('fault' in target || target.reached !== false ? [] : [target.name]));
@@ -29,7 +32,9 @@ const alarmsOf = (tank: WholeTank, write: Writing): readonly string[] => {
   return [
     ...out.map((name) => `${write.text(name)} stands out`),
     ...missed.map((name) => `${write.text(name)} is missed`),
-    ...broken.map((name) => `${write.text(name)} was not answered`),
+    ...(broken.length > MOST_NAMED
+      ? [`${String(broken.length)} parts were not answered`]
+      : broken.map((name) => `${write.text(name)} was not answered`)),
   ];
 };
 

@@ -21,11 +21,13 @@ import {
 import { reactionText, speciesText } from './spelling.ts';
 import { printable } from '../report/excerpt.ts';
 
+const asIs = (text: string): string => text;
+
 /** Names of the sheet cannot move the cursor; what is doubtful is painted by the line, so that lines can be broken. */
 const writingFor = (look: Look): Writing => ({
   text: printable,
   species: (plain) => speciesText(plain, look),
-  alarm: (written) => written.toUpperCase(),
+  alarm: asIs,
 });
 
 const reactionLines = (cell: CellAnswer, look: Look): readonly string[] =>
@@ -67,8 +69,6 @@ const runLines = (tank: WholeTank, look: Look): readonly string[] => {
   });
   return columns([head, units, ...rows], ['left', ...names.map(() => 'right' as const)]);
 };
-
-const asIs = (text: string): string => text;
 
 /** What came of the runs and goals, one line each behind its label. */
 const outcomeLines = (tank: WholeTank, look: Look): readonly string[] => {
