@@ -3,4 +3,6 @@ export { answerSheet } from './desk/sheet.ts';
 export { type SheetAnswer, type RunAnswer, type TankAnswer, type SheetFault } from './desk/sheet-answer.ts';
 export { type Ask, type AskKind, type AskOf, askSchema } from './desk/schema/ask.ts';
 export { type Answer, type Answered, type Faulted, answerSchema } from './desk/schema/answer.ts';
+export { type Published, publishedSchema } from './desk/schema/published.ts';
+export { type WallEntryAnswer, type WallLine, type WallSettings, answerWall } from './desk/wall.ts';
 export type { Fault, FaultCode } from './report/fault.ts';

@@ -53,6 +53,15 @@ const wantOption = new Option(
   'the unit to answer in: --want mass=kg; repeatable',
 ).argParser<Pairs>(collectPairs);
 
+/** Every quantity by its name, as --given and --want take it. */
+const QUANTITY_HELP = `
+Quantities of --given and --want:
+  charge, current, current_density, area, time, efficiency, share, blank,
+  amount, mass, volume (of gas; of the tank beside from and to), temperature,
+  pressure, vapour_pressure, density, thickness, from, to (concentrations),
+  voltage, energy, mass_per_charge, charge_per_mass, energy_per_mass
+  A standard uncertainty is written behind: "2.000(4) A", "2.000 A ± 0.004 A".`;
+
 interface ReactionOptions {
   readonly half?: readonly string[] | undefined;
 }
@@ -93,18 +102,16 @@ export const amountsCommand = (shell: Shell): CommandUnknownOpts => {
     .addOption(strictOption)
     .addOption(plainOption)
     .addOption(jsonOption)
+    .addHelpText('after', QUANTITY_HELP)
     .addHelpText(
       'after',
       examples(
-        'couplet amounts --half "Cu^2+ + 2 e^- -> Cu" --species Cu --given current="250 A" \\',
-        '                --given time="6 h" --given efficiency="94 %" --want mass=kg',
+        'couplet amounts --half "Cu^2+ + 2 e^- -> Cu" --species Cu --given current="250 A" --given time="6 h" --given efficiency="94 %" --want mass=kg',
         'couplet amounts --half "Zn^2+ -> Zn @ 90 %" --half "H^+ -> H2" --species Zn --given charge="1 kA h"',
-        'couplet amounts --anode "H2O -> O2(g)" --cathode "Cu^2+ -> Cu" --species O2 --given current="2 A" \\',
-        '                --given time="1 h" --given temperature="25 °C" --given pressure="1 bar"',
+        'couplet amounts --anode "H2O -> O2(g)" --cathode "Cu^2+ -> Cu" --species O2 --given current="2 A" --given time="1 h" --given temperature="25 °C" --given pressure="1 bar"',
         'couplet amounts --anode "H2O -> O2" --cathode "Cu^2+ -> Cu" --species Cu --given charge="1 kA h" --tank',
         'couplet amounts --half "Cl^- -> Cl2" --species Cl2 --given charge="1 kA h" --cells 24 --bypass "2 %"',
-        'couplet amounts --half "Cu^2+ -> Cu" --species Cu --given current="2.00(2) A" --given time="1 h ± 5 s" \\',
-        '                --budget --correlation current,time=0.5',
+        'couplet amounts --half "Cu^2+ -> Cu" --species Cu --given current="2.00(2) A" --given time="1 h ± 5 s" --budget --correlation current,time=0.5',
         'couplet amounts --half "Cu^2+ -> Cu" --species Cu --series "Ag: Ag^+ -> Ag; mass=4.025 g"',
       ),
     );

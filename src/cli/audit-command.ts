@@ -53,8 +53,7 @@ export const auditCommand = (shell: Shell): CommandUnknownOpts => {
       'after',
       examples(
         'couplet audit "MnO4^- + 8 H^+ + 5 e^- -> Mn^2+ + 3 H2O"',
-        'couplet audit --anode "Zn -> Zn^2+ + 2 e^-" --cathode "Ag^+ + e^- -> Ag" \\',
-        '              --overall "Zn + 2 Ag^+ -> Zn^2+ + 2 Ag" --electrons 2',
+        'couplet audit --anode "Zn -> Zn^2+ + 2 e^-" --cathode "Ag^+ + e^- -> Ag" --overall "Zn + 2 Ag^+ -> Zn^2+ + 2 Ag" --electrons 2',
         'couplet audit "MnO4^- + 8 H^+ + 5 e^- -> Mn^2+ + 3 H2O" --format markdown --contributions',
         'couplet audit "2 H2 + O2 -> H2O" --style latex',
         'couplet audit --file equations.txt --format markdown',

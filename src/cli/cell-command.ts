@@ -52,8 +52,7 @@ export const cellCommand = (shell: Shell): CommandUnknownOpts => {
       'after',
       examples(
         'couplet cell --anode "H2O -> O2" --cathode "Cu^2+ -> Cu" --medium acid',
-        'couplet cell --anode "OH^- -> O2" --cathode "Zn(OH)4^2- -> Zn @ 92 %" \\',
-        '             --cathode "H2O -> H2 @ 8 %" --medium base',
+        'couplet cell --anode "OH^- -> O2" --cathode "Zn(OH)4^2- -> Zn @ 92 %" --cathode "H2O -> H2 @ 8 %" --medium base',
         'couplet cell --anode "Cl^- -> Cl2" --cathode "H2O -> H2" --cathode-medium base --separator',
         'couplet cell --diagram "Zn | Zn^2+ || Cu^2+ | Cu"',
         'couplet cell --anode "H2O -> O2" --cathode "Cu^2+ -> Cu" --per "Cu" --style html',

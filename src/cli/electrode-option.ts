@@ -20,17 +20,24 @@ const reaction = (typed: string, medium: string | undefined): unknown => {
 
 export const anodeOption = new Option(
   '--anode <REACTION>',
-  'a reaction at the anode, " @ 95 %" behind it for its share; repeatable',
+  'a reaction at the anode, its share behind it where it has one: --anode "H2O -> O2 @ 95 %"; repeatable',
 ).argParser<readonly string[]>(collect);
-export const cathodeOption = new Option('--cathode <REACTION>', 'a reaction at the cathode; repeatable').argParser<
-  readonly string[]
->(collect);
-export const anodeMediumOption = new Option('--anode-medium <NAME>', 'the medium at the anode, where the two differ');
-export const cathodeMediumOption = new Option('--cathode-medium <NAME>', 'the medium at the cathode');
+export const cathodeOption = new Option(
+  '--cathode <REACTION>',
+  'a reaction at the cathode: --cathode "Cu^2+ -> Cu"; repeatable',
+).argParser<readonly string[]>(collect);
+export const anodeMediumOption = new Option(
+  '--anode-medium <NAME>',
+  'the medium at the anode, where the two differ: --anode-medium acid',
+);
+export const cathodeMediumOption = new Option(
+  '--cathode-medium <NAME>',
+  'the medium at the cathode: --cathode-medium base',
+);
 export const separatorOption = new Option('--separator', 'the two electrolytes do not mix: nothing folds to water');
 export const diagramOption = new Option(
   '--diagram <DIAGRAM>',
-  'a cell diagram instead: "Zn | Zn^2+ || Cu^2+ | Cu"',
+  'a cell diagram instead: --diagram "Zn | Zn^2+ || Cu^2+ | Cu"',
 ).conflicts(['anode', 'cathode', 'anodeMedium', 'cathodeMedium', 'separator', 'medium', 'helpers']);
 
 /** What the options of a cell say. */

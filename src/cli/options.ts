@@ -59,7 +59,7 @@ export const helpersOption = new Option(
   .conflicts('medium');
 export const settleOption = new Option(
   '--settle <ASSUMPTION>',
-  'which of several balances is meant: the text that the fault offered, such as --settle "H2O2 is only oxidised, to O2"',
+  'which of several balances is meant: the text that the fault offered, such as --settle "if H2O2 is only oxidised, to O2"',
 );
 
 export const perOption = new Option(

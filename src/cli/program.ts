@@ -17,8 +17,10 @@ const AFTER = `${examples(
   'couplet audit "2 H2 + O2 -> 2 H2O"',
   'couplet sheet fixtures/tern-quay.yaml',
 )}
-Exit codes: 0 answered; 1 a fault, or an audit that is unbalanced; 2 the command itself was wrong.
-Charges are written with a caret: Cu^2+, SO4^2-; the electron is e^-. couplet COMMAND --help shows more.
+Charges are written with a caret: Cu^2+, SO4^2-; the electron is e^-.
+Exit codes: 0 answered; 1 a fault, or an audit that is unbalanced; 2 the
+command itself was wrong.
+couplet COMMAND --help shows the options and examples of a command.
 `;
 
 /** The line and its errors go to the world; nothing ends the process. */
@@ -31,8 +33,8 @@ const bound = (command: CommandUnknownOpts, { world }: Shell): CommandUnknownOpt
       writeErr: (text) => {
         world.err(text);
       },
-      getOutHelpWidth: () => 100,
-      getErrHelpWidth: () => 100,
+      getOutHelpWidth: () => 80,
+      getErrHelpWidth: () => 80,
       getOutHasColors: () => false,
       getErrHasColors: () => false,
     });

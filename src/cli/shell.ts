@@ -9,6 +9,22 @@ export interface Shell {
   readonly ask: (fields: AskFields, showing: Showing) => Promise<void>;
 }
 
+const MEASURE = 76;
+
+/** A long command as a shell takes it over several lines: broken before options, each line but the last ends in \\. */
+const folded = (command: string): readonly string[] => {
+  const lines: string[] = [];
+  for (const piece of command.split(/ (?=--)/)) {
+    const last = lines.at(-1);
+    if (last !== undefined && last.length + piece.length < MEASURE) lines[lines.length - 1] = `${last} ${piece}`;
+    else lines.push(last === undefined ? piece : `    ${piece}`);
+  }
+  return lines.map((line, at) => (at < lines.length - 1 ? `${line} \\` : line));
+};
+
 /** Examples at the end of a command's help. */
-export const examples = (...lines: readonly string[]): string =>
-  `\nExamples:\n${lines.map((line) => `  ${line}`).join('\n')}\n`;
+export const examples = (...commands: readonly string[]): string =>
+  `\nExamples:\n${commands
+    .flatMap(folded)
+    .map((line) => `  ${line}`)
+    .join('\n')}\n`;

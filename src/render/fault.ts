@@ -9,8 +9,21 @@ const MOST = 8;
 const couplingRow = (coupling: ShownCoupling, look: Look): readonly string[] => [
   reactionText((coupling.overall ?? coupling.reaction)?.plain ?? '', look),
   `${coupling.electrons} e-`,
-  `--settle ${JSON.stringify(coupling.assume)}`,
 ];
+
+/** Each way to settle it with its electrons, and below it the option that does. */
+const couplingLines = (couplings: readonly ShownCoupling[], look: Look): readonly string[] => {
+  const shown = couplings.slice(0, MOST);
+  const rows = columns(
+    shown.map((coupling) => couplingRow(coupling, look)),
+    ['left', 'right'],
+  );
+  const lines = rows.flatMap((row, at) => [row, `  --settle ${JSON.stringify(shown[at]?.assume ?? '')}`]);
+  const more = couplings.length > MOST ? [`and ${String(couplings.length - MOST)} more`] : [];
+  return couplings.length === 0
+    ? []
+    : [look.paint.faint('settle it with one of these'), ...indented([...lines, ...more])];
+};
 
 const list = (head: string, rows: readonly (readonly string[])[], look: Look, most = MOST): readonly string[] => {
   const shown = columns(rows.slice(0, most), ['left', 'right', 'left']);
@@ -24,10 +37,9 @@ const reactionRows = (reactions: readonly ShownReaction[], look: Look): readonly
 /** The assumptions that settle it, else what balances; then, where asked for, what every balance is a sum of. */
 const waysOut = (fault: Fault & { readonly code: 'several-balances' }, look: Look): readonly string[] => {
   const { couplings, family, irreducible = [] } = fault;
-  const rows = couplings.map((coupling) => couplingRow(coupling, look));
   return [
-    ...(rows.length > 0 ? list('settle it with one of these', rows, look) : []),
-    ...(rows.length > 0 || irreducible.length > 0
+    ...couplingLines(couplings, look),
+    ...(couplings.length > 0 || irreducible.length > 0
       ? []
       : list('each of these balances', reactionRows(family, look), look)),
     ...list('every whole balance is a sum of these', reactionRows(irreducible, look), look, irreducible.length),
