@@ -1,4 +1,4 @@
-import type { TooHard } from '../exact/bounds.ts';
+import { type Meter, type TooHard, startMeter } from '../exact/bounds.ts';
 import { minimalSolutions } from '../exact/minimal.ts';
 import { speciesMatrix } from './matrix.ts';
 import { type Numbers, joinColumns, splitColumns } from './solve.ts';
@@ -15,7 +15,7 @@ export type Elementary = { readonly kind: 'elementary'; readonly balances: reado
  * extreme rays of  A_S x + A_H p - A_H n = 0,  x, p, n >= 0  are the vectors of smallest support (conformal sums,
  * R. T. Rockafellar, The elementary vectors of a subspace of R^N, 1969) and the pairs p_j = n_j, which are left out.
  */
-export const elementaryBalances = (unknowns: readonly Unknown[]): Elementary => {
+export const elementaryBalances = (unknowns: readonly Unknown[], meter: Meter = startMeter()): Elementary => {
   const split = splitColumns(speciesMatrix(unknowns.map((unknown) => unknown.species)), unknowns);
   const [strictCount, freeCount] = [split.strictIndex.length, split.freeIndex.length];
   const doubled = split.strict.map((row, index) => {
@@ -25,6 +25,7 @@ export const elementaryBalances = (unknowns: readonly Unknown[]): Elementary => 
   const minimal = minimalSolutions(
     doubled,
     doubled.map(() => []),
+    meter,
   );
   if (minimal.kind === 'too-hard') return minimal;
   if (minimal.kind === 'lines') throw new Error('no column is free here');

@@ -13,12 +13,20 @@ export type Impossible = Exclude<Verdict, { readonly kind: 'unique' | 'family' }
 /** The fault of an impossible skeleton, placed at the species that is meant where it is one. */
 export const explain = (verdict: Impossible, unknowns: readonly Unknown[]): Fault => {
   if (verdict.kind === 'no-balance') return noBalance(verdict.weights, unknowns);
+  if (verdict.kind === 'too-hard') return tooHard(verdict.limit, unknowns.length);
   const unknown = unknowns[verdict.index];
   if (unknown === undefined) throw new Error('a verdict must point at an unknown');
   if (verdict.kind === 'missing-element') return missingElement(verdict.element, unknown);
   if (verdict.kind === 'idle-species') return idleSpecies(unknown);
   return wrongSide(unknown, verdict.numbers, unknowns);
 };
+
+const tooHard = (limit: string, count: number): Fault => ({
+  code: 'too-hard',
+  limit,
+  message: `Whether these ${String(count)} species can balance takes more than ${limit} to find out.`,
+  hint: 'Take species out, or split the skeleton.',
+});
 
 const placed = (unknown: Unknown): { readonly span?: Span } =>
   unknown.span === undefined ? {} : { span: unknown.span };

@@ -1,13 +1,21 @@
-import type { TooHard } from '../exact/bounds.ts';
+import { type Meter, type TooHard, startMeter } from '../exact/bounds.ts';
 import { hilbertBasis } from '../exact/hilbert.ts';
+import { magnitude } from '../exact/integer.ts';
 import { type IntegerMatrix, independentColumns, nullSpace, range } from '../exact/matrix.ts';
-import { compareSupports, minimalSolutions } from '../exact/minimal.ts';
+import { bySupport, minimalSolutions } from '../exact/minimal.ts';
 import { pickColumns, speciesMatrix } from './matrix.ts';
 import { type Numbers, type Split, joinColumns, splitColumns } from './solve.ts';
 import type { Unknown } from './unknowns.ts';
 
-/** The minimal balances of a skeleton, or the work limit that was passed. */
-export type Family = { readonly kind: 'family'; readonly members: readonly Numbers[] } | TooHard;
+/** Balances of a skeleton, or the work limit that was passed. */
+export type Family =
+  | {
+      readonly kind: 'family';
+      readonly members: readonly Numbers[];
+      /** False where free unknowns depend on one another in more ways than are looked at: there may be more members. */
+      readonly complete: boolean;
+    }
+  | TooHard;
 
 /** How many independent sets of dependent free unknowns are looked at. */
 const MOST_SETS = 32;
@@ -19,14 +27,17 @@ const MOST_SETS = 32;
  * Where the free unknowns depend on one another that set has no extreme rays: those of every independent set of free
  * unknowns are given in their place, for up to 32 sets.
  */
-export const minimalBalances = (unknowns: readonly Unknown[]): Family => {
+export const minimalBalances = (unknowns: readonly Unknown[], meter: Meter = startMeter()): Family => {
   const matrix = speciesMatrix(unknowns.map((unknown) => unknown.species));
   const split = splitColumns(matrix, unknowns);
-  if (split.strictIndex.length === 0) return { kind: 'family', members: nullSpace(matrix.rows, unknowns.length) };
+  if (split.strictIndex.length === 0) {
+    return { kind: 'family', members: nullSpace(matrix.rows, unknowns.length), complete: true };
+  }
   const found = new Map<string, Numbers>();
-  for (const kept of independentSets(split.free)) {
+  const sets = independentSets(split.free, meter);
+  for (const kept of sets) {
     const some: Split = { ...split, free: pickColumns(split.free, kept), freeIndex: pick(split.freeIndex, kept) };
-    const minimal = minimalSolutions(some.strict, some.free);
+    const minimal = minimalSolutions(some.strict, some.free, meter);
     if (minimal.kind === 'too-hard') return minimal;
     if (minimal.kind === 'lines') throw new Error('an independent set cannot depend on itself');
     for (const ray of minimal.rays) {
@@ -34,7 +45,8 @@ export const minimalBalances = (unknowns: readonly Unknown[]): Family => {
       found.set(numbers.join(), numbers);
     }
   }
-  return { kind: 'family', members: [...found.values()].toSorted(bySize) };
+  const members = bySupport([...found.values()], sizesOf);
+  return meter.passed() ?? { kind: 'family', members, complete: sets.length < MOST_SETS };
 };
 
 /**
@@ -42,20 +54,18 @@ export const minimalBalances = (unknowns: readonly Unknown[]): Family => {
  * basis). The minimal balances are among them. Asked for where free unknowns depend on one another it is that of the
  * first independent set.
  */
-export const irreducibleBalances = (unknowns: readonly Unknown[]): Family => {
+export const irreducibleBalances = (unknowns: readonly Unknown[], meter: Meter = startMeter()): Family => {
   const split = splitColumns(speciesMatrix(unknowns.map((unknown) => unknown.species)), unknowns);
   const kept = independentColumns(split.free);
   const some: Split = { ...split, free: pickColumns(split.free, kept), freeIndex: pick(split.freeIndex, kept) };
-  const found = hilbertBasis(some.strict, some.free);
+  const found = hilbertBasis(some.strict, some.free, meter);
   if (found.kind === 'too-hard') return found;
   if (found.kind === 'lines') throw new Error('an independent set cannot depend on itself');
-  return { kind: 'family', members: found.elements.map((element) => joinColumns(some, element, unknowns)) };
+  const members = found.elements.map((element) => joinColumns(some, element, unknowns));
+  return { kind: 'family', members, complete: kept.length === split.freeIndex.length };
 };
 
-const bySize = (a: Numbers, b: Numbers): number => {
-  const sizes = (numbers: Numbers): Numbers => numbers.map((value) => (value < 0n ? -value : value));
-  return compareSupports(sizes(a), sizes(b));
-};
+const sizesOf = (numbers: Numbers): Numbers => numbers.map(magnitude);
 
 const pick = (indices: readonly number[], at: readonly number[]): readonly number[] =>
   at.map((index) => indices[index] ?? 0);
@@ -64,12 +74,13 @@ const pick = (indices: readonly number[], at: readonly number[]): readonly numbe
  * The largest sets of columns of `matrix` that do not depend on one another: all columns where they are independent.
  * Found by trying the columns in other orders: each column in turn is put last, and what falls out is put back before.
  */
-const independentSets = (matrix: IntegerMatrix): readonly (readonly number[])[] => {
+const independentSets = (matrix: IntegerMatrix, meter: Meter): readonly (readonly number[])[] => {
   const columns = range(matrix[0]?.length ?? 0);
   const sets = new Map<string, readonly number[]>();
   const waiting: (readonly number[])[] = [columns];
   for (let order = waiting.shift(); order !== undefined && sets.size < MOST_SETS; order = waiting.shift()) {
-    const kept = [...independentColumns(matrix, order)].sort((a, b) => a - b);
+    if (!meter.step(columns.length)) break;
+    const kept = [...independentColumns(matrix, order, meter)].sort((a, b) => a - b);
     const name = kept.join();
     if (sets.has(name)) continue;
     sets.set(name, kept);

@@ -1,4 +1,5 @@
-import { nullSpace, primitiveVector } from '../exact/matrix.ts';
+import { type Meter, type TooHard, startMeter } from '../exact/bounds.ts';
+import { echelonOf, freeColumns, nullVector, primitiveVector, range } from '../exact/matrix.ts';
 import { type WholeSolution, idleColumns, strictlyPositive } from '../exact/positive.ts';
 import { type Label, type SpeciesMatrix, pickColumns, speciesMatrix } from './matrix.ts';
 import { orient, wrongSided } from './orient.ts';
@@ -17,23 +18,27 @@ export type Verdict =
   | { readonly kind: 'missing-element'; readonly element: Label; readonly index: number }
   | { readonly kind: 'no-balance'; readonly weights: Weights }
   | { readonly kind: 'wrong-side'; readonly index: number; readonly numbers: Numbers }
-  | { readonly kind: 'idle-species'; readonly index: number };
+  | { readonly kind: 'idle-species'; readonly index: number }
+  | TooHard;
 
 /**
  * The verdict on `unknowns`, by the contract's precedence: `missing-element`; then, where every strict unknown can
  * stand on its side, `unique` (dimension 1) or `family`; else dimension 0 is `no-balance`, dimension 1 `wrong-side` or
- * `idle-species`, a larger one `idle-species` where some of the skeleton balances, else `no-balance`.
+ * `idle-species`, a larger one `idle-species` where some of the skeleton balances, else `no-balance`. `too-hard` once
+ * `meter` has passed a bound.
  */
-export const solve = (unknowns: readonly Unknown[]): Verdict => {
+export const solve = (unknowns: readonly Unknown[], meter: Meter = startMeter()): Verdict => {
   const missing = missingElement(unknowns);
   if (missing !== undefined) return missing;
   const matrix = speciesMatrix(unknowns.map((unknown) => unknown.species));
-  const basis = nullSpace(matrix.rows, unknowns.length);
-  const [line, second] = basis;
+  const echelon = echelonOf(matrix.rows, range(unknowns.length), meter);
+  const passed = meter.passed();
+  if (passed !== undefined) return passed;
+  const [free, second] = freeColumns(echelon, unknowns.length);
   const split = splitColumns(matrix, unknowns);
-  if (line === undefined) return noBalance(matrix, split);
-  if (second === undefined) return onLine(unknowns, line);
-  return inSpace(matrix, split, basis.length);
+  if (free === undefined) return noBalance(matrix, split, meter);
+  if (second === undefined) return onLine(unknowns, nullVector(echelon, free, unknowns.length));
+  return inSpace(matrix, split, unknowns.length - echelon.pivots.length, meter);
 };
 
 /** An element that only one side of the skeleton writes and that no helper brings or takes. */
@@ -91,18 +96,20 @@ const onLine = (unknowns: readonly Unknown[], line: Numbers): Verdict => {
 };
 
 /** More than one balance, if any. A column that is 0 in every non-negative solution is idle; all of them: none exists. */
-const inSpace = (matrix: SpeciesMatrix, split: Split, dimension: number): Verdict => {
-  if (split.strictIndex.length === 0) return { kind: 'family', dimension };
-  if (strictlyPositive(split.strict, split.free).kind === 'solvable') return { kind: 'family', dimension };
-  const idle = idleColumns(split.strict, split.free);
-  const first = split.strictIndex[idle[0] ?? 0] ?? 0;
-  return idle.length < split.strictIndex.length ? { kind: 'idle-species', index: first } : noBalance(matrix, split);
+const inSpace = (matrix: SpeciesMatrix, split: Split, dimension: number, meter: Meter): Verdict => {
+  const idle = idleColumns(split.strict, split.free, meter);
+  if (idle.kind === 'too-hard') return idle;
+  const [first] = idle.columns;
+  if (first === undefined) return { kind: 'family', dimension };
+  if (idle.columns.length === split.strictIndex.length) return noBalance(matrix, split, meter);
+  return { kind: 'idle-species', index: split.strictIndex[first] ?? 0 };
 };
 
 /** Stiemke's certificate, its weights those of whole atoms; nothing to certify where no species has a side of its own. */
-const noBalance = (matrix: SpeciesMatrix, split: Split): Verdict => {
+const noBalance = (matrix: SpeciesMatrix, split: Split, meter: Meter): Verdict => {
   if (split.strictIndex.length === 0) return { kind: 'no-balance', weights: new Map() };
-  const found = strictlyPositive(split.strict, split.free);
+  const found = strictlyPositive(split.strict, split.free, meter);
+  if (found.kind === 'too-hard') return found;
   if (found.kind === 'solvable') throw new Error('a solvable system has no certificate');
   const weights = primitiveVector(found.certificate.map((weight, row) => weight * (matrix.scales[row] ?? 1n)));
   const pairs = matrix.labels.map((label, row): [Label, bigint] => [label, weights[row] ?? 0n]);

@@ -6,11 +6,13 @@ import { type Reaction, plainReaction, showReaction } from '../balance/reaction.
 import { proved } from '../balance/recount.ts';
 import { type Verdict, solve } from '../balance/solve.ts';
 import type { Unknown } from '../balance/unknowns.ts';
+import { type Meter, startMeter } from '../exact/bounds.ts';
 import { nullSpace } from '../exact/matrix.ts';
 import { ZERO } from '../exact/rational.ts';
 import type { HalfReaction } from '../redox/half-reaction.ts';
 import { WATER, mediumRow } from '../redox/media.ts';
 import type { Medium } from '../redox/medium.ts';
+import { MOST_SHOWN, cutSentence } from '../redox/several.ts';
 import { type Result, failure, success } from '../report/result.ts';
 import { type Species, ELECTRON, isElectron, sameSpecies } from '../species/species.ts';
 import type { Electrode } from './cell-reaction.ts';
@@ -45,16 +47,17 @@ interface Trial {
  * Faults: `no-electrons`, `several-balances` or `too-hard`, `no-balance`.
  */
 export const reactHalfCell = (halfCell: HalfCell): Result<HalfCellReaction> => {
-  const trials = trialsOf(halfCell);
+  const meter = startMeter();
+  const trials = trialsOf(halfCell, meter);
   const settled = trials.find(({ verdict }) => verdict.kind === 'unique' || verdict.kind === 'family');
   const last = trials.at(-1);
   if (last === undefined) throw new Error('a half-cell is tried at least once');
   if (settled === undefined) return noReaction(last);
   if (settled.verdict.kind === 'unique') return success(reacted(halfCell, settled, settled.verdict.numbers));
-  return severalReactions(settled);
+  return severalReactions(settled, meter);
 };
 
-const trialsOf = ({ electrode, species, terminals }: HalfCell): readonly Trial[] => {
+const trialsOf = ({ electrode, species, terminals }: HalfCell, meter: Meter): readonly Trial[] => {
   const isTerminal = (one: Species): boolean => terminals.some((terminal) => sameSpecies(terminal, one));
   const written = distinct(species);
   const split = distinct(species.flatMap((one) => dissociate(one) ?? [one]));
@@ -65,7 +68,7 @@ const trialsOf = ({ electrode, species, terminals }: HalfCell): readonly Trial[]
   ]);
   return trials.map(({ form, inert }) => {
     const unknowns = unknownsAt(electrode, form);
-    return { unknowns, verdict: solve(unknowns), inert };
+    return { unknowns, verdict: solve(unknowns, meter), inert };
   });
 };
 
@@ -110,6 +113,7 @@ const mediumOf = (unknowns: readonly Unknown[]): Medium => {
 /** Where the species balance without electrons that balance is told; else why none exists. */
 const noReaction = ({ unknowns, verdict }: Trial): Result<never> => {
   if (verdict.kind === 'unique' || verdict.kind === 'family') throw new Error('this half-cell reacts');
+  if (verdict.kind === 'too-hard') return failure(explain(verdict, unknowns));
   const matrix = speciesMatrix(unknowns.map((one) => one.species));
   const [line] = nullSpace(matrix.rows, unknowns.length);
   return line === undefined ? failure(explain(verdict, unknowns)) : noElectrons(proved(assemble(unknowns, line)));
@@ -123,9 +127,9 @@ const noElectrons = (reaction: Reaction): Result<never> =>
     reaction: showReaction(reaction),
   });
 
-const severalReactions = ({ unknowns, verdict }: Trial): Result<never> => {
+const severalReactions = ({ unknowns, verdict }: Trial, meter: Meter): Result<never> => {
   const dimension = verdict.kind === 'family' ? verdict.dimension : 2;
-  const family = minimalBalances(unknowns);
+  const family = minimalBalances(unknowns, meter);
   if (family.kind === 'too-hard') {
     return failure({
       code: 'too-hard',

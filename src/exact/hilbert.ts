@@ -1,8 +1,8 @@
-import { type Bounds, type Meter, type TooHard, USUAL_BOUNDS, startMeter } from './bounds.ts';
+import { type Meter, type TooHard, startMeter } from './bounds.ts';
 import { magnitude } from './integer.ts';
 import { floorDivide, hermite, integerKernel, subtract } from './lattice.ts';
 import { type IntegerMatrix, type IntegerVector, entry, nullSpace, range } from './matrix.ts';
-import { compareSupports } from './minimal.ts';
+import { bySupport } from './minimal.ts';
 import type { WholeSolution } from './positive.ts';
 
 /** All irreducible whole solutions; or the lines that dependent free columns leave; or the bound that was passed. */
@@ -26,19 +26,18 @@ export type IrreducibleSolutions =
 export const hilbertBasis = (
   strict: IntegerMatrix,
   free: IntegerMatrix,
-  bounds: Bounds = USUAL_BOUNDS,
+  meter: Meter = startMeter(),
 ): IrreducibleSolutions => {
   const [width, freeWidth] = [strict[0]?.length ?? 0, free[0]?.length ?? 0];
   const lines = nullSpace(free, freeWidth);
   if (lines.length > 0) return { kind: 'lines', lines };
-  const meter = startMeter(bounds);
   const joined = strict.map((row, index) => [...row, ...(free[index] ?? [])]);
   const kernel = integerKernel(joined, width + freeWidth, meter);
   const found = irreducible(kernel, width, meter);
   const passed = meter.passed();
   if (passed !== undefined) return passed;
   const elements = found.map((vector) => ({ strict: vector.slice(0, width), free: vector.slice(width) }));
-  return { kind: 'basis', elements: elements.toSorted((a, b) => compareSupports(a.strict, b.strict)) };
+  return { kind: 'basis', elements: bySupport(elements, (element) => element.strict) };
 };
 
 /**

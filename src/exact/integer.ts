@@ -1,6 +1,11 @@
 /** The absolute value. */
 export const magnitude = (value: bigint): bigint => (value < 0n ? -value : value);
 
+/** How many words of 64 bits a number fills, at least 1: what an operation on it costs. */
+export const wordsOf = (value: bigint): number =>
+  // inside 2^53 no text is made
+  Number.isSafeInteger(Number(value)) ? 1 : Math.ceil(magnitude(value).toString(16).length / 16);
+
 /** Greatest common divisor, never negative; gcd(0, 0) is 0. Euclid's algorithm. */
 export const gcd = (a: bigint, b: bigint): bigint => {
   let x = magnitude(a);

@@ -1,3 +1,4 @@
+import type { Meter } from './bounds.ts';
 import { gcd, gcdOf, lcmOf } from './integer.ts';
 
 /** A whole vector. */
@@ -74,8 +75,11 @@ export interface Echelon {
   readonly pivots: readonly number[];
 }
 
-/** The reduced echelon form of `matrix`, its pivots sought in the columns of `order` and in that order. */
-export const echelonOf = (matrix: IntegerMatrix, order: readonly number[]): Echelon => {
+/**
+ * The reduced echelon form of `matrix`, its pivots sought in the columns of `order` and in that order. Unfinished once
+ * the meter, if any, has passed a bound.
+ */
+export const echelonOf = (matrix: IntegerMatrix, order: readonly number[], meter?: Meter): Echelon => {
   const rows = matrix.map((row) => primitiveVector(row) as IntegerVector);
   const pivots: number[] = [];
   for (const column of order) {
@@ -86,6 +90,8 @@ export const echelonOf = (matrix: IntegerMatrix, order: readonly number[]): Eche
     const pivot = entry(found.row, column) < 0n ? found.row.map((value) => -value) : found.row;
     rows[found.index] = rows[pivots.length] ?? [];
     rows[pivots.length] = pivot;
+    const others = rows.filter((row, index) => index !== pivots.length && entry(row, column) !== 0n).length;
+    if (meter?.write(others, pivot.length, entry(pivot, column)) === false) break;
     rows.forEach((row, index) => {
       if (index !== pivots.length) rows[index] = clearColumn(row, pivot, column);
     });
@@ -117,7 +123,8 @@ export const rankOf = (matrix: IntegerMatrix): number => echelonOf(matrix, range
 export const independentColumns = (
   matrix: IntegerMatrix,
   order: readonly number[] = range(matrix[0]?.length ?? 0),
-): readonly number[] => echelonOf(matrix, order).pivots;
+  meter?: Meter,
+): readonly number[] => echelonOf(matrix, order, meter).pivots;
 
 /**
  * A basis of { v : matrix v = 0 } for a matrix of `columnCount` columns: primitive whole vectors, one for each column
@@ -125,17 +132,20 @@ export const independentColumns = (
  */
 export const nullSpace = (matrix: IntegerMatrix, columnCount: number): bigint[][] => {
   const echelon = echelonOf(matrix, range(columnCount));
-  const pivots = new Set(echelon.pivots);
-  return range(columnCount)
-    .filter((column) => !pivots.has(column))
-    .map((column) => nullVector(echelon, column, columnCount));
+  return freeColumns(echelon, columnCount).map((column) => nullVector(echelon, column, columnCount));
+};
+
+/** The columns without a pivot: as many as the null space has dimensions. */
+export const freeColumns = ({ pivots }: Echelon, columnCount: number): readonly number[] => {
+  const known = new Set(pivots);
+  return range(columnCount).filter((column) => !known.has(column));
 };
 
 /**
- * The null vector of the free column f. Each row says  p v[pivot] + r v[f] = 0,  so with v[f] = L, the least common
+ * The null vector of the free column f: positive there, 0 in the other free columns, primitive. Each row says  p v[pivot] + r v[f] = 0,  so with v[f] = L, the least common
  * multiple of all p / gcd(p, r), v[pivot] = -r L / p is whole.
  */
-const nullVector = (echelon: Echelon, free: number, columnCount: number): bigint[] => {
+export const nullVector = (echelon: Echelon, free: number, columnCount: number): bigint[] => {
   const vector = new Array<bigint>(columnCount).fill(0n);
   const parts = echelon.rows.map((row, index) => {
     const pivot = echelon.pivots[index] ?? 0;

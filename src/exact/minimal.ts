@@ -1,4 +1,4 @@
-import { type Bounds, type Meter, type TooHard, USUAL_BOUNDS, startMeter } from './bounds.ts';
+import { type Meter, type TooHard, startMeter } from './bounds.ts';
 import {
   type IntegerMatrix,
   type IntegerVector,
@@ -31,27 +31,35 @@ export type MinimalSolutions =
 export const minimalSolutions = (
   strict: IntegerMatrix,
   free: IntegerMatrix,
-  bounds: Bounds = USUAL_BOUNDS,
+  meter: Meter = startMeter(),
 ): MinimalSolutions => {
   const lines = nullSpace(free, free[0]?.length ?? 0);
   if (lines.length > 0) return { kind: 'lines', lines };
   const width = strict[0]?.length ?? 0;
   const equations = leftNullSpace(free, strict.length).map((row) => weighted(row, strict, width));
-  const meter = startMeter(bounds);
   const cone = extremeRays(equations, width, meter);
-  const passed = meter.passed();
-  if (passed !== undefined) return passed;
-  const rays = cone.map((x) => withFree(strict, free, x)).filter((ray) => ray !== undefined);
-  return { kind: 'rays', rays: rays.toSorted((a, b) => compareSupports(a.strict, b.strict)) };
+  const rays = cone.flatMap((x) => (meter.step(width) ? (withFree(strict, free, x, meter) ?? []) : []));
+  return meter.passed() ?? { kind: 'rays', rays: bySupport(rays, (ray) => ray.strict) };
 };
 
-/** Order of solutions: fewest columns, then least total, then the earlier columns. */
-export const compareSupports = (a: IntegerVector, b: IntegerVector): number => {
-  const count = (vector: IntegerVector): bigint => vector.reduce((sum, value) => (value === 0n ? sum : sum + 1n), 0n);
-  const total = (vector: IntegerVector): bigint => vector.reduce((sum, value) => sum + value, 0n);
-  const differences = [count(a) - count(b), total(a) - total(b), ...b.map((value, index) => value - entry(a, index))];
-  const first = differences.find((difference) => difference !== 0n) ?? 0n;
-  return first < 0n ? -1 : first > 0n ? 1 : 0;
+/** `items` by the vectors that they hold: fewest columns first, then least total, then the earlier columns. */
+export const bySupport = <T>(items: readonly T[], vectorOf: (item: T) => IntegerVector): readonly T[] => {
+  const keyed = items.map((item) => {
+    const vector = vectorOf(item);
+    const count = vector.reduce((sum, value) => (value === 0n ? sum : sum + 1), 0);
+    return { item, vector, count, total: vector.reduce((sum, value) => sum + value, 0n) };
+  });
+  const sorted = keyed.toSorted((a, b) => {
+    if (a.count !== b.count) return a.count - b.count;
+    return a.total === b.total ? compareColumns(b.vector, a.vector) : a.total < b.total ? -1 : 1;
+  });
+  return sorted.map(({ item }) => item);
+};
+
+/** By the first column in which the two differ. */
+const compareColumns = (a: IntegerVector, b: IntegerVector): number => {
+  const at = a.findIndex((value, index) => value !== entry(b, index));
+  return at === -1 ? 0 : entry(a, at) < entry(b, at) ? -1 : 1;
 };
 
 /**
@@ -73,7 +81,8 @@ interface Ray {
  * and rays with e r = 0 stay. Stops with an unfinished list once the meter has passed a bound.
  */
 const extremeRays = (equations: IntegerMatrix, width: number, meter: Meter): readonly IntegerVector[] => {
-  const { rows } = echelonOf(equations, range(width));
+  const { rows } = echelonOf(equations, range(width), meter);
+  if (!meter.step(width * (width + rows.length))) return [];
   let rays = range(width).map((at) => {
     const unit = range(width).map((column) => (column === at ? 1n : 0n));
     return rayOf([...unit, ...rows.map((row) => entry(row, at))], width);
@@ -115,8 +124,9 @@ const cut = (rays: readonly Ray[], column: number, state: CutState): Ray[] => {
   for (const up of rays.filter(({ row }) => entry(row, column) > 0n)) {
     for (const down of below) {
       if (!areAdjacent(up, down, rays, state)) continue;
+      if (!meter.write(1, up.row.length, entry(up.row, column))) return kept;
       const row = clearColumn(down.row, up.row, column);
-      if (!meter.step(row.length) || !meter.hold(row, kept.length + 1)) return kept;
+      if (!meter.hold(row, kept.length + 1)) return kept;
       kept.push(rayOf(row, width));
     }
     if (meter.passed() !== undefined) return kept;
@@ -130,7 +140,7 @@ const cut = (rays: readonly Ray[], column: number, state: CutState): Ray[] => {
  * pairs out at once.
  */
 const areAdjacent = (a: Ray, b: Ray, rays: readonly Ray[], { done, meter }: CutState): boolean => {
-  if (!meter.step(1)) return false;
+  if (!meter.step(1 + a.support.length)) return false;
   const union = unionOf(a.support, b.support);
   if (sizeOf(union) > done + 2 || !meter.step(rays.length)) return false;
   return rays.every((ray) => ray === a || ray === b || !isInside(ray.support, union));

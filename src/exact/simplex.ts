@@ -1,11 +1,13 @@
+import { type Meter, type TooHard, startMeter } from './bounds.ts';
 import { lcmOf } from './integer.ts';
 import { clearColumn, entry, range } from './matrix.ts';
 import type { IntegerMatrix, IntegerVector } from './matrix.ts';
 
-/** Whether B y = b has a solution y >= 0: one, as `numbers / denominator`, or Farkas' weights against all. */
+/** Whether B y = b has a solution y >= 0: one, as `numbers / denominator`; Farkas' weights against all; or a work limit. */
 export type Feasibility =
   | { readonly kind: 'feasible'; readonly numbers: bigint[]; readonly denominator: bigint }
-  | { readonly kind: 'infeasible'; readonly weights: bigint[] };
+  | { readonly kind: 'infeasible'; readonly weights: bigint[] }
+  | TooHard;
 
 /**
  * The tableau. Columns: y[0 .. n), one artificial variable for each row, the objective z, the right side.
@@ -30,14 +32,21 @@ interface Tableau {
  * the loop ends, when the sum is 0 or when nothing lowers it. Then the dual values y* = 1 - cost[a] satisfy
  * y* S B <= 0 and y* S b = the least sum; u = -y* S.
  */
-export const solveNonNegative = (matrix: IntegerMatrix, right: IntegerVector, width: number): Feasibility => {
+export const solveNonNegative = (
+  matrix: IntegerMatrix,
+  right: IntegerVector,
+  width: number,
+  meter: Meter = startMeter(),
+): Feasibility => {
   const tableau = startTableau(matrix, right, width);
   const last = width + matrix.length + 1;
   let column = steepest(tableau);
   while (column !== undefined && entry(tableau.cost, last) !== 0n) {
     const row = leaving(tableau, column);
     const falls = entry(tableau.rows[row] ?? [], last) > 0n;
-    pivotOn(tableau, row, column);
+    pivotOn(tableau, row, column, meter);
+    const passed = meter.passed();
+    if (passed !== undefined) return passed;
     column = falls ? steepest(tableau) : entering(tableau);
   }
   return entry(tableau.cost, last) === 0n ? solutionIn(tableau, last) : weightsIn(tableau, right);
@@ -96,8 +105,11 @@ const leaving = ({ rows, basis }: Tableau, column: number): number => {
 const compareRatios = (a: IntegerVector, b: IntegerVector, column: number): bigint =>
   entry(a, a.length - 1) * entry(b, column) - entry(b, b.length - 1) * entry(a, column);
 
-const pivotOn = (tableau: Tableau, at: number, column: number): void => {
+const pivotOn = (tableau: Tableau, at: number, column: number, meter: Meter): void => {
   const pivot = tableau.rows[at] ?? [];
+  const touched = tableau.rows.filter((row) => entry(row, column) !== 0n).length;
+  // its right side is the sum of what came before: no entry of the row is likely to be much longer
+  if (!meter.write(touched, pivot.length, entry(pivot, column) * entry(pivot, pivot.length - 1))) return;
   tableau.rows.forEach((row, index) => {
     if (index !== at) tableau.rows[index] = clearColumn(row, pivot, column);
   });

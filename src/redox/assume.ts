@@ -18,6 +18,7 @@ export interface Condition {
 
 /** Conditions thought of, balances given, and sets of conditions tried: among many unknowns fewer, as each costs more. */
 const MOST_CONDITIONS = 40;
+const MOST_PER_SIDE = 60;
 const MOST_GIVEN = 12;
 const triesAmong = (count: number): number => Math.min(400, Math.floor(400_000 / (count * count)));
 
@@ -57,20 +58,23 @@ interface Standing {
   readonly index: number;
 }
 
+/** The first that have this side: among more of them no condition is a likely one. */
 const standing = (unknowns: readonly Unknown[], side: Unknown['side']): readonly Standing[] =>
-  unknowns.flatMap(({ species, side: own }, index) =>
-    own === side && !isElectron(species) ? [{ species, index }] : [],
-  );
+  unknowns
+    .flatMap(({ species, side: own }, index) => (own === side && !isElectron(species) ? [{ species, index }] : []))
+    .slice(0, MOST_PER_SIDE);
 
 /** Conditions that two products form one to one, those of like elements first. */
 export const ratiosOfProducts = (unknowns: readonly Unknown[]): readonly Condition[] =>
   oneToOne(unknowns, standing(unknowns, 'right'), 'form');
 
 const oneToOne = (unknowns: readonly Unknown[], all: readonly Standing[], verb: string): readonly Condition[] =>
-  pairsOf(all).map(([a, b]) => ({
-    words: `${plainSpecies(a.species)} and ${plainSpecies(b.species)} ${verb} one to one`,
-    row: rowOf(unknowns, a, b, -1n),
-  }));
+  pairsOf(all)
+    .slice(0, MOST_CONDITIONS)
+    .map(([a, b]) => ({
+      words: `${plainSpecies(a.species)} and ${plainSpecies(b.species)} ${verb} one to one`,
+      row: rowOf(unknowns, a, b, -1n),
+    }));
 
 /**  nu_a + sign nu_b = 0,  or without b  nu_a = 0. */
 const rowOf = (unknowns: readonly Unknown[], a: Standing, b: Standing | null, sign: bigint): IntegerVector =>

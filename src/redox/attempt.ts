@@ -4,6 +4,7 @@ import { proved } from '../balance/recount.ts';
 import { type Verdict, solve } from '../balance/solve.ts';
 import { type Unknown, coefficientNotes, unknownsOf } from '../balance/unknowns.ts';
 import { type Note, note } from '../report/note.ts';
+import { type Meter, startMeter } from '../exact/bounds.ts';
 import type { Equation } from '../species/equation.ts';
 import { plainSpecies, sameSpecies } from '../species/species.ts';
 import { type Loan, lend, preferenceSentence } from './lend.ts';
@@ -21,17 +22,24 @@ export interface Attempt {
   /** The same, each on the side where it is written. */
   readonly asWritten: readonly Unknown[];
   readonly verdict: Verdict;
+  /** Counts all work that is spent on it. */
+  readonly meter: Meter;
 }
 
 /** Lends the helpers of `medium` to `skeleton` and solves; `electron`: e^- is an unknown. */
-export const attempt = (skeleton: Equation, medium: Medium, electron: boolean): Attempt => {
+export const attempt = (
+  skeleton: Equation,
+  medium: Medium,
+  electron: boolean,
+  meter: Meter = startMeter(),
+): Attempt => {
   const loan = lend(medium, skeleton, electron);
   const asWritten = unknownsOf(skeleton, { helpers: loan.helpers, electron });
   const unknowns = medium.name === 'neutral' ? asWritten.map(freeWater) : asWritten;
-  const verdict = solve(unknowns);
+  const verdict = solve(unknowns, meter);
   const idle = verdict.kind === 'unique' ? idleWater({ medium, asWritten }, verdict.numbers) : -1;
   const known: Verdict = idle === -1 ? verdict : { kind: 'idle-species', index: idle };
-  return { skeleton, medium, loan, unknowns, asWritten, verdict: known };
+  return { skeleton, medium, loan, unknowns, asWritten, verdict: known, meter };
 };
 
 const isWater = (unknown: Unknown): boolean => sameSpecies(unknown.species, WATER);

@@ -45,12 +45,12 @@ const OTHERS = note(
   'Other balances exist; this is the only one with electrons from which no species can be dropped.',
 );
 
-/** A couple: one reactant and one product, the electron aside. */
+/** A couple: one reactant and one product, the electron aside. Beyond the work limit, which the meter keeps, none. */
 const onlyElementary = (tried: Attempt): Numbers | undefined => {
   const { left, right } = tried.skeleton;
   const couple = [left, right].every((side) => side.filter((term) => !isElectron(term.species)).length === 1);
   if (!couple) return undefined;
-  const found = elementaryBalances(tried.unknowns);
+  const found = elementaryBalances(tried.unknowns, tried.meter);
   if (found.kind === 'too-hard') return undefined;
   const fitting = found.balances.filter((numbers) => {
     const whole = tried.unknowns.every((unknown, index) => unknown.side === 'free' || numbers[index] !== 0n);

@@ -1,4 +1,4 @@
-import { minimalBalances } from '../balance/family.ts';
+import { type Family, minimalBalances } from '../balance/family.ts';
 import { type Reaction, showReaction } from '../balance/reaction.ts';
 import type { ShownCoupling } from '../report/fault.ts';
 import { type Note, note } from '../report/note.ts';
@@ -27,13 +27,26 @@ export const settled = <Choice extends { readonly assume: string }>(
   });
 };
 
+/** Members of a family that a fault shows. */
+export const MOST_SHOWN = 200;
+
+/** What of a family is not shown, as a sentence after a space; "" where all of it is. */
+export const cutSentence = ({ members, complete }: Extract<Family, { readonly kind: 'family' }>): string => {
+  const count = String(members.length);
+  if (members.length > MOST_SHOWN) {
+    const of = complete ? count : `at least ${count}`;
+    return ` Of ${of} minimal ones the ${String(MOST_SHOWN)} with the fewest species are shown.`;
+  }
+  return complete ? '' : ` ${count} minimal ones are shown; there may be more.`;
+};
+
 /** The fault `several-balances` with its family, or `too-hard` where the family is beyond the work limits. */
 export const severalBalances = (
   tried: Attempt,
   dimension: number,
   couplings: readonly ShownCoupling[],
 ): Result<never> => {
-  const family = minimalBalances(tried.unknowns);
+  const family = minimalBalances(tried.unknowns, tried.meter);
   if (family.kind === 'too-hard') {
     return failure({
       code: 'too-hard',
@@ -46,9 +59,9 @@ export const severalBalances = (
   return failure({
     code: 'several-balances',
     dimension,
-    family: family.members.map((numbers) => showReaction(finish(tried, numbers))),
+    family: family.members.slice(0, MOST_SHOWN).map((numbers) => showReaction(finish(tried, numbers))),
     couplings,
-    message: `Conservation does not settle this: it has ${String(dimension)} independent balances.`,
+    message: `Conservation does not settle this: it has ${String(dimension)} independent balances.${cutSentence(family)}`,
     hint:
       first === undefined
         ? 'Write fewer species, or a medium with fewer helpers.'

@@ -1,5 +1,6 @@
 import { bench, describe } from 'vitest';
 import { type IntegerMatrix, nullSpace } from '../../src/exact/matrix.ts';
+import { startMeter } from '../../src/exact/bounds.ts';
 import { hilbertBasis } from '../../src/exact/hilbert.ts';
 import { minimalSolutions } from '../../src/exact/minimal.ts';
 import { strictlyPositive } from '../../src/exact/positive.ts';
@@ -101,6 +102,6 @@ describe.each([
     minimalSolutions(matrix, []);
   });
   bench('irreducible, within bounds', () => {
-    hilbertBasis(matrix, [], { vectors: 500, steps: 500_000, digits: 100 });
+    hilbertBasis(matrix, [], startMeter({ vectors: 500, steps: 500_000, digits: 100 }));
   });
 });

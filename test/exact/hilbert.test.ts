@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { USUAL_BOUNDS } from '../../src/exact/bounds.ts';
+import { USUAL_BOUNDS, startMeter } from '../../src/exact/bounds.ts';
 import { hilbertBasis } from '../../src/exact/hilbert.ts';
 import { minimalSolutions } from '../../src/exact/minimal.ts';
 import type { IntegerMatrix } from '../../src/exact/matrix.ts';
@@ -132,15 +132,16 @@ describe('Hilbert bases', () => {
   it('stops at a bound and names it', () => {
     // x, y, 10^60 x - y >= 0: (1, k) is irreducible for every k up to 10^60
     const endless = [[10n ** 60n, -1n, -1n]];
-    expect(hilbertBasis(endless, [], { ...USUAL_BOUNDS, vectors: 50 })).toEqual({
+    expect(hilbertBasis(endless, [], startMeter({ ...USUAL_BOUNDS, vectors: 50 }))).toEqual({
       kind: 'too-hard',
       limit: '50 vectors',
     });
-    expect(hilbertBasis(endless, [], { ...USUAL_BOUNDS, digits: 20 })).toEqual({
+    expect(hilbertBasis(endless, [], startMeter({ ...USUAL_BOUNDS, digits: 20 }))).toEqual({
       kind: 'too-hard',
       limit: '20 digits',
     });
-    expect(hilbertBasis(endless, [], { ...USUAL_BOUNDS, steps: 30 })).toEqual({ kind: 'too-hard', limit: '30 steps' });
+    const few = startMeter({ ...USUAL_BOUNDS, steps: 30 });
+    expect(hilbertBasis(endless, [], few)).toEqual({ kind: 'too-hard', limit: '30 steps' });
   });
 });
 

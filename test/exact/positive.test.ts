@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { type Meter, USUAL_BOUNDS, startMeter } from '../../src/exact/bounds.ts';
 import { gcdOf } from '../../src/exact/integer.ts';
 import { type IntegerMatrix, rankOf } from '../../src/exact/matrix.ts';
 import { idleColumns, nonNegative, nonNegativeWith, strictlyPositive, withFree } from '../../src/exact/positive.ts';
@@ -42,6 +43,7 @@ describe('strictly positive solutions', () => {
           expectCertificate(system, found.certificate);
           return;
         }
+        if (found.kind === 'too-hard') throw new Error('this is not hard');
         expectSolution(system, found.strict, found.free);
         expect(found.strict.every((value) => value > 0n)).toBe(true);
       }),
@@ -82,6 +84,7 @@ describe('strictly positive solutions', () => {
       fc.property(systems(4, 5, 2, BIG), (system) => {
         const found = strictlyPositive(system.strict, system.free);
         if (found.kind === 'impossible') expectCertificate(system, found.certificate);
+        else if (found.kind === 'too-hard') throw new Error('this is not hard');
         else expectSolution(system, found.strict, found.free);
       }),
     );
@@ -96,11 +99,17 @@ describe('strictly positive solutions', () => {
   });
 });
 
+const idleIn = (strict: IntegerMatrix, free: IntegerMatrix): readonly number[] => {
+  const found = idleColumns(strict, free);
+  if (found.kind === 'too-hard') throw new Error('this is not hard');
+  return found.columns;
+};
+
 describe('non-negative solutions', () => {
   it('calls idle exactly the columns that no solution can use', () => {
     fc.assert(
       fc.property(systems(4, 6, 2, 4n), (system) => {
-        const idle = idleColumns(system.strict, system.free);
+        const idle = idleIn(system.strict, system.free);
         (system.strict[0] ?? []).forEach((_, index) => {
           const found = nonNegativeWith(system.strict, system.free, index);
           expect(found === undefined).toBe(idle.includes(index));
@@ -116,7 +125,7 @@ describe('non-negative solutions', () => {
   it('leaves the columns at work in a balance of their own once the idle ones are gone', () => {
     fc.assert(
       fc.property(systems(4, 6, 2, 4n), ({ strict, free }) => {
-        const idle = idleColumns(strict, free);
+        const idle = idleIn(strict, free);
         const live = strict.map((row) => row.filter((_, at) => !idle.includes(at)));
         fc.pre((live[0] ?? []).length > 0);
         expect(strictlyPositive(live, free).kind).toBe('solvable');
@@ -125,12 +134,27 @@ describe('non-negative solutions', () => {
     );
   });
 
+  it('names idle columns over several certificates', () => {
+    // x0 + x1 = 0 stops both, and only then x1 + x2 - x3 = 0 and x3 + x4 = 0 stop the others
+    expect(idleIn(matrixOf('1 1 0 0 0 0 0; 0 -1 1 -1 0 0 0; 0 0 0 1 1 0 0; 0 0 0 0 0 1 -1'), [])).toEqual([
+      0, 1, 2, 3, 4,
+    ]);
+  });
+
+  it('stops at a bound of steps', () => {
+    const hard = matrixOf('3 -2 5 -7 1; 1 4 -6 2 -3; -2 1 1 1 -1');
+    const few = (): Meter => startMeter({ ...USUAL_BOUNDS, steps: 10 });
+    const passed = { kind: 'too-hard', limit: '10 steps' };
+    expect(strictlyPositive(hard, [], few())).toEqual(passed);
+    expect(idleColumns(hard, [], few())).toEqual(passed);
+  });
+
   it('finds a solution that is not zero, or says that there is none', () => {
     expect(nonNegative(matrixOf('1 1; 0 1'), [])).toBeUndefined();
     expect(nonNegative(matrixOf('1 0 -2'), [])).toEqual({ strict: [2n, 0n, 1n], free: [] });
     expect(nonNegative(matrixOf('1 0 2'), [])).toEqual({ strict: [0n, 1n, 0n], free: [] });
     expect(nonNegative(matrixOf('1 2'), matrixOf('3'))).toEqual({ strict: [3n, 0n], free: [-1n] });
-    expect(idleColumns(matrixOf('1 1 0'), [])).toEqual([0, 1]);
+    expect(idleIn(matrixOf('1 1 0'), [])).toEqual([0, 1]);
   });
 });
 

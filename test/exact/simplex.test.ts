@@ -36,6 +36,7 @@ describe('non-negative solutions of equations with a right side', () => {
           expect(found.denominator > 0n && found.numbers.every((value) => value >= 0n)).toBe(true);
           expect(product(matrix, found.numbers)).toEqual(right.map((value) => value * found.denominator));
         } else {
+          if (found.kind === 'too-hard') throw new Error('this is not hard');
           expect(combination(found.weights, matrix).every((value) => value >= 0n)).toBe(true);
           expect(sumOf(found.weights, right) < 0n).toBe(true);
         }
