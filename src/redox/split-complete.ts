@@ -52,7 +52,13 @@ export const completeTerms = (terms: readonly Term[], medium: Medium): readonly 
 /** In a neutral medium no H^+ is used up: OH^- added on both sides makes water of it and stands on the right. */
 const withoutAcid = (terms: readonly Term[]): readonly Term[] => {
   const acid = terms.find(({ species }) => species.key === PROTON.key);
-  if (acid === undefined || signOf(acid.nu) > 0n) return terms;
+  return acid === undefined || signOf(acid.nu) > 0n ? terms : inHydroxide(terms);
+};
+
+/** OH^- added on both sides until no H^+ is left:  H^+ + OH^- = H2O. */
+export const inHydroxide = (terms: readonly Term[]): readonly Term[] => {
+  const acid = terms.find(({ species }) => species.key === PROTON.key);
+  if (acid === undefined) return terms;
   const change = [
     { species: acid.species, nu: acid.nu.neg() },
     { species: WATER, nu: acid.nu },

@@ -3,7 +3,8 @@ import { ONE, isZero, signOf } from '../exact/rational.ts';
 import type { Species } from '../species/species.ts';
 import { HYDROXIDE, PROTON, WATER, mediumRow } from './media.ts';
 import type { Medium } from './medium.ts';
-import { type Amounts, sumOfTerms } from './split-amounts.ts';
+import { type Amounts, sumOfTerms, termsOf } from './split-amounts.ts';
+import { inHydroxide } from './split-complete.ts';
 import { dissolvedIons } from './split-dissolve.ts';
 import { type Portion, ionsOfSalt, speciesOf } from './split-salt.ts';
 
@@ -23,12 +24,22 @@ export type Reach = 'dissolved' | 'every salt';
  */
 export const ionicReaction = (reaction: Reaction, medium: Medium, reach: Reach): IonicReaction => {
   const molecular = reaction.terms.every(({ species }) => isZero(species.charge));
-  const lists = reaction.terms.map(({ species, nu }): readonly [readonly Term[], typeof nu] => [
+  const amounts = ionicAmounts(reaction.terms, reach, molecular);
+  return { amounts, medium: molecular ? mediumShown(reaction, medium) : medium };
+};
+
+/** A half of a molecular reaction between ions: what dissolves taken apart, and OH^- in place of H^+ in base. */
+export const ionicHalf = (half: Reaction, medium: Medium): readonly Term[] => {
+  const terms = termsOf(ionicAmounts(half.terms, 'dissolved', true));
+  return medium.helpers.some(({ key }) => key === HYDROXIDE.key) ? inHydroxide(terms) : terms;
+};
+
+const ionicAmounts = (terms: readonly Term[], reach: Reach, molecular: boolean): Amounts => {
+  const lists = terms.map(({ species, nu }): readonly [readonly Term[], typeof nu] => [
     portionsOf(species, reach, molecular).map((portion) => ({ species: portion.species, nu: portion.count })),
     nu,
   ]);
-  const amounts = foldedIons(sumOfTerms(lists));
-  return { amounts, medium: molecular ? mediumShown(reaction, medium) : medium };
+  return foldedIons(sumOfTerms(lists));
 };
 
 const portionsOf = (species: Species, reach: Reach, molecular: boolean): readonly Portion[] => {
@@ -54,7 +65,7 @@ const sulfateOf = (hydrogensulfate: Species): Species => {
 };
 
 /** H^+ and OH^- on one side are water. */
-export const foldedIons = (amounts: Amounts): Amounts => {
+const foldedIons = (amounts: Amounts): Amounts => {
   const [acid, base] = [amounts.get(PROTON.key), amounts.get(HYDROXIDE.key)];
   if (acid === undefined || base === undefined || signOf(acid.nu) !== signOf(base.nu)) return amounts;
   const folded = acid.nu.abs().compare(base.nu.abs()) < 0 ? acid.nu : base.nu;

@@ -1,12 +1,14 @@
-import { type Reaction, plainReaction, showReaction } from '../balance/reaction.ts';
+import { type Reaction, type Term, plainReaction, showReaction } from '../balance/reaction.ts';
 import { type Rational, isZero } from '../exact/rational.ts';
 import { type Note, note } from '../report/note.ts';
 import { type Result, failure, success } from '../report/result.ts';
 import { PROTON, mediumRow } from './media.ts';
 import type { Medium } from './medium.ts';
-import { type SplitHalf, electronsOf, halfOfTerms } from './split-complete.ts';
+import { termsOf } from './split-amounts.ts';
+import { type SplitHalf, halfOfTerms } from './split-complete.ts';
 import { type Flow, type OxidationChange, distinctChanges, elementsOf, flowsOf, increaseIn } from './split-flows.ts';
 import { type Halves, halvesOf } from './split-halves.ts';
+import { ionicHalf, ionicReaction } from './split-ionic.ts';
 
 /** What is split: an overall reaction in its medium, with the halves of a coupling where one settled it. */
 export interface Unsplit {
@@ -47,21 +49,24 @@ export const splitReaction = (unsplit: Unsplit): Result<RedoxSplit> => {
   return success(split, [...(halves === null ? [halvesOmitted()] : []), ...(decided ? [] : [undecided()])]);
 };
 
-/** A coupling's own halves count, but where those found exchange as many electrons they are ionic and are taken. */
+/** A coupling's own halves count, but where those found exchange as many electrons they are the better spelled. */
 const chosenHalves = ({ reaction, medium, halves, exchanged }: Unsplit, found: Halves | null): Halves | null => {
   if (halves === null || exchanged === null || found?.electrons.equals(exchanged) === true) return found;
-  const spelled = reaction.terms.map(({ species }) => species);
-  const taken = (half: Reaction): SplitHalf => ({
-    half: halfOfTerms(half.terms, mediumOf(half, medium), spelled).half,
-    multiplier: exchanged.div(electronsOf(half.terms).abs()),
-  });
+  const molecular = reaction.terms.every(({ species }) => isZero(species.charge));
+  const ionic = ionicReaction(reaction, medium, 'dissolved');
+  const spelled = [...termsOf(ionic.amounts), ...reaction.terms].map(({ species }) => species);
+  const taken = (own: Reaction): SplitHalf => {
+    const terms = molecular ? ionicHalf(own, ionic.medium) : own.terms;
+    const { half } = halfOfTerms(terms, mediumOf(terms, ionic.medium), spelled);
+    return { half, multiplier: exchanged.div(half.electrons) };
+  };
   return { oxidation: taken(halves.oxidation), reduction: taken(halves.reduction), electrons: exchanged };
 };
 
 /** Acid where a half hands H^+ to the other though the medium lends none. */
-const mediumOf = (half: Reaction, medium: Medium): Medium => {
+const mediumOf = (half: readonly Term[], medium: Medium): Medium => {
   const acid = mediumRow('acid');
-  const handsOver = half.terms.some(({ species }) => species.key === PROTON.key);
+  const handsOver = half.some(({ species }) => species.key === PROTON.key);
   if (acid === undefined || !handsOver || medium.helpers.some(({ key }) => key === PROTON.key)) return medium;
   return { name: acid.name, helpers: acid.helpers };
 };

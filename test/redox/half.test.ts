@@ -123,6 +123,13 @@ describe('completing a half-reaction', () => {
     expect(fault).toMatchObject({ field: 'settle', hint: 'Did you mean if 1 O3 gives 1 O2?' });
   });
 
+  it('refuses an assumption where nothing is to be settled', () => {
+    expect(half('MnO4^- -> Mn^2+', 'acid', 'zzz')).toMatchObject({ code: 'bad-ask', field: 'settle' });
+    expect(half('CrO4^2- -> Cr2O7^2-', 'acid', 'zzz')).toMatchObject({ code: 'bad-ask', field: 'settle' });
+    expect(half('MnO4^- + Na^+ -> Mn^2+', 'acid', 'zzz')).toMatchObject({ code: 'missing-element' });
+    expect(half('O2 -> H2O2', 'acid', 'zzz')).toMatchObject({ code: 'bad-ask', field: 'settle' });
+  });
+
   it('gives the balanced reaction where nothing is oxidised or reduced', () => {
     const fault = faultWith(half('CrO4^2- -> Cr2O7^2-', 'acid'), 'no-electrons');
     expect(fault.reaction.plain).toBe('2 CrO4^2- + 2 H^+ -> Cr2O7^2- + H2O');

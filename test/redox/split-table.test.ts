@@ -1,9 +1,10 @@
 import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { plainReaction } from '../../src/balance/reaction.ts';
-import { type Rational, ONE, ZERO, rational, rationalFromText, showRational } from '../../src/exact/rational.ts';
+import { rational, showRational } from '../../src/exact/rational.ts';
 import { balanceRedox } from '../../src/redox/redox.ts';
 import type { SplitHalf } from '../../src/redox/split-complete.ts';
+import { electronsIn, leftOver, scaled } from '../support/halves.ts';
 import { plainEquation, residualByHand } from '../support/plain.ts';
 
 const rows = readFileSync('fixtures/redox/redox.tsv', 'utf8')
@@ -22,41 +23,6 @@ const rows = readFileSync('fixtures/redox/redox.tsv', 'utf8')
     ] = line.split('\t');
     return { skeleton, medium, overall, electrons, oxidation, reduction, changes, net };
   });
-
-/** `5/2 2 I^- -> I2 + 2 e^-`: how often, and the half. */
-const scaled = (text: string): { readonly times: Rational; readonly half: string } => {
-  const [times = '', ...rest] = text.split(' ');
-  return { times: rationalFromText(times), half: rest.join(' ') };
-};
-
-const add = (sums: Map<string, Rational>, text: string, times: Rational): void => {
-  const { left, right } = plainEquation(text);
-  for (const { coefficient, species } of right) put(sums, species.key, coefficient.mul(times));
-  for (const { coefficient, species } of left) put(sums, species.key, coefficient.mul(times).neg());
-};
-
-const put = (sums: Map<string, Rational>, key: string, value: Rational): void => {
-  sums.set(key, (sums.get(key) ?? ZERO).add(value));
-};
-
-/** What two scaled halves and minus a reaction leave over; H^+ with OH^- counted as water. */
-const leftOver = (halves: readonly string[], reaction: string): readonly string[] => {
-  const sums = new Map<string, Rational>();
-  for (const text of halves) add(sums, scaled(text).half, scaled(text).times);
-  add(sums, reaction, ONE.neg());
-  const acid = sums.get('H^+') ?? ZERO;
-  put(sums, 'H^+', acid.neg());
-  put(sums, 'OH^-', acid.neg());
-  put(sums, 'H2O', acid);
-  return [...sums].filter(([, value]) => !value.equals(ZERO)).map(([key]) => key);
-};
-
-const electronsIn = (text: string): Rational => {
-  const { times, half } = scaled(text);
-  const { left, right } = plainEquation(half);
-  const electron = [...left, ...right].find(({ species }) => species.key === 'e^-');
-  return (electron?.coefficient ?? ZERO).mul(times);
-};
 
 const shownHalf = (split: SplitHalf | null): string =>
   split === null ? '-' : `${showRational(split.multiplier)} ${plainReaction(split.half.reaction)}`;

@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { plainReaction } from '../../src/balance/reaction.ts';
 import { showRational } from '../../src/exact/rational.ts';
 import { balanceRedox } from '../../src/redox/redox.ts';
+import { readEquation } from '../../src/species/read.ts';
 import { plainEquation } from '../support/plain.ts';
 
 const splitOf = (skeleton: string, medium?: string) => {
@@ -39,6 +40,41 @@ describe('the medium of the halves', () => {
     const { oxidation, reduction } = splitOf('MnO4^- + SO2 + H2O -> Mn^2+ + SO4^2- + H^+', 'none');
     expect(oxidation).toBe('SO2 + 2 H2O -> SO4^2- + 4 H^+ + 2 e^-');
     expect(reduction).toBe('MnO4^- + 8 H^+ + 5 e^- -> Mn^2+ + 4 H2O');
+  });
+});
+
+describe('the note on an assumed medium', () => {
+  const noteOf = (skeleton: string, settle?: string): string | undefined => {
+    const read = readEquation(skeleton);
+    if (!read.ok) throw new Error(read.fault.message);
+    const found = balanceRedox(read.value, undefined, settle);
+    if (!found.ok) throw new Error(found.fault.message);
+    return found.notes.find(({ code }) => code === 'medium-assumed')?.message;
+  };
+
+  it('says where the halves stand, if that is not in acid', () => {
+    const settle = 'if KO2 is oxidised to O2 and KO2 is reduced to H2O2';
+    expect(noteOf('KO2 + H2O -> KOH + H2O2 + O2', settle)).toContain('its halves stand in the medium base (H2O, OH^-)');
+    expect(noteOf('D2 + O2 -> D2O')).toContain('its halves stand beside D2O, D^+');
+    expect(noteOf('Na + O2 -> Na2O')).toContain('its halves stand in the medium molten-oxide (O^2-)');
+  });
+
+  it('says that acid was taken, if it was', () => {
+    expect(noteOf('Zn + HCl -> ZnCl2 + H2')).toContain('acid was taken');
+  });
+});
+
+describe('heavy hydrogen', () => {
+  it('has halves with helpers of its own nuclide', () => {
+    // by hand: 2 D2 + O2 -> 2 D2O as in a fuel cell
+    const read = readEquation('D2 + O2 -> D2O');
+    if (!read.ok) throw new Error(read.fault.message);
+    const found = balanceRedox(read.value, 'acid');
+    if (!found.ok) throw new Error(found.fault.message);
+    const { oxidation, reduction } = found.value;
+    expect(oxidation && plainReaction(oxidation.half.reaction)).toBe('D2 -> 2 D^+ + 2 e^-');
+    expect(reduction && plainReaction(reduction.half.reaction)).toBe('O2 + 4 D^+ + 4 e^- -> 2 D2O');
+    expect(oxidation && showRational(oxidation.multiplier)).toBe('2');
   });
 });
 
