@@ -5,7 +5,7 @@ import { type Span, spanOf } from '../report/span.ts';
 import { type Clock, readClock } from './sheet-clock.ts';
 
 /** What a goal may be stated in, the likeliest first. */
-const GOALS = ['mass', 'thickness', 'volume', 'amount', 'charge'] as const;
+const GOALS = ['mass', 'thickness', 'amount', 'volume', 'charge'] as const;
 
 /** "2 kg of Cu by 16:00", read. */
 export interface Goal {

@@ -6,6 +6,11 @@ import { termText } from './spelling.ts';
 
 type Contributions = NonNullable<EquationAuditAnswer['contributions']>;
 
+const shownAmount = (label: string, amount: string, look: Look): string => {
+  const text = amountText(label, amount);
+  return look.unicode ? text.replace('-', '−') : text;
+};
+
 /** The labels of a ledger that some term puts something into, in the order of the ledger. */
 export const labelsOf = (audit: EquationAuditAnswer): readonly string[] => Object.keys(audit.ledger);
 
@@ -24,7 +29,7 @@ export const contributionLines = (audit: EquationAuditAnswer, look: Look): reado
       termText(term, look),
       ...labels.map((label): Cell | string => {
         const amount = amounts[label];
-        return amount === undefined ? nothing : amountText(label, amount);
+        return amount === undefined ? nothing : shownAmount(label, amount, look);
       }),
     ];
   });

@@ -23,7 +23,7 @@ export const graveLines = (cautions: readonly ShownCaution[], look: Look): reado
 
 /** Below the cautions: that none shown does not mean safe. */
 export const absenceLines = (cautions: readonly ShownCaution[], look: Look): readonly string[] =>
-  cautions.length === 0 ? [] : wrapped(ABSENCE).map(look.paint.faint);
+  cautions.length === 0 ? [] : wrapped(ABSENCE).map((line) => look.paint.faint(line));
 
 /** The other cautions, those that depend on a condition last. */
 export const cautionLines = (cautions: readonly ShownCaution[], look: Look): readonly string[] => {

@@ -10,11 +10,12 @@ const SWATCH = 11;
 /** How a part is filled: told apart by pattern as well as by colour, so that paper without colour says the same. */
 const fillOf = (part: CurrentPart, at: number): string => (part.species === null ? 'rest' : `part${String(at % 4)}`);
 
-/** "93.4 %"; a share that would be rounded to nothing or to all keeps its digits. */
+/** "93.4 %"; a share that would be rounded to nothing or to all keeps three decimals. */
 export const shareText = (share: number): string => {
   const percent = share * 100;
-  const near = percent > 0 && (percent < 0.1 || (percent > 99.9 && percent < 100));
-  return `${near ? percent.toPrecision(2) : String(Number(percent.toFixed(1)))} %`;
+  if (percent > 0 && percent < 0.001) return 'under 0.001 %';
+  const near = (percent > 0 && percent < 0.1) || (percent > 99.9 && percent < 100);
+  return `${String(Number(percent.toFixed(near ? 3 : 1)))} %`;
 };
 
 const UNNAMED = 'not accounted for';

@@ -7,7 +7,7 @@ import type { Look } from './look.ts';
 import { absenceLines, cautionLines, graveLines, noteLines } from './remarks.ts';
 import { reactionText, speciesText } from './spelling.ts';
 
-const HEAD = ['product', 'e- per mole', 'e- in mol/kg', 'g/(A h)', 'A h/kg', 'gas, mL/(A min)'];
+const HEAD = ['product', 'e- per mole', 'mol e-/kg', 'g/(A h)', 'A h/kg', 'mL/(A min)'];
 const SIDES: readonly Alignment[] = ['left', 'right', 'right', 'right', 'right', 'right'];
 
 const cellsOf = (row: WallRow, look: Look): readonly string[] => [
@@ -59,7 +59,7 @@ export const renderWall = (
 ): string => {
   const { grave, notes, others, absence } = remarksOf(remarks.notes, remarks.cautions, look);
   const foot = rows.some(({ gasPerCharge }) => gasPerCharge !== null)
-    ? [look.paint.faint(`gas: ideal and dry, at ${temperature} and ${pressure}`)]
+    ? [look.paint.faint(`mL/(A min): ideal dry gas at ${temperature} and ${pressure}`)]
     : [];
   return page([grave, tableLines(rows, look), foot, notes, others, absence]);
 };

@@ -43,31 +43,29 @@ const product = text
   .describe('The species that the efficiency is about; left out: the product of the tank.');
 
 /** A logged current: a file beside the sheet, and what its header does not say. */
-const recordSchema = z
-  .union([
-    text.describe('The path of a CSV file, seen from the sheet: "logs/monday.csv".'),
-    z.strictObject({
-      file: text.describe('The path of a CSV file, seen from the sheet.'),
-      time: text.optional().describe('The column of time, by name or number from 1.'),
-      current: text.optional().describe('The column of current, by name or number from 1.'),
-      time_unit: text.optional(),
-      current_unit: text.optional(),
-      decimal: z.enum(['point', 'comma']).optional(),
-      rule: z.enum(['trapezoid', 'hold']).optional(),
-      gap: text.optional().describe('A step longer than this is a gap: "30 s".'),
-      gap_charge: z.enum(['count', 'skip']).optional(),
-      zero: text.optional().describe('A current of this size or less is a pause: "50 mA".'),
-      meter: text.optional().describe('One standard uncertainty of the logged current, relative: "0.5 %".'),
-    }),
-  ])
-  .describe('The logged current of the run; it gives the charge and the time.');
+const recordSchema = z.union([
+  text.describe('The path of a CSV file, seen from the sheet: "logs/monday.csv".'),
+  z.strictObject({
+    file: text.describe('The path of a CSV file, seen from the sheet.'),
+    time: text.optional().describe('The column of time, by name or number from 1.'),
+    current: text.optional().describe('The column of current, by name or number from 1.'),
+    time_unit: text.optional(),
+    current_unit: text.optional(),
+    decimal: z.enum(['point', 'comma']).optional(),
+    rule: z.enum(['trapezoid', 'hold']).optional(),
+    gap: text.optional().describe('A step longer than this is a gap: "30 s".'),
+    gap_charge: z.enum(['count', 'skip']).optional(),
+    zero: text.optional().describe('A current of this size or less is a pause: "50 mA".'),
+    meter: text.optional().describe('One standard uncertainty of the logged current, relative: "0.5 %".'),
+  }),
+]);
 
 /** One run of a tank. */
 export const runSchema = z
   .strictObject({
     label: text.describe('What the run is called.'),
     product,
-    record: recordSchema.optional(),
+    record: recordSchema.optional().describe('The logged current of the run; it gives the charge and the time.'),
     charge: quantity('1500 A h'),
     time: quantity('6 h 30 min'),
     ...conditions,
