@@ -31,7 +31,7 @@ export const seriesOption = new Option(
   '--series <CELL>',
   'a further cell of the same circuit, "SPECIES: HALF", with what was measured in it behind semicolons: ' +
     '--series "Ag: Ag^+ + e^- -> Ag; mass=4.025 g"; repeatable',
-).argParser<readonly Fields[]>((typed, before = []) => [...before, seriesCell(typed)]);
+).argParser<readonly Fields[]>(seriesCells);
 
 /** "Ag: Ag^+ + e^- -> Ag; mass=4.025 g": species, half-reaction, what is given. Throws where it has no such form. */
 const seriesCell = (typed: string): Fields => {
@@ -44,6 +44,11 @@ const seriesCell = (typed: string): Fields => {
     .reduce<Pairs>((all, one) => collectPairs(one.trim(), all), {});
   return { species: species.trim(), half: half.trim(), ...(Object.keys(pairs).length === 0 ? {} : { given: pairs }) };
 };
+
+/** Collects the cells in series. */
+function seriesCells(typed: string, before: readonly Fields[] = []): readonly Fields[] {
+  return [...before, seriesCell(typed)];
+}
 
 /** What the options of stacks, budgets, tanks and series say. */
 export interface AmountsOptions {

@@ -63,7 +63,7 @@ describe('couplet table', () => {
     // 60 C over 2 F, times 22.414 L/mol; OH^- was not asked for.
     expect(out).toMatch(/^ {4}H2 .* 6\.969\d+$/m);
     expect(out).not.toMatch(/^ {4}OH/m);
-    expect(out).toContain('gas: ideal and dry, at 0 °C and 101.325 kPa');
+    expect(out).toContain('mL/(A min): ideal dry gas at 0 °C and 101.325 kPa');
   });
 
   it('is Markdown or CSV for other programs, the cautions on standard error', async () => {

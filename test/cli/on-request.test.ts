@@ -122,6 +122,25 @@ describe('an audit', () => {
   });
 });
 
+describe('a page in colour', () => {
+  const chlorine = ['cell', '--anode', 'Cl^- -> Cl2', '--cathode', 'H2O -> H2', '--medium', 'neutral'];
+  const pages = [
+    chlorine,
+    ['half', 'MnO4^- -> Mn^2+'],
+    ['table', 'Cl^- -> Cl2', 'H2O -> H2', '--medium', 'neutral'],
+    ['audit', 'H2 + O2 -> H2O', '--contributions'],
+    ['amounts', '--half', '2 Cl^- -> Cl2(g) + 2 e^-', '--species', 'Cl2', '--given', 'charge=1.00(1) A h', '--budget'],
+  ];
+
+  it.each(pages)('says what it says without: %s %s', async (...argv) => {
+    const coloured = await couplet(argv, { terminal: true, colour: true });
+    const bare = await couplet(argv, { terminal: true });
+    expect(coloured.out).toContain(ESCAPE);
+    expect(coloured.out.replaceAll(new RegExp(`${ESCAPE}\\[\\d+m`, 'g'), '')).toBe(bare.out);
+    expect(bare.out.split('\n').filter((line) => line.length > 80)).toEqual([]);
+  });
+});
+
 describe('the version', () => {
   it('is that of package.json', async () => {
     const { version } = JSON.parse(readFileSync('package.json', 'utf8')) as { readonly version: string };
