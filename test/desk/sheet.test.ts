@@ -1,6 +1,9 @@
+import { spawnSync } from 'node:child_process';
+import { createHash } from 'node:crypto';
 import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
-import { answerSheet } from '../../src/desk/sheet.ts';
+import { openRecord } from '../../src/amounts/record-reader.ts';
+import { answerReadSheet, answerSheet, readSheet } from '../../src/desk/sheet.ts';
 import type { SheetAnswer } from '../../src/desk/sheet-answer.ts';
 import { LONGEST_SHEET } from '../../src/desk/sheet-text.ts';
 import type { Fault } from '../../src/report/fault.ts';
@@ -31,8 +34,56 @@ ${rest}`;
 
 const GOOD = tank('Good', '    runs: [{ label: r, current: 2 A, time: 1 h }]\n');
 
+/** The record of the demo as its script writes it: the build does the same. */
+const madeRecord = (): string => {
+  const made = spawnSync(process.execPath, ['fixtures/make-tern-quay-record.js']);
+  if (made.status !== 0) throw new Error(String(made.stderr));
+  return readFileSync('fixtures/records/tern-quay-wednesday.csv', 'utf8');
+};
+
+const answeredQuay = (record: string): SheetAnswer => {
+  const read = readSheet(QUAY);
+  const opened = openRecord();
+  if (!read.ok || !opened.ok) throw new Error('not read');
+  opened.value.take(record);
+  const [named] = read.value.records;
+  return answerReadSheet(read.value, new Map([[named?.key ?? '', opened.value.end()]]));
+};
+
 describe('the sheet of Tern Quay', () => {
-  const quay = sheetOf(QUAY);
+  const record = madeRecord();
+  const quay = answeredQuay(record);
+
+  it('has a logged run of at least 50 000 rows, the same bytes on every machine', () => {
+    const digest = createHash('sha256').update(record).digest('hex');
+    expect(record.split('\n').length - 2).toBeGreaterThanOrEqual(50_000);
+    expect(digest).toBe('4d35796d0c6fe3e58f0b81ca4c3fe7e01a64392450817a0fa3aad6e056d018cf');
+  });
+
+  it('gives the charge of the record that a plain sum of trapezoids gives', () => {
+    const rows = record.trim().split('\n').slice(1);
+    const readings = rows.map((row) => row.split(',').map(Number) as [number, number]);
+    let coulombs = 0;
+    readings.forEach(([time, current], at) => {
+      const [before = time, was = current] = readings[at - 1] ?? [];
+      coulombs += ((time - before) * (current + was)) / 2;
+    });
+    const tank = quay.tanks[0];
+    const run = tank === undefined || 'fault' in tank ? undefined : tank.runs[2];
+    if (run === undefined || 'fault' in run) throw new Error('a fault');
+    expect(run.amounts.answer.quantities['charge']?.value).toBeCloseTo(coulombs / 3600, 6);
+    expect(run.record?.rows).toBe(readings.length);
+    expect(run.record?.trace.length).toBeLessThanOrEqual(512);
+  });
+
+  it('lets the wet weighing of Thursday stand out, and reaches both goals', () => {
+    const tank = quay.tanks[0];
+    if (tank === undefined || 'fault' in tank) throw new Error('a fault');
+    const out = tank.runs.filter((run) => !('fault' in run) && run.weighed !== null && run.weighed.standsOut !== null);
+    expect(out.map(({ name }) => name)).toEqual(['Thursday']);
+    const goals = quay.tanks.flatMap((one) => ('fault' in one ? [] : one.targets));
+    expect(goals.map((goal) => 'fault' in goal || goal.reached)).toEqual([true, true]);
+  });
 
   it('answers all four tanks and all their runs', () => {
     expect(quay.tanks.map(({ name }) => name)).toEqual(['Tank A', 'Tank B', 'Tank C', 'Tank D']);
@@ -85,6 +136,24 @@ describe('a fault in one tank', () => {
     ['a repeated name', tank('Good'), 'bad-ask', 'cells[1].name', 'name'],
     ['an electrode that is no list', tank('Bad').replace('[H2O -> O2(g)]', 'x'), 'bad-ask', 'cells[1].anode', 'anode'],
     ['a tank that is text', '  - just text\n', 'bad-ask', 'cells[1]', 'just text'],
+    [
+      'a share over 100 %',
+      tank('Bad').replace(
+        '[Cu^2+ -> Cu]',
+        '[{ skeleton: Cu^2+ -> Cu, share: 130 % }, { skeleton: H^+ -> H2, share: 1 % }]',
+      ),
+      'contradiction',
+      'cells[1].cathode',
+      '[{ skeleton: Cu^2+ -> Cu, share: 130 % }, { skeleton: H^+ -> H2, share: 1 % }]',
+    ],
+    [
+      'a species of none that is there',
+      tank('Bad', '    present: [Cu^2+, Xq]\n'),
+      'unknown-element',
+      'cells[1].present[1]',
+      'Xq',
+    ],
+    ['a mode that there is none of', tank('Bad', '    mode: magic\n'), 'bad-ask', 'cells[1].mode', 'mode'],
   ])('has its place and does not lose the others: %s', (_, lines, code, field, text) => {
     const sheet = broken(lines);
     const { tanks } = sheetOf(sheet);
