@@ -113,7 +113,7 @@ export const renderTank = (tank: WholeTank, look: Look): string => {
 };
 
 /** Columns of the cautions. */
-const WIDE = 108;
+const WIDE = 76;
 
 const cautionLines = (caution: SheetCaution, look: Look, paint: (text: string) => string): readonly string[] => {
   const because = caution.because.map((species) => speciesText(species, look)).join(', ');

@@ -1,3 +1,4 @@
+import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { run } from '../../src/cli/run.ts';
 import type { World } from '../../src/cli/world.ts';
@@ -13,6 +14,9 @@ cells:
       - { label: stated, current: 250 A, time: 6 h }
 `;
 const LOG = 'time (s),current (A)\n0,10\n3600,10\n';
+
+/** 250 A for seven and a half hours. */
+const LOG_OF_1875 = 'time (h),current (A)\n0,250\n7.5,250\n';
 
 interface Shown {
   readonly code: number;
@@ -130,6 +134,17 @@ describe('couplet sheet', () => {
     expect(code).toBe(1);
     expect(err).toContain('sheet:2:1');
     expect(saved.size).toBe(0);
+  });
+});
+
+describe('the README', () => {
+  it('shows a sheet that is answered whole', async () => {
+    const [, sheet = ''] = /^```yaml\n(.*?)^```$/ms.exec(readFileSync('README.md', 'utf8')) ?? [];
+    const { code, out, err } = await couplet(['sheet', 'p.yaml'], { 'p.yaml': sheet, 'logs/tuesday.csv': LOG_OF_1875 });
+    expect([code, err]).toEqual([0, '']);
+    const said = out.replace(/\s+/g, ' ');
+    expect(said).toContain('by 2 weighed runs');
+    expect(said).toContain('ready at 15:16');
   });
 });
 
