@@ -6,6 +6,7 @@ import type { HalfReaction } from '../redox/half-reaction.ts';
 import { completeHalf } from '../redox/half.ts';
 import { needless } from '../redox/needless.ts';
 import { type RedoxReaction, balanceRedox } from '../redox/redox.ts';
+import { type Meter, startMeter } from '../exact/bounds.ts';
 import type { Rational } from '../exact/rational.ts';
 import { type Result, chain, failure, inField, map, success } from '../report/result.ts';
 import type { Equation } from '../species/equation.ts';
@@ -57,13 +58,23 @@ export const balanceWhole = ({ skeleton, medium }: ReadSkeleton, fields: Skeleto
   inField(renamed(balanceRedox(skeleton, medium, fields.settle), fields.mediumField), fields.field);
 
 /** The second step for a half-reaction: helpers and electrons found. */
-export const balanceSkeleton = ({ skeleton, medium }: ReadSkeleton, fields: SkeletonFields): Result<HalfReaction> =>
-  inField(renamed(completed(skeleton, medium, fields), fields.mediumField), fields.field);
+export const balanceSkeleton = (
+  { skeleton, medium }: ReadSkeleton,
+  fields: SkeletonFields,
+  meter: Meter = startMeter(),
+): Result<HalfReaction> =>
+  inField(renamed(completed(skeleton, medium, fields, meter), fields.mediumField), fields.field);
 
 /** A `settle` that several skeletons share is for those that need it. */
-const completed = (skeleton: Equation, medium: MediumChoice, fields: SkeletonFields): Result<HalfReaction> => {
-  const alone = fields.sharedSettle === true ? completeHalf(skeleton, medium) : null;
-  return alone?.ok === true && alone.value.dimension === 1 ? alone : completeHalf(skeleton, medium, fields.settle);
+const completed = (
+  skeleton: Equation,
+  medium: MediumChoice,
+  { settle, sharedSettle }: SkeletonFields,
+  meter: Meter,
+): Result<HalfReaction> => {
+  const shared = settle !== undefined && sharedSettle === true;
+  const alone = shared ? completeHalf(skeleton, medium, undefined, meter) : null;
+  return alone?.ok === true && alone.value.dimension === 1 ? alone : completeHalf(skeleton, medium, settle, meter);
 };
 
 const fieldsAt = (cell: ComposedFields, electrode: Electrode): readonly SkeletonFields[] =>
@@ -101,7 +112,9 @@ export const readElectrodes = (cell: ComposedFields, options: DeskOptions): Resu
   const anode = fieldsAt(cell, 'anode');
   const fields = [...anode, ...fieldsAt(cell, 'cathode')];
   return chain(allByRank(fields.map((one) => readSkeleton(one, options))), (skeletons) => {
-    const halves = skeletons.map((one, at) => placed(one, fields[at]));
+    // all reactions draw on one measure of work
+    const meter = startMeter();
+    const halves = skeletons.map((one, at) => placed(one, fields[at], meter));
     return chain(allByRank(halves), (list) => {
       if (list.every(({ half }) => half.dimension === 1) && cell.settle !== undefined) return needless(cell.settle);
       return success({ anode: list.slice(0, anode.length), cathode: list.slice(anode.length) });
@@ -109,9 +122,9 @@ export const readElectrodes = (cell: ComposedFields, options: DeskOptions): Resu
   });
 };
 
-const placed = (skeleton: ReadSkeleton, fields: SkeletonFields | undefined): Result<Placed> => {
+const placed = (skeleton: ReadSkeleton, fields: SkeletonFields | undefined, meter: Meter): Result<Placed> => {
   if (fields === undefined) throw new RangeError('a skeleton without its fields');
-  return map(balanceSkeleton(skeleton, fields), (half) => ({ half, share: skeleton.share }));
+  return map(balanceSkeleton(skeleton, fields, meter), (half) => ({ half, share: skeleton.share }));
 };
 
 /** Two electrodes to their cell reaction: read, balanced, composed. */

@@ -18,7 +18,7 @@ export const USUAL_BOUNDS: Bounds = { vectors: 5_000, steps: 100_000_000, digits
  * divisor of long ones as long as so many products for each word.
  */
 const WRITING = 8;
-const CONTENT = 60;
+const CONTENT = 150;
 
 /** A search that went beyond a bound; `limit` names it: "5000 vectors". */
 export interface TooHard {
@@ -37,8 +37,8 @@ export interface Meter {
   readonly hold: (vector: readonly bigint[], held: number) => boolean;
 }
 
-/** A meter that stands at 0. */
-export const startMeter = (bounds: Bounds = USUAL_BOUNDS): Meter => {
+/** A meter that stands at 0. What it counts also counts on `whole`, if given, whose bounds then hold too. */
+export const startMeter = (bounds: Bounds = USUAL_BOUNDS, whole?: Meter): Meter => {
   const largest = 10n ** BigInt(bounds.digits);
   let steps = 0;
   let passed: TooHard | undefined;
@@ -49,6 +49,7 @@ export const startMeter = (bounds: Bounds = USUAL_BOUNDS): Meter => {
   const step = (count: number): boolean => {
     steps += count;
     if (steps > bounds.steps) return fail(`${String(bounds.steps)} steps`);
+    if (whole?.step(count) === false) passed ??= whole.passed();
     return passed === undefined;
   };
   return {

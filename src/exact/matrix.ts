@@ -90,12 +90,14 @@ export const echelonOf = (matrix: IntegerMatrix, order: readonly number[], meter
     const pivot = entry(found.row, column) < 0n ? found.row.map((value) => -value) : found.row;
     rows[found.index] = rows[pivots.length] ?? [];
     rows[pivots.length] = pivot;
-    const others = rows.filter((row, index) => index !== pivots.length && entry(row, column) !== 0n).length;
-    if (meter?.write(others, pivot.length, entry(pivot, column)) === false) break;
+    let cleared = 0;
     rows.forEach((row, index) => {
-      if (index !== pivots.length) rows[index] = clearColumn(row, pivot, column);
+      if (index === pivots.length || entry(row, column) === 0n) return;
+      rows[index] = clearColumn(row, pivot, column);
+      cleared += 1;
     });
     pivots.push(column);
+    if (meter?.write(cleared, pivot.length, entry(pivot, column)) === false) break;
   }
   return { rows: rows.slice(0, pivots.length), pivots };
 };
@@ -128,10 +130,10 @@ export const independentColumns = (
 
 /**
  * A basis of { v : matrix v = 0 } for a matrix of `columnCount` columns: primitive whole vectors, one for each column
- * without a pivot, positive there and 0 in the other columns without a pivot.
+ * without a pivot, positive there and 0 in the other columns without a pivot. Of no use once the meter has passed a bound.
  */
-export const nullSpace = (matrix: IntegerMatrix, columnCount: number): bigint[][] => {
-  const echelon = echelonOf(matrix, range(columnCount));
+export const nullSpace = (matrix: IntegerMatrix, columnCount: number, meter?: Meter): bigint[][] => {
+  const echelon = echelonOf(matrix, range(columnCount), meter);
   return freeColumns(echelon, columnCount).map((column) => nullVector(echelon, column, columnCount));
 };
 

@@ -1,6 +1,7 @@
 import { speciesMatrix } from '../balance/matrix.ts';
 import type { Numbers } from '../balance/solve.ts';
 import type { Unknown } from '../balance/unknowns.ts';
+import { type Bounds, type Meter, USUAL_BOUNDS, startMeter } from '../exact/bounds.ts';
 import { type IntegerVector, nullSpace, range } from '../exact/matrix.ts';
 import { type Species, ELECTRON, isElectron, plainSpecies } from '../species/species.ts';
 
@@ -19,6 +20,7 @@ export interface Condition {
 /** Conditions thought of, balances given, and sets of conditions tried: among many unknowns fewer, as each costs more. */
 const MOST_CONDITIONS = 40;
 const MOST_PER_SIDE = 60;
+const BOUNDS: Bounds = { ...USUAL_BOUNDS, steps: 40_000_000 };
 const MOST_GIVEN = 12;
 const triesAmong = (count: number): number => Math.min(400, Math.floor(400_000 / (count * count)));
 
@@ -29,12 +31,14 @@ const triesAmong = (count: number): number => Math.min(400, Math.floor(400_000 /
  * one before an earlier one, so that the order of the list is its preference), first of these where helpers depend on one
  * another.
  */
-export const assumedBalances = (unknowns: readonly Unknown[], dimension: number): readonly Assumed[] => {
+export const assumedBalances = (unknowns: readonly Unknown[], dimension: number, whole?: Meter): readonly Assumed[] => {
   const { rows } = speciesMatrix(unknowns.map((unknown) => unknown.species));
   const found = new Map<string, Assumed>();
+  const meter = startMeter(BOUNDS, whole);
   for (const conditions of choices(conditionsOn(unknowns), dimension - 1, triesAmong(unknowns.length))) {
     if (found.size >= MOST_GIVEN) break;
-    const [line, second] = nullSpace([...rows, ...conditions.map(({ row }) => row)], unknowns.length);
+    const [line, second] = nullSpace([...rows, ...conditions.map(({ row }) => row)], unknowns.length, meter);
+    if (meter.passed() !== undefined) break;
     const numbers = line === undefined || second !== undefined ? undefined : onTheirSides(unknowns, line);
     if (numbers === undefined || found.has(numbers.join())) continue;
     found.set(numbers.join(), { assume: `if ${conditions.map(({ words }) => words).join(' and ')}`, numbers });

@@ -1,6 +1,7 @@
 import { speciesMatrix } from '../balance/matrix.ts';
 import type { Numbers } from '../balance/solve.ts';
 import type { Unknown } from '../balance/unknowns.ts';
+import type { Meter } from '../exact/bounds.ts';
 import { gcdOf } from '../exact/integer.ts';
 import { type IntegerMatrix, nullSpace, primitiveVector } from '../exact/matrix.ts';
 import { type Rational, ZERO, denominatorOf, numeratorOf, rational, signOf } from '../exact/rational.ts';
@@ -10,15 +11,16 @@ import type { Change, MeasuredChange, Pair } from './pair.ts';
 
 /**
  * The balance in which nothing but these two changes happens, if that, or with it that all of a partner's atoms of a
- * changing number change, or with it one ratio of two products, leaves one balance with each species on its side.
+ * changing number change, or with it one ratio of two products, leaves one balance with each species on its side. Of no
+ * use once the meter has passed a bound.
  */
 export const balancePair = (
   unknowns: readonly Unknown[],
   labelled: readonly Labelled[],
-  one: Change,
-  other: Change,
+  [one, other]: readonly [Change, Change],
+  meter: Meter,
 ): Pair | undefined => {
-  for (const { line, also } of linesOf(unknowns, labelled, one, other)) {
+  for (const { line, also } of linesOf(unknowns, labelled, [one, other], meter)) {
     const pair = measure(unknowns, one, other, line);
     if (pair !== undefined) return also === undefined ? pair : { ...pair, also };
   }
@@ -34,23 +36,23 @@ interface Line {
 const linesOf = (
   unknowns: readonly Unknown[],
   labelled: readonly Labelled[],
-  one: Change,
-  other: Change,
+  [one, other]: readonly [Change, Change],
+  meter: Meter,
 ): readonly Line[] => {
   const transitions = [...one.transitions, ...other.transitions];
   const still = transitions.map(() => 0n);
   const { rows } = speciesMatrix(unknowns.map(({ species }) => species));
   const joined = [...rows.map((row) => [...row, ...still]), ...labelRows(labelled, transitions)];
   const width = unknowns.length + transitions.length;
-  const lines = nullSpace(joined, width);
+  const lines = nullSpace(joined, width, meter);
   if (lines.length <= 1) return lines.map((line) => ({ line }));
-  const whole = onlyVector([...joined, ...wholeRows(unknowns.length, labelled, [one, other])], width);
+  const whole = onlyVector([...joined, ...wholeRows(unknowns.length, labelled, [one, other])], width, meter);
   const simple = lines.length === 2 && one.transitions.length === 1 && other.transitions.length === 1;
   const ratios = !simple ? [] : ratiosOfProducts(unknowns);
   return [
     ...(whole === undefined ? [] : [{ line: whole }]),
     ...ratios.flatMap(({ words, row }) => {
-      const line = onlyVector([...joined, [...row, ...still]], width);
+      const line = onlyVector([...joined, [...row, ...still]], width, meter);
       return line === undefined ? [] : [{ line, also: words }];
     }),
   ];
@@ -75,8 +77,8 @@ const measure = (unknowns: readonly Unknown[], one: Change, other: Change, line:
 };
 
 /** The vector that spans the null space of `rows`, if one does. */
-const onlyVector = (rows: IntegerMatrix, width: number): Numbers | undefined => {
-  const [line, second] = nullSpace(rows, width);
+const onlyVector = (rows: IntegerMatrix, width: number, meter: Meter): Numbers | undefined => {
+  const [line, second] = nullSpace(rows, width, meter);
   return second === undefined ? line : undefined;
 };
 

@@ -1,5 +1,6 @@
 import { explain } from '../balance/explain.ts';
 import { type Reaction, plainReaction, showReaction } from '../balance/reaction.ts';
+import type { Meter } from '../exact/bounds.ts';
 import { ZERO, isZero, signOf } from '../exact/rational.ts';
 import type { Note } from '../report/note.ts';
 import { type Result, chain, failure, success } from '../report/result.ts';
@@ -15,10 +16,15 @@ import { settleHalf } from './settle-half.ts';
  * The half-reaction of a skeleton: helpers of the medium and electrons found, lowest whole numbers, recounted.
  * `settle` is the `assume` text of one of the couplings that `several-balances` gave.
  * Faults, in this order: `unknown-medium`, `bad-ask`, `missing-element`, `several-balances` (or `too-hard`), `no-balance`,
- * `wrong-side`, `idle-species`, `no-electrons`.
+ * `wrong-side`, `idle-species`, `no-electrons`. `meter` counts the work of all halves of one ask together.
  */
-export const completeHalf = (skeleton: Equation, choice: MediumChoice, settle?: string): Result<HalfReaction> =>
-  chain(chooseMedium(choice, skeleton), (medium) => complete(attempt(skeleton, medium, true), settle));
+export const completeHalf = (
+  skeleton: Equation,
+  choice: MediumChoice,
+  settle?: string,
+  meter?: Meter,
+): Result<HalfReaction> =>
+  chain(chooseMedium(choice, skeleton), (medium) => complete(attempt(skeleton, medium, true, meter), settle));
 
 const complete = (tried: Attempt, settle: string | undefined): Result<HalfReaction> => {
   const { verdict } = tried;

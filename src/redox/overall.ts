@@ -76,7 +76,7 @@ const balance = (tried: Attempt, settle: string | undefined): Result<OverallBala
 const couplingsOf = (tried: Attempt, dimension: number): readonly Coupling[] => {
   const paired = pairedCouplings(tried);
   if (paired.length > 0) return paired;
-  return assumedBalances(tried.unknowns, dimension).flatMap(({ assume, numbers }) => {
+  return assumedBalances(tried.unknowns, dimension, tried.meter).flatMap(({ assume, numbers }) => {
     const overall = finish(tried, numbers);
     return couplingOf(assume, { reaction: overall, medium: tried.medium, halves: null, exchanged: null });
   });
@@ -88,11 +88,11 @@ const couplingOf = (assume: string, unsplit: Unsplit): readonly Coupling[] => {
   return split.ok ? [{ assume, overall: unsplit.reaction, split }] : [];
 };
 
-/** Pairs whose two halves are known, where there are any. */
+/** Pairs whose two halves add up, where there are any; of two that go by one name the usual. */
 
 const pairedCouplings = (tried: Attempt): readonly Coupling[] => {
   const { unknowns } = tried;
-  const pairs = pairHalves(unknowns).map((pair) => ({ pair, halves: halvesOfPair(unknowns, pair) }));
+  const pairs = pairHalves(unknowns, tried.meter).map((pair) => ({ pair, halves: halvesOfPair(unknowns, pair) }));
   const split = pairs.flatMap(({ pair, halves }) =>
     couplingOf('', {
       reaction: finish(tried, pair.numbers),
@@ -101,10 +101,14 @@ const pairedCouplings = (tried: Attempt): readonly Coupling[] => {
       exchanged: pair.electrons,
     }).map((coupling) => ({ pair, halves, coupling })),
   );
-  const whole = split.filter(({ coupling }) => coupling.split.value.oxidation !== null);
-  const kept = whole.length > 0 ? whole : split;
+  const sound = split.filter(
+    ({ coupling, pair }) =>
+      coupling.split.value.oxidation !== null && coupling.split.value.electrons.equals(pair.electrons),
+  );
+  const kept = sound.length > 0 ? sound : split;
   const names = nameCouplings(unknowns, kept);
-  return kept.map(({ coupling }, index) => ({ ...coupling, assume: names[index] ?? '' }));
+  const named = kept.map(({ coupling }, index) => ({ ...coupling, assume: names[index] ?? '' }));
+  return named.filter(({ assume }, index) => names.indexOf(assume) === index);
 };
 
 const reactionsOf = (tried: Attempt, { unknowns, oxidation, reduction }: PairHalves): Unsplit['halves'] => {

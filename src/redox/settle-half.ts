@@ -21,7 +21,7 @@ export interface Settled {
  * Faults: `bad-ask` for an unknown assumption, `several-balances`, `too-hard`.
  */
 export const settleHalf = (tried: Attempt, dimension: number, settle: string | undefined): Result<Settled> => {
-  const couplings = assumedBalances(tried.unknowns, dimension).filter(
+  const couplings = assumedBalances(tried.unknowns, dimension, tried.meter).filter(
     ({ numbers }) => electronsOf(tried, numbers) !== 0n,
   );
   if (settle !== undefined) {
