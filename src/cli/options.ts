@@ -33,7 +33,10 @@ export const defineOption = new Option(
   '--define <NAME=FORMULA>',
   'a named species: --define "EDTA^4-=C10H12N2O8^4-"; repeatable',
 ).argParser<Pairs>(collectPairs);
-export const strictOption = new Option('--strict', 'refuse every spelling that can be read in two ways, such as Fe3+');
+export const strictOption = new Option(
+  '--strict',
+  'refuse whatever can be read in two ways, such as Fe3+ or the unit g/A h',
+);
 export const jsonOption = new Option('--json', 'print the answer or the fault as one line of JSON');
 export const plainOption = new Option('--plain', 'plain spelling on a terminal too: Cu^2+ in place of raised digits');
 

@@ -5,7 +5,7 @@ import { type TankBalance, tankBalance } from '../amounts/tank-balance.ts';
 import type { AmountsAnswer, AmountsRequest } from '../amounts/working.ts';
 import { type Result, chain, failure, inField, map, success } from '../report/result.ts';
 import { readSpecies } from '../species/read.ts';
-import type { Species } from '../species/species.ts';
+import { type Species, sameSpecies } from '../species/species.ts';
 import { readCircuit } from './amounts.ts';
 import { readCorrelations } from './correlations.ts';
 import { dividedOf } from './divided.ts';
@@ -78,11 +78,25 @@ const requestOf = (ask: AmountsAsk, { circuit, species }: ReadCell): Result<Amou
 const asText = ({ value, unit, uncertainty }: Quantity): string =>
   `${String(value)} ${unit}${uncertainty === undefined ? '' : ` ± ${String(uncertainty)} ${unit}`}`;
 
+/** Two reactions in parallel without shares: what was measured has given that of the species asked, the other takes the rest. */
+const withFoundShare = ({ circuit, species }: AmountsRequest, share: Quantity | undefined): Circuit => {
+  if (circuit.kind !== 'electrode' || share === undefined || circuit.reactions.length !== 2) return circuit;
+  if (circuit.reactions.some((one) => one.share !== undefined)) return circuit;
+  const takesPart = circuit.reactions.map(({ reaction }) =>
+    reaction.terms.some((term) => sameSpecies(term.species, species)),
+  );
+  if (takesPart[0] === takesPart[1]) return circuit;
+  const reactions = circuit.reactions.map((one, at) =>
+    takesPart[at] === true ? { ...one, share: asText(share) } : one,
+  );
+  return { kind: 'electrode', reactions };
+};
+
 /** The balance of the tank for the charge of an answer: what it was derived from need not be derived again. */
 const tankOf = (request: AmountsRequest, { quantities }: AmountsAnswer, stack: object): Result<TankBalance> => {
-  const { circuit } = request;
+  const { charge, efficiency, share } = quantities;
+  const circuit = withFoundShare(request, share);
   const lone = circuit.kind === 'half' || (circuit.kind === 'electrode' && circuit.reactions.length === 1);
-  const { charge, efficiency } = quantities;
   const { blank } = request.given;
   const given = {
     ...(charge === undefined ? {} : { charge: asText(charge) }),
@@ -128,12 +142,24 @@ const answered = (
     : success<AmountsAnswerShown>(whole);
 };
 
+/** Further cells that one ask may have in series. */
+const MOST_CELLS = 100;
+
+const tooMany: Result<never> = failure({
+  code: 'too-hard',
+  field: 'series',
+  limit: `${String(MOST_CELLS)} cells in series`,
+  message: `There may be at most ${String(MOST_CELLS)} further cells in series.`,
+  hint: 'Cells that are alike are one stack: give cells.',
+});
+
 /** All cells that the charge flows through, the one of the ask first. */
-const readCells = (ask: AmountsAsk, options: DeskOptions): Result<readonly ReadCell[]> =>
-  allByRank([
-    readCell(ask, options),
-    ...(ask.series ?? []).map((one, at) => under(readCell(one, options), `series[${String(at)}]`)),
-  ]);
+const readCells = (ask: AmountsAsk, options: DeskOptions): Result<readonly ReadCell[]> => {
+  const { series = [] } = ask;
+  if (series.length > MOST_CELLS) return tooMany;
+  const further = series.map((one, at) => under(readCell(one, options), `series[${String(at)}]`));
+  return allByRank([readCell(ask, options), ...further]);
+};
 
 /**
  * What Faraday's law makes of what is given, with the balance of the tank and the further cells in series where they

@@ -101,6 +101,14 @@ describe('the balance of a tank', () => {
     expect(weighed.tank?.base?.value).toBeCloseTo(1, 8);
   });
 
+  it('knows the share that a weighing gives, and lets the other reaction take the rest', () => {
+    const electrode = [{ half: 'Cu^2+ + 2 e^- -> Cu' }, { half: '2 H^+ + 2 e^- -> H2' }];
+    // A quarter of a mole of copper takes half a mole of electrons of one; the rest takes up half a mole of H^+.
+    const given = { charge: `${String(FARADAY)} C`, amount: '0.25 mol' };
+    const { tank } = sent({ electrode, species: 'Cu', given, tank: true }).answer;
+    expect(tank?.acid?.value).toBeCloseTo(-0.5, 8);
+  });
+
   it('needs a charge', () => {
     expect(sent({ ...COPPER, given: {}, tank: true })).toMatchObject({
       fault: { code: 'not-enough-given', missing: ['charge'] },
@@ -117,6 +125,11 @@ describe('cells in series', () => {
     const coulometer = { ...silver, given: { mass: '107.87 g' } };
     const measured = sent({ ...COPPER, given: {}, series: [coulometer] }).answer;
     expect(measured.quantities['amount']?.value).toBeCloseTo(0.5, 8);
+  });
+
+  it('are bounded', () => {
+    const series = Array.from({ length: 101 }, () => COPPER);
+    expect(sent({ ...COPPER, given: {}, series })).toMatchObject({ fault: { code: 'too-hard', field: 'series' } });
   });
 
   it('name the cell that is at fault', () => {

@@ -30,7 +30,12 @@ const common = {
   id: z.string().optional().describe('Comes back with the answer.'),
   where: z.record(z.string(), z.string()).optional().describe('Unknown subscripts: {"x": "0.4"}.'),
   define: z.record(z.string(), z.string()).optional().describe('Named species: {"EDTA^4-": "C10H12N2O8^4-"}.'),
-  strict: z.boolean().optional().describe('true: every ambiguous spelling is a fault.'),
+  strict: z
+    .boolean()
+    .optional()
+    .describe(
+      'true: every ambiguity is a fault: a spelling or a unit with two readings, a gas that does not say it is one.',
+    ),
 };
 
 const electrodeReaction = z.union([
@@ -174,7 +179,6 @@ export type AskKind = (typeof ASK_KINDS)[number];
 export type Ask = z.infer<typeof askSchema>;
 export type AskOf<Kind extends AskKind> = Extract<Ask, { readonly ask: Kind }>;
 export type AskedMedium = z.infer<typeof mediumSchema>;
-export type ElectrodeReaction = z.infer<typeof electrodeReaction>;
 export type CellFields = z.infer<typeof cellFieldsSchema>;
 export type SeriesCell = z.infer<typeof seriesCell>;
 export type AskedCorrelation = z.infer<typeof correlation>;
