@@ -4,22 +4,38 @@ import { type FoundEfficiency, isStated, uncertaintyOfFound } from './sheet-effi
 const COVERAGE = 2;
 /** Runs whose scatter says something about one more. */
 const ENOUGH = 3;
+/** Differences that are no more than rounding. */
+const ROUNDING = 1e-12;
 
-const meanOf = (values: readonly number[]): number => values.reduce((sum, one) => sum + one, 0) / values.length;
+/** A run as it is compared: what it found, its standard uncertainty, and whether the sheet states one. */
+interface Compared {
+  readonly at: number;
+  readonly value: number;
+  readonly variance: number;
+  readonly stated: boolean;
+}
 
-/**
- * The standard uncertainty of the difference between a run and the mean of n others: what is stated,
- * u² = u_i² + Σ u_j² / n², or what three or more others scatter by, s² (1 + 1/n), whichever is larger. Undefined where
- * neither is known. Taking stated uncertainties as independent errs on the side of silence.
- */
-const uncertaintyOfGap = (run: FoundEfficiency, others: readonly FoundEfficiency[]): number | undefined => {
-  const stated = [run, ...others].every(isStated);
-  const count = others.length;
-  if (!stated && count < ENOUGH) return undefined;
-  const own = uncertaintyOfFound(run) ** 2 + meanOf(others.map((one) => uncertaintyOfFound(one) ** 2)) / count;
-  const mean = meanOf(others.map(({ value }) => value));
-  const scatter = others.reduce((sum, { value }) => sum + (value - mean) ** 2, 0) / Math.max(1, count - 1);
-  return Math.sqrt(Math.max(stated ? own : 0, count < ENOUGH ? 0 : scatter * (1 + 1 / count)));
+/** Sums over the runs that are compared; values count from `origin`, so that squares do not cancel. */
+interface Sums {
+  readonly count: number;
+  readonly origin: number;
+  readonly values: number;
+  readonly squares: number;
+  readonly variances: number;
+  readonly stated: number;
+}
+
+const sumsOf = (runs: readonly Compared[]): Sums => {
+  const sum = (pick: (run: Compared) => number): number => runs.reduce((total, run) => total + pick(run), 0);
+  const origin = sum(({ value }) => value) / Math.max(1, runs.length);
+  return {
+    count: runs.length,
+    origin,
+    values: sum(({ value }) => value - origin),
+    squares: sum(({ value }) => (value - origin) ** 2),
+    variances: sum(({ variance }) => variance),
+    stated: runs.filter(({ stated }) => stated).length,
+  };
 };
 
 /** How far a run lies from the mean of the others. */
@@ -31,14 +47,25 @@ interface Gap {
   readonly ratio: number;
 }
 
-const gapOf = (runs: readonly FoundEfficiency[], at: number, among: readonly number[]): Gap | undefined => {
-  const run = runs[at];
-  const others = among.flatMap((index) => (index === at ? [] : (runs[index] ?? [])));
-  if (run === undefined || others.length === 0) return undefined;
-  const uncertainty = uncertaintyOfGap(run, others);
-  const difference = run.value - meanOf(others.map(({ value }) => value));
-  if (uncertainty === undefined || difference === 0) return undefined;
-  return { at, difference, ratio: Math.abs(difference) / uncertainty };
+/**
+ * The standard uncertainty of the difference between a run and the mean of n others: what is stated,
+ * u² = u_i² + Σ u_j² / n², or what three or more others scatter by, s² (1 + 1/n), whichever is larger. Undefined where
+ * neither is known. Taking stated uncertainties as independent errs on the side of silence.
+ *
+ * The others are all but the run, from sums over all:  s² = (Σ x_j² - (Σ x_j)² / n) / (n - 1).
+ */
+const gapOf = (run: Compared, sums: Sums): Gap | undefined => {
+  const count = sums.count - 1;
+  const stated = sums.stated === sums.count;
+  if (count < 1 || (!stated && count < ENOUGH)) return undefined;
+  const own = run.value - sums.origin;
+  const others = sums.values - own;
+  const scatter = Math.max(0, sums.squares - own ** 2 - others ** 2 / count) / Math.max(1, count - 1);
+  const known = stated ? run.variance + (sums.variances - run.variance) / count ** 2 : 0;
+  const uncertainty = Math.sqrt(Math.max(known, count < ENOUGH ? 0 : scatter * (1 + 1 / count)));
+  const difference = own - others / count;
+  if (Math.abs(difference) < ROUNDING) return undefined;
+  return { at: run.at, difference, ratio: Math.abs(difference) / uncertainty };
 };
 
 const OVER = 'the current efficiency is over 100 %: look at the weighing, the record and the reactions.';
@@ -50,12 +77,23 @@ const sentence = ({ difference, ratio }: Gap, pair: boolean): string => {
   return `${points} ${whom}, ${times} standard uncertainties of the difference: look at the weighing and the record.`;
 };
 
-/** The run that lies farthest out of `among`, if it lies beyond the coverage. */
-const farthest = (runs: readonly FoundEfficiency[], among: readonly number[]): Gap | undefined => {
-  const gaps = among.flatMap((at) => gapOf(runs, at, among) ?? []);
-  const [most] = gaps.sort((one, other) => other.ratio - one.ratio);
-  return most !== undefined && most.ratio > COVERAGE ? most : undefined;
+/** The run that lies farthest out, if it lies beyond the coverage. */
+const farthest = (runs: readonly Compared[]): Gap | undefined => {
+  const sums = sumsOf(runs);
+  let most: Gap | undefined;
+  for (const run of runs) {
+    const gap = gapOf(run, sums);
+    if (gap !== undefined && gap.ratio > Math.max(COVERAGE, most?.ratio ?? 0)) most = gap;
+  }
+  return most;
 };
+
+const comparedOf = (found: FoundEfficiency, at: number): Compared => ({
+  at,
+  value: found.value,
+  variance: uncertaintyOfFound(found) ** 2,
+  stated: isStated(found),
+});
 
 /**
  * For each weighed run of a tank the sentence that it stands out, or null. A run over 100 % always does. Of the others
@@ -64,17 +102,19 @@ const farthest = (runs: readonly FoundEfficiency[], among: readonly number[]): G
  */
 export const standingOut = (runs: readonly FoundEfficiency[]): readonly (string | null)[] => {
   const verdicts: (string | null)[] = runs.map(({ value }) => (value > 1 ? OVER : null));
-  let among = runs.flatMap(({ value }, at) => (value > 1 ? [] : [at]));
-  for (let gap = farthest(runs, among); gap !== undefined; gap = farthest(runs, among)) {
+  let among = runs.map(comparedOf).filter(({ value }) => value <= 1);
+  for (let gap = farthest(among); gap !== undefined; gap = farthest(among)) {
     const { at } = gap;
-    verdicts[at] = sentence(gap, among.length === 2);
     if (among.length === 2) {
-      const other = among.find((index) => index !== at);
-      const back = other === undefined ? undefined : gapOf(runs, other, among);
-      if (other !== undefined && back !== undefined) verdicts[other] = sentence(back, true);
+      const sums = sumsOf(among);
+      for (const run of among) {
+        const both = gapOf(run, sums);
+        if (both !== undefined) verdicts[run.at] = sentence(both, true);
+      }
       break;
     }
-    among = among.filter((index) => index !== at);
+    verdicts[at] = sentence(gap, false);
+    among = among.filter((run) => run.at !== at);
   }
   return verdicts;
 };

@@ -23,11 +23,14 @@ export const faultHtml = (name: string, fault: Fault, sheetText: string): string
 
 const sentence = (text: string): string => (text === '' || /[.?!]$/.test(text) ? capital(text) : `${capital(text)}.`);
 
+/** A number stays on one line with its unit. */
+const BEFORE_UNIT = /(\d) (?=(?:%|kg|mg|g|L|A|V|h|min|µm|kWh|m³)(?![A-Za-z]))/g;
+
 /** A list of sentences; nothing where there are none. */
 export const saidList = (heading: string, lines: readonly string[]): string =>
   lines.length === 0
     ? ''
-    : `<div><h3>${heading}</h3><ul class="said">${lines.map((line) => `<li>${line}</li>`).join('')}</ul></div>`;
+    : `<div><h3>${heading}</h3><ul class="said">${lines.map((line) => `<li>${line.replace(BEFORE_UNIT, '$1&#160;')}</li>`).join('')}</ul></div>`;
 
 /** A word that begins a line of prose. */
 export const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);

@@ -1,7 +1,7 @@
 /** Elements of HTML that have no end tag. */
 const VOID = new Set(['meta', 'br', 'link', 'img', 'hr', 'input']);
 const TAG = /^<(\/?)([a-zA-Z][a-zA-Z0-9]*)((?:\s+[a-zA-Z_:][a-zA-Z0-9_:.-]*="[^"<]*")*)\s*(\/?)>/;
-const ENTITY = /&(?!(?:amp|lt|gt|quot|#39);)/;
+const ENTITY = /&(?!(?:amp|lt|gt|quot|#39|#160);)/;
 
 /** What a strict reader finds wrong with a page: tags that do not nest, attributes without quotes, stray signs; "" for nothing. */
 export const markupProblem = (page: string): string => {
