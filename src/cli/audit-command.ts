@@ -15,6 +15,7 @@ import {
   styleOption,
   whereOption,
 } from './options.ts';
+import { isMarkup } from './outcome.ts';
 import { type Shell, examples } from './shell.ts';
 
 const formatOption = new Option(
@@ -68,14 +69,14 @@ export const auditCommand = (shell: Shell): CommandUnknownOpts => {
     const whole = given({ anode, cathode, overall, electrons });
     const ways = [equation, file, Object.keys(whole).length > 0 ? whole : undefined].filter((way) => way !== undefined);
     if (ways.length !== 1) command.error('Give an equation, or --anode, --cathode and --overall, or --file.');
+    const { json = format === 'ndjson' ? true : undefined, plain, style } = options;
     if (file !== undefined) {
-      shell.finish(
-        await auditList({ path: file, column, format: options.json === true ? 'ndjson' : format, fields }, shell.world),
-      );
+      if (isMarkup(style)) command.error('--style html, latex and mathml are for one equation or a cell.');
+      const listFormat = json === true ? 'ndjson' : format;
+      shell.finish(await auditList({ path: file, column, format: listFormat, fields, plain, style }, shell.world));
       return;
     }
     if (format === 'csv') command.error('--format csv is for --file.');
-    const { json = format === 'ndjson' ? true : undefined, plain, style } = options;
     const markdown = format === 'markdown';
     await shell.ask({ ask: 'audit', ...given({ equation }), ...whole, ...fields }, { json, plain, style, markdown });
   });

@@ -1,4 +1,5 @@
 import type { answer as answerFunction } from '../desk/answer.ts';
+import type { PrintStyle } from '../notation/print/print.ts';
 import {
   type Audited,
   type ListVerdict,
@@ -25,6 +26,8 @@ export interface ListRequest {
   readonly format: ListFormat;
   /** What every ask of the list carries: medium, definitions. */
   readonly fields: AskFields;
+  readonly plain?: true | undefined;
+  readonly style?: PrintStyle | undefined;
 }
 
 /** Lines that need attention and are kept for the page; the rest is only counted, so that memory stays the same. */
@@ -78,7 +81,7 @@ export const auditList = async (request: ListRequest, world: World): Promise<Exi
     }
   }
   const more = counts['not-lowest'] + counts.unbalanced + counts.unreadable - shown.length;
-  const look = lookFor(world);
+  const look = lookFor(world, request.plain, request.style);
   if (format === 'text') waiting = listText(counts, shown, more, look);
   if (format === 'markdown') waiting = listMarkdown(counts, shown, more);
   if (waiting !== '') await world.out(waiting);

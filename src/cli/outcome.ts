@@ -55,8 +55,9 @@ const showFault = (fault: Fault, ask: AskFields, showing: Showing, world: World)
   world.err(renderFault(fault, textAt(ask, fault.field), lookOf(showing, world)));
 };
 
-const markupOf = ({ style }: Showing): MarkupStyle | null =>
-  style === undefined || style === 'plain' || style === 'unicode' ? null : style;
+/** True for a style that gives the formulas alone, to be pasted. */
+export const isMarkup = (style: PrintStyle | undefined): style is MarkupStyle =>
+  style !== undefined && style !== 'plain' && style !== 'unicode';
 
 /** A page for a person; or the formulas alone, to be pasted: then what must be known besides goes to standard error. */
 const showAnswer = async (given: Answered, ask: AskFields, showing: Showing, world: World): Promise<void> => {
@@ -64,13 +65,13 @@ const showAnswer = async (given: Answered, ask: AskFields, showing: Showing, wor
     await world.out(auditMarkdown(given, subjectOf(ask)));
     return;
   }
-  const markup = markupOf(showing);
+  const { style } = showing;
   const look = lookOf(showing, world);
-  if (markup === null) {
+  if (!isMarkup(style)) {
     await world.out(renderAnswer(given, subjectOf(ask), look));
     return;
   }
-  await world.out(`${styledLines(given, subjectOf(ask), markup).join('\n')}\n`);
+  await world.out(`${styledLines(given, subjectOf(ask), style).join('\n')}\n`);
   const remarks = renderRemarks(given, look);
   if (remarks !== '') world.err(remarks);
 };

@@ -55,6 +55,10 @@ describe('a style', () => {
   it('is a wrong command where it is none, or beside --json', async () => {
     expect((await couplet([...half, '--style', 'pdf'])).code).toBe(2);
     expect((await couplet([...half, '--style', 'html', '--json'])).code).toBe(2);
+    const files = { 'list.txt': '2 H2 + O2 -> H2O\n' };
+    expect((await couplet(['audit', '--file', 'list.txt', '--style', 'html'], { files })).code).toBe(2);
+    const list = await couplet(['audit', '--file', 'list.txt', '--style', 'unicode'], { files });
+    expect(list.out).toContain('2 H₂ + O₂ → 2 H₂O');
   });
 });
 
