@@ -35,14 +35,17 @@ export const halvesOfPair = (skeletonUnknowns: readonly Unknown[], pair: Pair): 
     all.filter((index) => (pair.numbers[index] ?? 0n) !== 0n),
     ...range(extra.length + 1).map((more) => range(skeletonUnknowns.length + more)),
   ].map((columns) => [...columns, electron]);
-  const half = (change: MeasuredChange): Numbers | null => {
-    for (const columns of sets) {
+  const half = (change: MeasuredChange, other: MeasuredChange): Numbers | null => {
+    // the other partner may lend what does not change in it, as HCl does; where that leaves a choice, it does not
+    const alone = sets.map((columns) => columns.filter((index) => index !== other.index || index === change.index));
+    for (const columns of [...sets, ...alone]) {
       const numbers = solveHalf(unknowns, labelled, change, columns);
       if (numbers !== null) return numbers;
     }
     return null;
   };
-  return { unknowns, oxidation: half(pair.oxidation), reduction: half(pair.reduction) };
+  const { oxidation, reduction } = pair;
+  return { unknowns, oxidation: half(oxidation, reduction), reduction: half(reduction, oxidation) };
 };
 
 const solveHalf = (

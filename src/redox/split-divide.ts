@@ -2,6 +2,7 @@ import type { Term } from '../balance/reaction.ts';
 import { lcmOf } from '../exact/integer.ts';
 import { type IntegerVector, nullSpace } from '../exact/matrix.ts';
 import { type Rational, ZERO, denominatorOf, numeratorOf, rational, signOf } from '../exact/rational.ts';
+import { oxidationNumbers } from '../species/oxidation.ts';
 import type { Species } from '../species/species.ts';
 import { type Background, type Component, isLent } from './split-components.ts';
 import { type Flow, elementsOf } from './split-flows.ts';
@@ -14,8 +15,8 @@ export interface Division {
 
 /**
  * A component in which some atoms are oxidised and others reduced, divided in two. A species all of whose atoms of an
- * element change goes by those atoms, in part to each side where they do; the others go where conservation of the
- * elements that no helper holds sends them. Null where that contradicts itself or leaves a choice.
+ * element change goes by those atoms, in part to each side where they do; a reactant of which only some change, by those;
+ * the others go where conservation of the elements that no helper holds sends them. Null where that contradicts itself or leaves a choice.
  */
 export const divide = (component: Component, sides: readonly bigint[], background: Background): Division | null => {
   const { terms, flows } = component;
@@ -50,8 +51,35 @@ const partByFlows = (
     return [sumOf(own.filter(({ side }) => side > 0n).map(({ atoms }) => atoms)).div(changing)];
   });
   const [first] = told;
-  if (first === undefined) return null;
+  if (first === undefined) return isReactant ? wholeByFlows({ species, nu }, flows, sides, background) : null;
   return told.every((part) => part.equals(first)) ? nu.mul(first) : 'contradiction';
+};
+
+/** A reactant in which all atoms of some number change, all to one side, goes there whole: S2O8^2- by its two peroxide atoms. */
+const wholeByFlows = (
+  { species, nu }: Term,
+  flows: readonly Flow[],
+  sides: readonly bigint[],
+  background: Background,
+): Rational | null => {
+  const own = flows
+    .map((flow, at) => ({ ...flow, side: sides[at] ?? 0n }))
+    .filter(({ source, element, from }) => source.key === species.key && !isLent(background, element, from));
+  const [first] = own;
+  const isWhole = ({ element, from }: Flow): boolean => {
+    const same = own.filter((flow) => flow.element === element && flow.from.equals(from));
+    return sumOf(same.map(({ atoms }) => atoms)).equals(atomsWith(species, element, from).mul(nu.abs()));
+  };
+  if (first === undefined || own.some(({ side }) => side !== first.side) || !own.every(isWhole)) return null;
+  return first.side > 0n ? nu : ZERO;
+};
+
+/** Atoms of `element` with this oxidation number in one formula unit. */
+const atomsWith = (species: Species, element: string, number: Rational): Rational => {
+  const found = oxidationNumbers(species);
+  if (found.kind === 'undecided') return ZERO;
+  const at = found.numbers.get(element)?.findIndex((own) => own.equals(number)) ?? -1;
+  return found.counts.get(element)?.[at] ?? ZERO;
 };
 
 const sumOf = (values: readonly Rational[]): Rational => values.reduce((sum, value) => sum.add(value), ZERO);

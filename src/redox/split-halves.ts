@@ -118,8 +118,8 @@ const joined = (oxidised: readonly Term[], reduced: readonly Term[], ionic: Ioni
   };
 };
 
-/** The difference of both is nothing, or so often  H^+ + OH^- - H2O = 0. */
-const givesBack = (sum: readonly Term[], reaction: readonly Term[]): boolean => {
+/** True where the terms of halves add up to a reaction: the difference is nothing, or so often  H^+ + OH^- - H2O = 0. */
+export const givesBack = (sum: readonly Term[], reaction: readonly Term[]): boolean => {
   const rest = sumOfTerms([
     [sum, ONE],
     [reaction, ONE.neg()],

@@ -5,9 +5,9 @@ import { type Result, failure, success } from '../report/result.ts';
 import { PROTON, mediumRow } from './media.ts';
 import type { Medium } from './medium.ts';
 import { termsOf } from './split-amounts.ts';
-import { type SplitHalf, halfOfTerms } from './split-complete.ts';
+import { type SplitHalf, electronsOf, halfOfTerms } from './split-complete.ts';
 import { type Flow, type OxidationChange, distinctChanges, elementsOf, flowsOf, increaseIn } from './split-flows.ts';
-import { type Halves, halvesOf } from './split-halves.ts';
+import { type Halves, givesBack, halvesOf } from './split-halves.ts';
 import { ionicHalf, ionicReaction } from './split-ionic.ts';
 
 /** What is split: an overall reaction in its medium, with the halves of a coupling where one settled it. */
@@ -49,9 +49,13 @@ export const splitReaction = (unsplit: Unsplit): Result<RedoxSplit> => {
   return success(split, [...(halves === null ? [halvesOmitted()] : []), ...(decided ? [] : [undecided()])]);
 };
 
-/** A coupling's own halves count, but where those found exchange as many electrons they are the better spelled. */
+/** A coupling's own halves count if they add up, but where those found exchange as many electrons they are better spelled. */
 const chosenHalves = ({ reaction, medium, halves, exchanged }: Unsplit, found: Halves | null): Halves | null => {
   if (halves === null || exchanged === null || found?.electrons.equals(exchanged) === true) return found;
+  const scaled = [halves.oxidation, halves.reduction].flatMap(({ terms }) =>
+    terms.map(({ species, nu }) => ({ species, nu: nu.mul(exchanged.div(electronsOf(terms).abs())) })),
+  );
+  if (!givesBack(scaled, reaction.terms)) return found;
   const molecular = reaction.terms.every(({ species }) => isZero(species.charge));
   const ionic = ionicReaction(reaction, medium, 'dissolved');
   const spelled = [...termsOf(ionic.amounts), ...reaction.terms].map(({ species }) => species);
