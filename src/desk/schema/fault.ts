@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import { MOST_SHOWN } from '../../redox/several.ts';
 import { exactSchema, reactionSchema } from './shape.ts';
 
 const common = {
@@ -55,7 +56,12 @@ export const faultSchema = z
       code: z.literal('several-balances'),
       ...common,
       dimension: z.number().int(),
-      family: z.array(reactionSchema).readonly(),
+      family: z
+        .array(reactionSchema)
+        .readonly()
+        .describe(
+          `The minimal balances: from none can a species with a side be dropped. At most ${String(MOST_SHOWN)}, those of the fewest species; the message says where there are more.`,
+        ),
       couplings: z.array(couplingSchema).readonly(),
       irreducible: z
         .exactOptional(z.array(reactionSchema).readonly())
