@@ -1,5 +1,6 @@
 import { Argument, Command, type CommandUnknownOpts, Option } from '@commander-js/extra-typings';
-import { LIST_FORMATS, auditList } from './audit-list.ts';
+import type { ListFormat } from './audit-list.ts';
+import { isMarkup } from './markup-style.ts';
 import {
   balancingFields,
   commonFields,
@@ -15,9 +16,9 @@ import {
   styleOption,
   whereOption,
 } from './options.ts';
-import { isMarkup } from './outcome.ts';
 import { type Shell, examples } from './shell.ts';
 
+const LIST_FORMATS = ['text', 'markdown', 'csv', 'ndjson'] as const satisfies readonly ListFormat[];
 const formatOption = new Option(
   '--format <FORMAT>',
   'how it is reported; csv and ndjson are for a file: --format markdown',
@@ -72,6 +73,7 @@ export const auditCommand = (shell: Shell): CommandUnknownOpts => {
     const { json = format === 'ndjson' ? true : undefined, plain, style } = options;
     if (file !== undefined) {
       if (isMarkup(style)) command.error('--style html, latex and mathml are for one equation or a cell.');
+      const { auditList } = await import('./audit-list.ts');
       const listFormat = json === true ? 'ndjson' : format;
       shell.finish(await auditList({ path: file, column, format: listFormat, fields, plain, style }, shell.world));
       return;

@@ -1,4 +1,4 @@
-import type { answer as answerFunction } from '../desk/answer.ts';
+import { answer } from '../desk/answer.ts';
 import type { PrintStyle } from '../notation/print/print.ts';
 import {
   type Audited,
@@ -15,8 +15,7 @@ import type { AskFields } from './outcome.ts';
 import { type ExitCode, type World, bytesOf } from './world.ts';
 
 /** How the audit of a list is written. */
-export const LIST_FORMATS = ['text', 'markdown', 'csv', 'ndjson'] as const;
-export type ListFormat = (typeof LIST_FORMATS)[number];
+export type ListFormat = 'text' | 'markdown' | 'csv' | 'ndjson';
 
 /** What is audited and how it is shown. */
 export interface ListRequest {
@@ -39,14 +38,8 @@ const pieces = async function* (world: World, path: string): AsyncGenerator<stri
   for await (const chunk of bytesOf(world, path)) yield decoder.decode(chunk, { stream: true });
 };
 
-type Answering = typeof answerFunction;
-
-const audited = (
-  listed: ListedEquation,
-  { fields }: ListRequest,
-  answering: Answering,
-): Audited & { readonly json: unknown } => {
-  const given = answering({ ask: 'audit', equation: listed.text, ...fields });
+const audited = (listed: ListedEquation, { fields }: ListRequest): Audited & { readonly json: unknown } => {
+  const given = answer({ ask: 'audit', equation: listed.text, ...fields });
   const json = { line: listed.line, label: listed.label, ...given };
   if (!given.ok) return { ...listed, fault: given.fault, json };
   if (given.ask !== 'audit' || 'parts' in given.answer)
@@ -64,14 +57,13 @@ const lineText = (format: ListFormat, one: Audited & { readonly json: unknown })
  * CSV and NDJSON one line for each equation. Exit code 1 where anything is unbalanced or unreadable.
  */
 export const auditList = async (request: ListRequest, world: World): Promise<ExitCode> => {
-  const { answer } = await import('../desk/answer.ts');
   const { path, column, format } = request;
   const text = pieces(world, path);
   const counts: Record<ListVerdict, number> = { balanced: 0, 'not-lowest': 0, unbalanced: 0, unreadable: 0 };
   const shown: Audited[] = [];
   let waiting = format === 'csv' ? CSV_HEADER : '';
   for await (const listed of column === undefined ? equationsOfText(text) : equationsOfCsv(text, column)) {
-    const one = audited(listed, request, answer);
+    const one = audited(listed, request);
     counts[verdictOf(one)] += 1;
     if (verdictOf(one) !== 'balanced' && shown.length < MOST_SHOWN) shown.push(one);
     waiting += lineText(format, one);

@@ -1,3 +1,4 @@
+import { answer } from '../desk/answer.ts';
 import type { Answer, Answered } from '../desk/schema/answer.ts';
 import type { PrintStyle } from '../notation/print/print.ts';
 import type { Fault } from '../report/fault.ts';
@@ -5,8 +6,9 @@ import { type Subject, renderAnswer, renderRemarks } from '../render/answer.ts';
 import { auditMarkdown } from '../render/audit-markdown.ts';
 import { renderFault } from '../render/fault.ts';
 import type { Look } from '../render/look.ts';
-import { type MarkupStyle, styledLines } from '../render/styled.ts';
+import { styledLines } from '../render/styled.ts';
 import { lookFor } from './look.ts';
+import { isMarkup } from './markup-style.ts';
 import type { ExitCode, World } from './world.ts';
 
 /** The fields that an ask may have; unknown fields and wrong types are the desk's to find. */
@@ -24,7 +26,7 @@ export interface Showing {
 const lookOf = ({ plain, style }: Showing, world: World): Look => lookFor(world, plain, style);
 
 /** The text that a fault's field names: of "anode[1]" the skeleton that stands there; null where there is none. */
-export const textAt = (ask: unknown, field: string | undefined): string | null => {
+const textAt = (ask: unknown, field: string | undefined): string | null => {
   const steps = [...(field ?? '').matchAll(/\[(\d+)\]|([^.[\]]+)/g)].map(([, index, name]) => index ?? name ?? '');
   const found = steps.reduce<unknown>(
     (part, step) => (typeof part === 'object' && part !== null ? (part as AskFields)[step] : undefined),
@@ -36,7 +38,7 @@ export const textAt = (ask: unknown, field: string | undefined): string | null =
 };
 
 /** The exit code that an answer stands for. */
-export const exitCodeOf = (given: Answer): ExitCode => {
+const exitCodeOf = (given: Answer): ExitCode => {
   if (!given.ok) return 1;
   return given.ask === 'audit' && given.answer.verdict === 'unbalanced' ? 1 : 0;
 };
@@ -54,10 +56,6 @@ const subjectOf = (ask: AskFields): Subject => {
 const showFault = (fault: Fault, ask: AskFields, showing: Showing, world: World): void => {
   world.err(renderFault(fault, textAt(ask, fault.field), lookOf(showing, world)));
 };
-
-/** True for a style that gives the formulas alone, to be pasted. */
-export const isMarkup = (style: PrintStyle | undefined): style is MarkupStyle =>
-  style !== undefined && style !== 'plain' && style !== 'unicode';
 
 /** A page for a person; or the formulas alone, to be pasted: then what must be known besides goes to standard error. */
 const showAnswer = async (given: Answered, ask: AskFields, showing: Showing, world: World): Promise<void> => {
@@ -78,8 +76,6 @@ const showAnswer = async (given: Answered, ask: AskFields, showing: Showing, wor
 
 /** Answers one ask and shows it: the contract's answer on one line with `json`, else a page for a person. */
 export const answerAsk = async (ask: AskFields, showing: Showing, world: World): Promise<ExitCode> => {
-  // The desk and its schemas are loaded when there is something to ask: help starts without them.
-  const { answer } = await import('../desk/answer.ts');
   const given = answer(ask);
   if (showing.json === true) await world.out(`${JSON.stringify(given)}\n`);
   else if (given.ok) await showAnswer(given, ask, showing, world);

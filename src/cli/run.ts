@@ -3,7 +3,6 @@ import { shielded, unshielded } from './arrow-argument.ts';
 import { BrokenList } from './equation-list.ts';
 import { program } from './program.ts';
 import type { Shell } from './shell.ts';
-import { answerAsk } from './outcome.ts';
 import { type ExitCode, type World, UnreadableFile } from './world.ts';
 
 /** Help and version end a command well; everything else that commander ends is a wrong command. */
@@ -30,6 +29,8 @@ export const run = async (argv: readonly string[], world: World): Promise<ExitCo
     },
     ask: async (fields, showing) => {
       const plain = Object.entries(fields).map(([name, part]) => [name, unshielded(part)] as const);
+      // The desk, its schemas and the pages are loaded when there is something to ask: help starts without them.
+      const { answerAsk } = await import('./outcome.ts');
       code = await answerAsk(Object.fromEntries(plain), showing, world);
     },
   };
