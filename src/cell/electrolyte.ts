@@ -1,6 +1,6 @@
 import { isZero } from '../exact/rational.ts';
-import { dissolvedIons } from '../redox/split-dissolve.ts';
-import { ionsOfSalt } from '../redox/split-salt.ts';
+import { dissolvedIons } from '../redox/split/dissolve.ts';
+import { ionsOfSalt } from '../redox/split/salt.ts';
 import type { Species } from '../species/species.ts';
 
 /** True for an ion, for what is dissolved, and for a salt, acid or base that dissolves or is molten. */

@@ -12,7 +12,7 @@ import { ZERO } from '../exact/rational.ts';
 import type { HalfReaction } from '../redox/half-reaction.ts';
 import { WATER, mediumRow } from '../redox/media.ts';
 import type { Medium } from '../redox/medium.ts';
-import { MOST_SHOWN, cutSentence } from '../redox/several.ts';
+import { MOST_SHOWN, cutSentence } from '../redox/coupling/several.ts';
 import { type Result, failure, success } from '../report/result.ts';
 import { type Species, ELECTRON, isElectron, sameSpecies } from '../species/species.ts';
 import type { Electrode } from './cell-reaction.ts';

@@ -4,7 +4,7 @@ import { electrodesOfDiagram } from '../cell/diagram.ts';
 import type { MediumChoice } from '../redox/choose-medium.ts';
 import type { HalfReaction } from '../redox/half-reaction.ts';
 import { completeHalf } from '../redox/half.ts';
-import { needless } from '../redox/needless.ts';
+import { needless } from '../redox/coupling/needless.ts';
 import { type RedoxReaction, balanceRedox } from '../redox/redox.ts';
 import { type Meter, startMeter } from '../exact/bounds.ts';
 import type { Rational } from '../exact/rational.ts';

@@ -1,7 +1,7 @@
 import { type Note, note } from '../report/note.ts';
 import { plainSpecies } from '../species/species.ts';
 import type { Medium } from './medium.ts';
-import type { RedoxSplit } from './split.ts';
+import type { RedoxSplit } from './split/split.ts';
 
 /**
  * `notes`, with the one that says that acid was assumed made to tell where the halves stand, if that is elsewhere: those

@@ -9,8 +9,8 @@ import { isElectron } from '../species/species.ts';
 import { type Attempt, attempt, finish, notesOf } from './attempt.ts';
 import { type MediumChoice, chooseMedium } from './choose-medium.ts';
 import type { HalfReaction } from './half-reaction.ts';
-import { needless } from './needless.ts';
-import { settleHalf } from './settle-half.ts';
+import { needless } from './coupling/needless.ts';
+import { settleHalf } from './coupling/settle-half.ts';
 
 /**
  * The half-reaction of a skeleton: helpers of the medium and electrons found, lowest whole numbers, recounted.

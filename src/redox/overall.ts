@@ -6,16 +6,16 @@ import type { Note } from '../report/note.ts';
 import { type Result, type Success, chain, failure, success } from '../report/result.ts';
 import type { Equation } from '../species/equation.ts';
 import { isElectron } from '../species/species.ts';
-import { assumedBalances } from './assume.ts';
+import { assumedBalances } from './coupling/assume.ts';
 import { type Attempt, attempt, finish, notesOf } from './attempt.ts';
 import { type MediumChoice, chooseMedium } from './choose-medium.ts';
 import type { Medium } from './medium.ts';
-import { nameCouplings } from './name-coupling.ts';
-import { type PairHalves, halvesOfPair } from './pair-halves.ts';
-import { pairHalves } from './pairs.ts';
-import { needless } from './needless.ts';
-import { settled, severalBalances } from './several.ts';
-import { type RedoxSplit, type Unsplit, splitReaction } from './split.ts';
+import { nameCouplings } from './coupling/name-coupling.ts';
+import { type PairHalves, halvesOfPair } from './coupling/pair-halves.ts';
+import { pairHalves } from './coupling/pairs.ts';
+import { needless } from './coupling/needless.ts';
+import { settled, severalBalances } from './coupling/several.ts';
+import { type RedoxSplit, type Unsplit, splitReaction } from './split/split.ts';
 
 /** One way to settle a redox skeleton: an oxidation paired with a reduction, or a simple ratio. */
 export interface Coupling {

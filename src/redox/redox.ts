@@ -5,7 +5,7 @@ import { withMediumOfHalves } from './assumed-medium.ts';
 import type { MediumChoice } from './choose-medium.ts';
 import type { Medium } from './medium.ts';
 import { balanceOverall } from './overall.ts';
-import { type RedoxSplit, splitReaction } from './split.ts';
+import { type RedoxSplit, splitReaction } from './split/split.ts';
 
 /** An overall reaction with its halves, its electron number and the oxidation numbers that change in it. */
 export interface RedoxReaction extends RedoxSplit {

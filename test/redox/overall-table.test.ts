@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { showRational } from '../../src/exact/rational.ts';
 import { balanceOverall } from '../../src/redox/overall.ts';
-import { flowsOf, increaseIn } from '../../src/redox/split-flows.ts';
+import { flowsOf, increaseIn } from '../../src/redox/split/flows.ts';
 import { plainReaction } from '../../src/balance/reaction.ts';
 import { plainEquation, residualByHand } from '../support/plain.ts';
 import { readTable } from '../support/table.ts';

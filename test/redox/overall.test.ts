@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { plainReaction } from '../../src/balance/reaction.ts';
 import { showRational } from '../../src/exact/rational.ts';
 import { balanceOverall } from '../../src/redox/overall.ts';
-import { flowsOf, increaseIn } from '../../src/redox/split-flows.ts';
+import { flowsOf, increaseIn } from '../../src/redox/split/flows.ts';
 import type { ShownCoupling } from '../../src/report/fault.ts';
 import { plainEquation } from '../support/plain.ts';
 import { faultWith, overall } from '../support/redox.ts';

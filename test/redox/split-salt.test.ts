@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { showRational } from '../../src/exact/rational.ts';
-import { dissolvedIons } from '../../src/redox/split-dissolve.ts';
-import { ionsOfSalt } from '../../src/redox/split-salt.ts';
+import { dissolvedIons } from '../../src/redox/split/dissolve.ts';
+import { ionsOfSalt } from '../../src/redox/split/salt.ts';
 import { plainSpecies } from '../../src/species/species.ts';
 import { plain } from '../support/plain.ts';
 

@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { plainReaction } from '../../src/balance/reaction.ts';
 import { rational, showRational } from '../../src/exact/rational.ts';
 import { balanceRedox } from '../../src/redox/redox.ts';
-import type { SplitHalf } from '../../src/redox/split-complete.ts';
+import type { SplitHalf } from '../../src/redox/split/complete.ts';
 import { electronsIn, leftOver, scaled } from '../support/halves.ts';
 import { plainEquation, residualByHand } from '../support/plain.ts';
 

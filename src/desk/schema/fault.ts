@@ -1,5 +1,5 @@
 import * as z from 'zod';
-import { MOST_SHOWN } from '../../redox/several.ts';
+import { MOST_SHOWN } from '../../redox/coupling/several.ts';
 import { exactSchema, reactionSchema } from './shape.ts';
 
 const common = {

@@ -1,7 +1,7 @@
-import type { Unknown } from '../balance/unknowns.ts';
-import { magnitude } from '../exact/integer.ts';
-import { range } from '../exact/matrix.ts';
-import { ZERO, signOf } from '../exact/rational.ts';
+import type { Unknown } from '../../balance/unknowns.ts';
+import { magnitude } from '../../exact/integer.ts';
+import { range } from '../../exact/matrix.ts';
+import { ZERO, signOf } from '../../exact/rational.ts';
 import { type Labelled, countOf } from './labels.ts';
 import type { Pair } from './pair.ts';
 import { isSolvent } from './solvent.ts';

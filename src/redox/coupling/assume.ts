@@ -1,9 +1,9 @@
-import { speciesMatrix } from '../balance/matrix.ts';
-import type { Numbers } from '../balance/solve.ts';
-import type { Unknown } from '../balance/unknowns.ts';
-import { type Bounds, type Meter, USUAL_BOUNDS, startMeter } from '../exact/bounds.ts';
-import { type IntegerVector, nullSpace, range } from '../exact/matrix.ts';
-import { type Species, ELECTRON, isElectron, plainSpecies } from '../species/species.ts';
+import { speciesMatrix } from '../../balance/matrix.ts';
+import type { Numbers } from '../../balance/solve.ts';
+import type { Unknown } from '../../balance/unknowns.ts';
+import { type Bounds, type Meter, USUAL_BOUNDS, startMeter } from '../../exact/bounds.ts';
+import { type IntegerVector, nullSpace, range } from '../../exact/matrix.ts';
+import { type Species, ELECTRON, isElectron, plainSpecies } from '../../species/species.ts';
 
 /** A balance and the assumption, in words, that singles it out. */
 export interface Assumed {

@@ -1,7 +1,7 @@
-import type { Unknown } from '../balance/unknowns.ts';
-import { type Bounds, type Meter, USUAL_BOUNDS, startMeter } from '../exact/bounds.ts';
-import { signOf } from '../exact/rational.ts';
-import { isElectron } from '../species/species.ts';
+import type { Unknown } from '../../balance/unknowns.ts';
+import { type Bounds, type Meter, USUAL_BOUNDS, startMeter } from '../../exact/bounds.ts';
+import { signOf } from '../../exact/rational.ts';
+import { isElectron } from '../../species/species.ts';
 import { balancePair } from './balance-pair.ts';
 import { type Label, type Labelled, type Transition, distinctLabels } from './labels.ts';
 import { labelsInSkeleton } from './odd-atom.ts';

@@ -1,5 +1,5 @@
-import type { Species } from '../species/species.ts';
-import { type Portion, ionsOfSalt } from './split-salt.ts';
+import type { Species } from '../../species/species.ts';
+import { type Portion, ionsOfSalt } from './salt.ts';
 
 /*
  * Which salts dissolve and which acids are strong, in water at room temperature. Common practice, no source: the rules

@@ -1,8 +1,8 @@
-import type { Term } from '../balance/reaction.ts';
-import { type Rational, ZERO, signOf } from '../exact/rational.ts';
-import { oxidationNumbers } from '../species/oxidation.ts';
-import type { Species } from '../species/species.ts';
-import { type Flow, directionOf, elementsOf } from './split-flows.ts';
+import type { Term } from '../../balance/reaction.ts';
+import { type Rational, ZERO, signOf } from '../../exact/rational.ts';
+import { oxidationNumbers } from '../../species/oxidation.ts';
+import type { Species } from '../../species/species.ts';
+import { type Flow, directionOf, elementsOf } from './flows.ts';
 
 /** What the helpers of a medium stand for: their elements, and the oxidation numbers that these have in them. */
 export interface Background {

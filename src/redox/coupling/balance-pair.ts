@@ -1,10 +1,10 @@
-import { speciesMatrix } from '../balance/matrix.ts';
-import type { Numbers } from '../balance/solve.ts';
-import type { Unknown } from '../balance/unknowns.ts';
-import type { Meter } from '../exact/bounds.ts';
-import { gcdOf } from '../exact/integer.ts';
-import { type IntegerMatrix, nullSpace, primitiveVector } from '../exact/matrix.ts';
-import { type Rational, ZERO, denominatorOf, numeratorOf, rational, signOf } from '../exact/rational.ts';
+import { speciesMatrix } from '../../balance/matrix.ts';
+import type { Numbers } from '../../balance/solve.ts';
+import type { Unknown } from '../../balance/unknowns.ts';
+import type { Meter } from '../../exact/bounds.ts';
+import { gcdOf } from '../../exact/integer.ts';
+import { type IntegerMatrix, nullSpace, primitiveVector } from '../../exact/matrix.ts';
+import { type Rational, ZERO, denominatorOf, numeratorOf, rational, signOf } from '../../exact/rational.ts';
 import { onTheirSides, ratiosOfProducts } from './assume.ts';
 import { type Labelled, countOf, labelRows } from './labels.ts';
 import type { Change, MeasuredChange, Pair } from './pair.ts';

@@ -1,4 +1,4 @@
-import type { Unknown } from '../balance/unknowns.ts';
+import type { Unknown } from '../../balance/unknowns.ts';
 
 /**
  * The elements whose atoms conservation cannot follow from one written species to another: those that helpers bring and

@@ -1,10 +1,10 @@
-import { type Family, minimalBalances } from '../balance/family.ts';
-import { type Reaction, showReaction } from '../balance/reaction.ts';
-import type { ShownCoupling } from '../report/fault.ts';
-import { type Note, note } from '../report/note.ts';
-import { type Result, failure, success } from '../report/result.ts';
-import { didYouMean, nearest } from '../report/suggest.ts';
-import { type Attempt, finish } from './attempt.ts';
+import { type Family, minimalBalances } from '../../balance/family.ts';
+import { type Reaction, showReaction } from '../../balance/reaction.ts';
+import type { ShownCoupling } from '../../report/fault.ts';
+import { type Note, note } from '../../report/note.ts';
+import { type Result, failure, success } from '../../report/result.ts';
+import { didYouMean, nearest } from '../../report/suggest.ts';
+import { type Attempt, finish } from '../attempt.ts';
 
 /** The choice that `settle` names by its assumption, with the note that says so; fault `bad-ask` if none is so called. */
 export const settled = <Choice extends { readonly assume: string }>(

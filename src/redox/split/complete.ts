@@ -1,15 +1,15 @@
-import { speciesMatrix } from '../balance/matrix.ts';
-import { inPrintingOrder } from '../balance/assemble.ts';
-import type { Term } from '../balance/reaction.ts';
-import { proved } from '../balance/recount.ts';
-import { gcdOf, lcmOf } from '../exact/integer.ts';
-import { independentColumns, nullSpace } from '../exact/matrix.ts';
-import { type Rational, ONE, ZERO, denominatorOf, numeratorOf, rational, signOf } from '../exact/rational.ts';
-import { type Species, ELECTRON, isElectron } from '../species/species.ts';
-import type { HalfReaction } from './half-reaction.ts';
-import { HYDROXIDE, PROTON, WATER } from './media.ts';
-import type { Medium } from './medium.ts';
-import { sumOfTerms, termsOf } from './split-amounts.ts';
+import { speciesMatrix } from '../../balance/matrix.ts';
+import { inPrintingOrder } from '../../balance/assemble.ts';
+import type { Term } from '../../balance/reaction.ts';
+import { proved } from '../../balance/recount.ts';
+import { gcdOf, lcmOf } from '../../exact/integer.ts';
+import { independentColumns, nullSpace } from '../../exact/matrix.ts';
+import { type Rational, ONE, ZERO, denominatorOf, numeratorOf, rational, signOf } from '../../exact/rational.ts';
+import { type Species, ELECTRON, isElectron } from '../../species/species.ts';
+import type { HalfReaction } from '../half-reaction.ts';
+import { HYDROXIDE, PROTON, WATER } from '../media.ts';
+import type { Medium } from '../medium.ts';
+import { sumOfTerms, termsOf } from './amounts.ts';
 
 /** A half-reaction and how often it runs in the overall reaction. */
 export interface SplitHalf {

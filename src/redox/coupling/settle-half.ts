@@ -1,12 +1,12 @@
-import { elementaryBalances } from '../balance/elementary.ts';
-import type { Reaction } from '../balance/reaction.ts';
-import { showReaction } from '../balance/reaction.ts';
-import type { Numbers } from '../balance/solve.ts';
-import { type Note, note } from '../report/note.ts';
-import { type Result, success } from '../report/result.ts';
-import { isElectron } from '../species/species.ts';
+import { elementaryBalances } from '../../balance/elementary.ts';
+import type { Reaction } from '../../balance/reaction.ts';
+import { showReaction } from '../../balance/reaction.ts';
+import type { Numbers } from '../../balance/solve.ts';
+import { type Note, note } from '../../report/note.ts';
+import { type Result, success } from '../../report/result.ts';
+import { isElectron } from '../../species/species.ts';
 import { assumedBalances } from './assume.ts';
-import { type Attempt, finish } from './attempt.ts';
+import { type Attempt, finish } from '../attempt.ts';
 import { settled, severalBalances } from './several.ts';
 
 /** A reaction chosen among several, with the notes that say so. */

@@ -1,5 +1,5 @@
-import type { Reaction, Term } from '../balance/reaction.ts';
-import { type Rational, ZERO, isZero } from '../exact/rational.ts';
+import type { Reaction, Term } from '../../balance/reaction.ts';
+import { type Rational, ZERO, isZero } from '../../exact/rational.ts';
 
 /** Stoichiometric numbers by the key of their species, in the order in which the species came in; states aside. */
 export type Amounts = ReadonlyMap<string, Term>;

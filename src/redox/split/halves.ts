@@ -1,14 +1,14 @@
-import type { Reaction, Term } from '../balance/reaction.ts';
-import { type Rational, ONE, ZERO, isZero, signOf } from '../exact/rational.ts';
-import { HYDROXIDE, PROTON, WATER } from './media.ts';
-import type { Medium } from './medium.ts';
-import { hasTwoStates, sumOfTerms, termsOf } from './split-amounts.ts';
-import { type SplitHalf, completeTerms, electronsOf, halfOfTerms, helpersOf } from './split-complete.ts';
-import { type Background, type Component, backgroundOf, componentsOf, sidesOf } from './split-components.ts';
-import { divide } from './split-divide.ts';
-import { elementsOf, flowsOf } from './split-flows.ts';
-import { ionicForms } from './split-forms.ts';
-import type { IonicReaction } from './split-ionic.ts';
+import type { Reaction, Term } from '../../balance/reaction.ts';
+import { type Rational, ONE, ZERO, isZero, signOf } from '../../exact/rational.ts';
+import { HYDROXIDE, PROTON, WATER } from '../media.ts';
+import type { Medium } from '../medium.ts';
+import { hasTwoStates, sumOfTerms, termsOf } from './amounts.ts';
+import { type SplitHalf, completeTerms, electronsOf, halfOfTerms, helpersOf } from './complete.ts';
+import { type Background, type Component, backgroundOf, componentsOf, sidesOf } from './components.ts';
+import { divide } from './divide.ts';
+import { elementsOf, flowsOf } from './flows.ts';
+import { ionicForms } from './forms.ts';
+import type { IonicReaction } from './ionic.ts';
 
 /** The two halves of an overall reaction and the electrons that they exchange at its scale. */
 export interface Halves {

@@ -1,7 +1,7 @@
-import type { Unknown } from '../balance/unknowns.ts';
-import { range } from '../exact/matrix.ts';
-import { signOf } from '../exact/rational.ts';
-import { plainSpecies } from '../species/species.ts';
+import type { Unknown } from '../../balance/unknowns.ts';
+import { range } from '../../exact/matrix.ts';
+import { signOf } from '../../exact/rational.ts';
+import { plainSpecies } from '../../species/species.ts';
 import { countOf, labelsOf } from './labels.ts';
 import type { PairHalves } from './pair-halves.ts';
 import { lesserForm } from './odd-atom.ts';

@@ -1,4 +1,4 @@
-import { type Result, failure } from '../report/result.ts';
+import { type Result, failure } from '../../report/result.ts';
 
 /** The fault `bad-ask` for a `settle` where conservation alone settles the skeleton. */
 export const needless = (settle: string): Result<never> =>

@@ -1,7 +1,7 @@
-import { type Rational, ONE, ZERO, isZero, rational } from '../exact/rational.ts';
-import type { Formula, Member } from '../notation/formula.ts';
-import { formulaKey, formulaText } from '../notation/print/formula-text.ts';
-import { type Species, countAtoms, plainCharge } from '../species/species.ts';
+import { type Rational, ONE, ZERO, isZero, rational } from '../../exact/rational.ts';
+import type { Formula, Member } from '../../notation/formula.ts';
+import { formulaKey, formulaText } from '../../notation/print/formula-text.ts';
+import { type Species, countAtoms, plainCharge } from '../../species/species.ts';
 
 /** So many formula units of a species in one unit of another. */
 export interface Portion {

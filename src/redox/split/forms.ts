@@ -1,12 +1,12 @@
-import type { Reaction } from '../balance/reaction.ts';
-import { ONE, isZero } from '../exact/rational.ts';
-import type { Member } from '../notation/formula.ts';
-import type { Species } from '../species/species.ts';
-import { HYDROXIDE, OXIDE, PROTON, WATER, mediumRow } from './media.ts';
-import type { Medium, MediumName } from './medium.ts';
-import { termsOf } from './split-amounts.ts';
-import { type IonicReaction, type Reach, ionicReaction } from './split-ionic.ts';
-import { ionsOfSalt, speciesOf } from './split-salt.ts';
+import type { Reaction } from '../../balance/reaction.ts';
+import { ONE, isZero } from '../../exact/rational.ts';
+import type { Member } from '../../notation/formula.ts';
+import type { Species } from '../../species/species.ts';
+import { HYDROXIDE, OXIDE, PROTON, WATER, mediumRow } from '../media.ts';
+import type { Medium, MediumName } from '../medium.ts';
+import { termsOf } from './amounts.ts';
+import { type IonicReaction, type Reach, ionicReaction } from './ionic.ts';
+import { ionsOfSalt, speciesOf } from './salt.ts';
 
 /**
  * `reaction` between ions, in each medium in which its halves may be completed, the likeliest first: among dry oxides

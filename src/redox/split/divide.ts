@@ -1,11 +1,11 @@
-import type { Term } from '../balance/reaction.ts';
-import { lcmOf } from '../exact/integer.ts';
-import { type IntegerVector, nullSpace } from '../exact/matrix.ts';
-import { type Rational, ZERO, denominatorOf, numeratorOf, rational, signOf } from '../exact/rational.ts';
-import { oxidationNumbers } from '../species/oxidation.ts';
-import type { Species } from '../species/species.ts';
-import { type Background, type Component, isLent } from './split-components.ts';
-import { type Flow, elementsOf } from './split-flows.ts';
+import type { Term } from '../../balance/reaction.ts';
+import { lcmOf } from '../../exact/integer.ts';
+import { type IntegerVector, nullSpace } from '../../exact/matrix.ts';
+import { type Rational, ZERO, denominatorOf, numeratorOf, rational, signOf } from '../../exact/rational.ts';
+import { oxidationNumbers } from '../../species/oxidation.ts';
+import type { Species } from '../../species/species.ts';
+import { type Background, type Component, isLent } from './components.ts';
+import { type Flow, elementsOf } from './flows.ts';
 
 /** The part of a component that is oxidised and the part that is reduced. */
 export interface Division {

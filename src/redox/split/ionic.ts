@@ -1,12 +1,12 @@
-import type { Reaction, Term } from '../balance/reaction.ts';
-import { ONE, isZero, signOf } from '../exact/rational.ts';
-import type { Species } from '../species/species.ts';
-import { HYDROXIDE, PROTON, WATER, mediumRow } from './media.ts';
-import type { Medium } from './medium.ts';
-import { type Amounts, sumOfTerms, termsOf } from './split-amounts.ts';
-import { inHydroxide } from './split-complete.ts';
-import { dissolvedIons } from './split-dissolve.ts';
-import { type Portion, ionsOfSalt, speciesOf } from './split-salt.ts';
+import type { Reaction, Term } from '../../balance/reaction.ts';
+import { ONE, isZero, signOf } from '../../exact/rational.ts';
+import type { Species } from '../../species/species.ts';
+import { HYDROXIDE, PROTON, WATER, mediumRow } from '../media.ts';
+import type { Medium } from '../medium.ts';
+import { type Amounts, sumOfTerms, termsOf } from './amounts.ts';
+import { inHydroxide } from './complete.ts';
+import { dissolvedIons } from './dissolve.ts';
+import { type Portion, ionsOfSalt, speciesOf } from './salt.ts';
 
 /** A reaction between ions, spectators gone, with the medium that its halves are completed in. */
 export interface IonicReaction {

@@ -1,7 +1,7 @@
-import type { Term } from '../balance/reaction.ts';
-import { type Rational, ZERO, isZero, signOf } from '../exact/rational.ts';
-import { oxidationNumbers } from '../species/oxidation.ts';
-import type { Species } from '../species/species.ts';
+import type { Term } from '../../balance/reaction.ts';
+import { type Rational, ZERO, isZero, signOf } from '../../exact/rational.ts';
+import { oxidationNumbers } from '../../species/oxidation.ts';
+import type { Species } from '../../species/species.ts';
 
 /** Atoms of one element that pass from a reactant to a product and change their oxidation number on the way. */
 export interface Flow {

@@ -1,7 +1,7 @@
-import type { Unknown } from '../balance/unknowns.ts';
-import { range } from '../exact/matrix.ts';
-import { ONE, isZero } from '../exact/rational.ts';
-import type { Species } from '../species/species.ts';
+import type { Unknown } from '../../balance/unknowns.ts';
+import { range } from '../../exact/matrix.ts';
+import { ONE, isZero } from '../../exact/rational.ts';
+import type { Species } from '../../species/species.ts';
 import { type Label, type Labelled, labelsOfAll } from './labels.ts';
 
 /**

@@ -1,8 +1,8 @@
-import { lcmOf } from '../exact/integer.ts';
-import type { IntegerMatrix } from '../exact/matrix.ts';
-import { type Rational, ZERO, denominatorOf, numeratorOf, showRational } from '../exact/rational.ts';
-import { oxidationNumbers } from '../species/oxidation.ts';
-import { type Species, isElectron } from '../species/species.ts';
+import { lcmOf } from '../../exact/integer.ts';
+import type { IntegerMatrix } from '../../exact/matrix.ts';
+import { type Rational, ZERO, denominatorOf, numeratorOf, showRational } from '../../exact/rational.ts';
+import { oxidationNumbers } from '../../species/oxidation.ts';
+import { type Species, isElectron } from '../../species/species.ts';
 
 /** Atoms of one element with one oxidation number: `name` is "Mn 7". */
 export interface Label {

@@ -1,5 +1,5 @@
-import type { Numbers } from '../balance/solve.ts';
-import type { Rational } from '../exact/rational.ts';
+import type { Numbers } from '../../balance/solve.ts';
+import type { Rational } from '../../exact/rational.ts';
 import type { Transition } from './labels.ts';
 
 /** What one reactant undergoes: the labels that change, and to what. */

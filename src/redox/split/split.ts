@@ -1,14 +1,14 @@
-import { type Reaction, type Term, plainReaction, showReaction } from '../balance/reaction.ts';
-import { type Rational, isZero } from '../exact/rational.ts';
-import { type Note, note } from '../report/note.ts';
-import { type Result, failure, success } from '../report/result.ts';
-import { PROTON, mediumRow } from './media.ts';
-import type { Medium } from './medium.ts';
-import { termsOf } from './split-amounts.ts';
-import { type SplitHalf, electronsOf, halfOfTerms } from './split-complete.ts';
-import { type Flow, type OxidationChange, distinctChanges, elementsOf, flowsOf, increaseIn } from './split-flows.ts';
-import { type Halves, givesBack, halvesOf } from './split-halves.ts';
-import { ionicHalf, ionicReaction } from './split-ionic.ts';
+import { type Reaction, type Term, plainReaction, showReaction } from '../../balance/reaction.ts';
+import { type Rational, isZero } from '../../exact/rational.ts';
+import { type Note, note } from '../../report/note.ts';
+import { type Result, failure, success } from '../../report/result.ts';
+import { PROTON, mediumRow } from '../media.ts';
+import type { Medium } from '../medium.ts';
+import { termsOf } from './amounts.ts';
+import { type SplitHalf, electronsOf, halfOfTerms } from './complete.ts';
+import { type Flow, type OxidationChange, distinctChanges, elementsOf, flowsOf, increaseIn } from './flows.ts';
+import { type Halves, givesBack, halvesOf } from './halves.ts';
+import { ionicHalf, ionicReaction } from './ionic.ts';
 
 /** What is split: an overall reaction in its medium, with the halves of a coupling where one settled it. */
 export interface Unsplit {
