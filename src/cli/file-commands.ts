@@ -24,6 +24,11 @@ const formatOption = new Option('--format <FORMAT>', 'how the answers are shown'
   .choices(['text', 'markdown', 'csv', 'json', 'html'] as const)
   .conflicts('json');
 
+const everyOption = new Option(
+  '--every <STEM>',
+  'write every format at once: STEM.txt, STEM.md, STEM.csv, STEM.json, STEM.html',
+).conflicts(['format', 'json']);
+
 /** `sheet`: the tanks of a plant and what their runs make. */
 export const sheetCommand = (shell: Shell): CommandUnknownOpts =>
   new Command('sheet')
@@ -32,13 +37,14 @@ export const sheetCommand = (shell: Shell): CommandUnknownOpts =>
     .addOption(plainOption)
     .addOption(jsonOption)
     .addOption(formatOption)
-    .option('--out <FILE>', 'write to this file instead of standard output')
+    .addOption(new Option('--out <FILE>', 'write to this file instead of standard output').conflicts('every'))
+    .addOption(everyOption)
     .addHelpText(
       'after',
       examples(
         'couplet sheet fixtures/tern-quay.yaml',
         'couplet sheet plant.yaml --format html --out plant.html',
-        'couplet sheet plant.yaml --json',
+        'couplet sheet plant.yaml --every reports/monday',
       ),
     )
     .action(async (file, options) => {

@@ -164,6 +164,10 @@ export const renderCautions = (sheet: SheetAnswer, look: Look): string => {
   return `${look.paint.strong('Cautions')}\n${indented([...holding, ...short, ...last]).join('\n')}\n`;
 };
 
+/** Said in the place of a part that is at fault; the fault itself is shown elsewhere. */
+export const renderUnanswered = (name: string, look: Look): string =>
+  `${look.paint.bad(`! ${printable(name)} was not answered.`)}\n`;
+
 /** The last line of a sheet. */
 export const renderFoot = ({ plant, invented }: SheetAnswer): string =>
   invented ? `${printable(plant)} and all its figures are invented.\n` : '';

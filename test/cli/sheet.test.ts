@@ -119,12 +119,28 @@ describe('couplet sheet', () => {
     ['the sheet itself', ['sheet', 'plant/p.yaml', '--out', 'plant/p.yaml'], 'is the sheet itself'],
     ['a file that may not be written', ['sheet', 'plant/p.yaml', '--out', 'locked/page'], 'cannot be written'],
     ['an unknown format', ['sheet', 'plant/p.yaml', '--format', 'doc'], 'doc'],
+    ['two places', ['sheet', 'plant/p.yaml', '--out', 'a', '--every', 'b'], 'every'],
     ['two formats', ['sheet', 'plant/p.yaml', '--format', 'csv', '--json'], 'json'],
   ])('gives 2 for %s', async (_, argv, words) => {
     const { code, err, saved } = await couplet(argv, FILES);
     expect(code).toBe(2);
     expect(err).toContain(words);
     expect(saved.size).toBe(0);
+  });
+
+  it('writes every format from one command', async () => {
+    const { code, out, err, saved } = await couplet(['sheet', 'plant/p.yaml', '--every', 'day'], FILES);
+    expect([code, out, err]).toEqual([0, '', '']);
+    expect([...saved.keys()]).toEqual(['day.txt', 'day.md', 'day.csv', 'day.json', 'day.html']);
+    for (const format of ['text', 'markdown', 'csv', 'json', 'html']) {
+      const alone = await couplet(['sheet', 'plant/p.yaml', '--format', format], FILES);
+      expect([...saved.values()]).toContain(alone.out);
+    }
+  });
+
+  it('says in a page of text what was not answered, in its place', async () => {
+    const { out } = await couplet(['sheet', 'p.yaml'], { 'p.yaml': SHEET });
+    expect(out).toContain('! logged was not answered.');
   });
 
   it('writes no file for a sheet that cannot be read', async () => {
