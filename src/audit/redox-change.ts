@@ -1,19 +1,10 @@
 import { type Rational, ZERO, isZero, signOf } from '../exact/rational.ts';
-import { type OxidationNumbers, oxidationNumbers } from '../species/oxidation.ts';
-import { type Species, isElectron } from '../species/species.ts';
+import { oxidationNumbers } from '../species/oxidation.ts';
+import { isElectron } from '../species/species.ts';
 import type { Draft } from './writing.ts';
 
 /** What becomes of the oxidation numbers in an equation; `unknown` where convention does not decide one of them. */
 export type RedoxChange = 'none' | 'oxidation' | 'reduction' | 'both' | 'unknown';
-
-/** Numbers already found: a pure function of the species, kept as long as the species is. */
-const found = new WeakMap<Species, OxidationNumbers>();
-
-const numbersOf = (species: Species): OxidationNumbers => {
-  const known = found.get(species) ?? oxidationNumbers(species);
-  found.set(species, known);
-  return known;
-};
 
 /**
  * How the oxidation numbers change from left to right. An element whose numbers are spread otherwise, though their sum
@@ -45,7 +36,7 @@ const spreadOf = (draft: Draft): ReadonlyMap<string, ReadonlyMap<string, Spread>
   const spread = new Map<string, Map<string, Spread>>();
   for (const { species, side, coefficient } of draft) {
     if (isElectron(species)) continue;
-    const own = numbersOf(species);
+    const own = oxidationNumbers(species);
     if (own.kind === 'undecided') return null;
     const times = side === 'right' ? coefficient : coefficient.neg();
     for (const [element, numbers] of own.numbers) {

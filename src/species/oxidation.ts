@@ -94,6 +94,9 @@ const byElement = <T>(sites: readonly Site[], pick: (own: readonly Site[]) => T)
   return new Map([...elements].map((element) => [element, pick(sites.filter((site) => site.element === element))]));
 };
 
+/** Numbers already found: a pure function of the species, whose readings are shared, kept as long as the species is. */
+const known = new WeakMap<Species, OxidationNumbers>();
+
 /**
  * Oxidation numbers of `species` by the conventions of the IUPAC (P. Karen, P. McArdle, J. Takats, Pure Appl. Chem. 86
  * (2014) 1017 and 88 (2016) 831), read from the formula: like atoms of a species share their average, except
@@ -101,6 +104,12 @@ const byElement = <T>(sites: readonly Site[], pick: (own: readonly Site[]) => T)
  * these do not settle the formula; the electron has no atoms and is undecided too.
  */
 export const oxidationNumbers = (species: Species): OxidationNumbers => {
+  const found = known.get(species) ?? findNumbers(species);
+  known.set(species, found);
+  return found;
+};
+
+const findNumbers = (species: Species): OxidationNumbers => {
   if (isElectron(species)) return { kind: 'undecided', why: 'The electron has no atoms.' };
   const solved = solveParts(species.parts, species.charge);
   if (solved === undefined || !chargeOf(solved).equals(species.charge)) {
