@@ -4,13 +4,11 @@ import type { Quantity } from './schema/shape.ts';
 /** What the medium lends is made and used everywhere; nobody runs a tank for it. */
 const LENT = new Set(['H2O', 'H^+', 'OH^-', 'e^-']);
 
-/** What the cell makes, the tank's product first; what a medium lends is left out. */
+/** What the cell makes, the tank's product first; what a medium lends is left out unless the tank is run for it. */
 export const productsOf = (overall: CellAnswer['overall'], product: string): readonly string[] => {
-  const made = overall.terms
-    .filter((term) => !term.nu.startsWith('-') && !LENT.has(term.species))
-    .map((term) => term.species);
+  const made = overall.terms.filter((term) => !term.nu.startsWith('-')).map((term) => term.species);
   const first = made.filter((species) => species === product || product.startsWith(`${species}(`));
-  return [...new Set([...first, ...made])];
+  return [...new Set([...first, ...made.filter((species) => !LENT.has(species))])];
 };
 
 /** The first product of a half-reaction that its medium does not lend; else any product. */

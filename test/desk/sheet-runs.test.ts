@@ -355,6 +355,18 @@ describe('sums', () => {
   });
 });
 
+describe('a tank that is run for water', () => {
+  it('counts it among its products', () => {
+    const [tank] = sheetOf(
+      'plant: P\ncells:\n  - { name: F, mode: galvanic, medium: acid, product: H2O, anode: [H2(g) -> H^+], cathode: [O2(g) -> H2O], runs: [{ label: a, charge: 100 A h }] }\n',
+    ).tanks;
+    if (tank === undefined || 'fault' in tank) throw new Error('not answered');
+    // 100 A h * 3600 s/h / (2 F) * 18.015 g/mol
+    expect(tank.totals.products.map(({ species }) => species)).toEqual(['H2O']);
+    expect(tank.totals.products[0]?.mass?.value).toBeCloseTo(((360_000 / (2 * FARADAY)) * 18.015) / 1000, 6);
+  });
+});
+
 describe('where the current went', () => {
   it('follows the shares of the reactions, and the efficiency of the product', () => {
     const tank = tankOf(
