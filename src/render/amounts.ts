@@ -41,7 +41,9 @@ interface SpeciesRow {
 
 const speciesTable = (heading: string, rows: readonly SpeciesRow[], look: Look): readonly string[] => {
   if (rows.length === 0) return [];
-  const shown = PER_SPECIES.filter((name) => rows.some(({ quantities }) => quantities[name] !== undefined));
+  const known = PER_SPECIES.filter((name) => rows.some(({ quantities }) => quantities[name] !== undefined));
+  // four quantities are wider than a terminal: where there is gas, its volume says more
+  const shown = known.includes('volume') ? known.filter((name) => name !== 'mass_per_charge') : known;
   const head = [heading, 'e- per mole', ...shown.flatMap((name) => [worded(name), ''])];
   const lines = rows.map(({ species, electronsPerMole, quantities }) => [
     speciesText(species, look),

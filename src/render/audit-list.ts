@@ -1,10 +1,10 @@
 import type { EquationAuditAnswer } from '../desk/schema/answer.ts';
 import type { Fault } from '../report/fault.ts';
+import { repaired } from './audit.ts';
 import { page } from './block.ts';
 import { type Cell, columns } from './columns.ts';
 import { renderFault } from './fault.ts';
 import type { Look, Paint } from './look.ts';
-import { reactionText } from './spelling.ts';
 
 /** What came of one equation of a list. */
 export type Audited =
@@ -50,12 +50,12 @@ const attention = (audited: Audited, look: Look): readonly string[] => {
   if ('fault' in audited)
     return [head, ...renderFault(audited.fault, audited.text, look).trimEnd().split('\n').slice(1)];
   const gap = gapText(audited);
-  const repair = repairText(audited);
+  const [repair] = audited.audit.repairs;
   return [
     head,
     `  ${audited.text}`,
     ...(gap === '' ? [] : [`  ${paint.faint('right minus left:')} ${gap}`]),
-    ...(repair === '' ? [] : [`  ${paint.faint('likeliest repair:')} ${paint.mark(reactionText(repair, look))}`]),
+    ...(repair === undefined ? [] : [`  ${paint.faint('likeliest repair:')} ${repaired(repair, look)}`]),
   ];
 };
 

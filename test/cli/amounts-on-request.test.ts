@@ -47,7 +47,11 @@ describe('couplet amounts', () => {
   it('fits a terminal of 80 columns', async () => {
     const given = ['--given', 'current=2.00 A ± 0.02 A', '--given', 'time=100 s ± 2 s'];
     const { out } = await couplet([...COPPER, ...given, '--budget', '--tank', '--series', 'Ag: Ag^+ + e^- -> Ag']);
-    expect(out.split('\n').filter((line) => line.length > 80)).toEqual([]);
+    const cell = ['amounts', '--anode', 'Cl^- -> Cl2(g)', '--cathode', 'H2O -> H2(g)', '--species', 'Cl2'];
+    const gas = ['--medium', 'neutral', '--given', 'charge=1.000(1) kA h', '--given', 'temperature=25 °C'];
+    const gases = await couplet([...cell, ...gas, '--given', 'pressure=1 bar']);
+    expect(gases.out).toMatch(/^ {2}same charge .* volume$/m);
+    expect(`${out}${gases.out}`.split('\n').filter((line) => line.length > 80)).toEqual([]);
   });
 });
 
