@@ -4,7 +4,7 @@ import { escaped, formulaHtml } from './markup.ts';
 import { PATTERNS } from './report-pictures.ts';
 import { REPORT_STYLE } from './report-style.ts';
 import { tankSection } from './report-tank.ts';
-import { REPORT_WRITING, capital, faultHtml } from './report-words.ts';
+import { REPORT_WRITING, faultHtml } from './report-words.ts';
 import { graveOf, makesGas, othersOf } from './sheet-cautions.ts';
 import { tankSummary } from './sheet-summary.ts';
 import { GAS_BASIS, totalRows } from './sheet-words.ts';
@@ -79,7 +79,7 @@ const invented = ({ plant }: SheetAnswer): string => `${escaped(plant)} and all 
  * at fault.
  */
 export const reportHtml = (sheet: SheetAnswer, sheetText: string): string => {
-  const about = sheet.about === null ? '' : `<p>${escaped(capital(sheet.about))}</p>`;
+  const about = sheet.about === null ? '' : `<p>${escaped(sheet.about)}</p>`;
   return `${[
     '<!DOCTYPE html>',
     '<html lang="en">',

@@ -6,7 +6,7 @@ import { speciesText } from './spelling.ts';
 import { bandFigure, recordFigures } from './report-pictures.ts';
 import { REPORT_WRITING, capital, faultHtml, saidList } from './report-words.ts';
 import { type RunColumn, runTable, standsOut } from './sheet-table.ts';
-import { tankNotes } from './sheet-notes.ts';
+import { tankNotes, writtenNotes } from './sheet-notes.ts';
 import {
   budgetWords,
   efficiencyText,
@@ -82,7 +82,7 @@ const recordLines = (tank: WholeTank): readonly string[] =>
   });
 
 const targetLines = ({ targets }: WholeTank): readonly string[] =>
-  targets.flatMap((target) => ('fault' in target ? [] : [capital(targetSentence(target, REPORT_WRITING))]));
+  targets.flatMap((target) => ('fault' in target ? [] : [targetSentence(target, REPORT_WRITING)]));
 
 const gasLines = ({ gas }: WholeTank): readonly string[] =>
   gas.map((one) => `${capital(gasSentence(one, REPORT_WRITING))}.`);
@@ -92,6 +92,7 @@ const noteLines = (tank: WholeTank): readonly string[] => {
   return [
     ...(present === '' ? [] : [`There, and taking no part: ${present}.`]),
     ...tankNotes(tank).map((note) => escaped(capital(note))),
+    ...writtenNotes(tank).map(escaped),
   ];
 };
 
@@ -101,7 +102,7 @@ const isFault = (part: RunAnswer | WholeTank['targets'][number]): part is Extrac
 /** One tank of the report: what runs there and what came of it, beside its pictures. `at` numbers its elements. */
 export const tankSection = (tank: WholeTank, at: number, sheetText: string): string => {
   const id = `tank${String(at + 1)}`;
-  const purpose = tank.purpose === null ? '' : `<p class="purpose">${escaped(capital(tank.purpose))}</p>`;
+  const purpose = tank.purpose === null ? '' : `<p class="purpose">${escaped(tank.purpose)}</p>`;
   const broken = [...tank.runs, ...tank.targets, ...('fault' in tank.yield ? [tank.yield] : [])].filter(isFault);
   const left = [
     saidList('Goals', targetLines(tank)),

@@ -32,5 +32,6 @@ export const saidList = (heading: string, lines: readonly string[]): string =>
     ? ''
     : `<div><h3>${heading}</h3><ul class="said">${lines.map((line) => `<li>${line.replace(BEFORE_UNIT, '$1&#160;')}</li>`).join('')}</ul></div>`;
 
-/** A word that begins a line of prose. */
-export const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
+/** A plain word that begins a line of prose; a path or a formula stays as it is. */
+export const capital = (text: string): string =>
+  /^[a-z]+ /.test(text) ? text.charAt(0).toUpperCase() + text.slice(1) : text;

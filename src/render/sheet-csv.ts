@@ -11,7 +11,7 @@ import type {
   WholeTarget,
 } from '../desk/sheet-answer.ts';
 import { graveOf, othersOf } from './sheet-cautions.ts';
-import { tankNotes } from './sheet-notes.ts';
+import { tankNotes, writtenNotes } from './sheet-notes.ts';
 import { standsOut } from './sheet-table.ts';
 
 /** The columns of the table: one row for each thing that is known. */
@@ -111,7 +111,7 @@ const tankRows = (tank: WholeTank): readonly Row[] => {
     ...totalsRows('tank', name, tank.totals),
     ...gases,
     ...('fault' in tank.yield ? [faultRow(name, tank.yield)] : []),
-    ...tankNotes(tank).map((text): Row => ({ part: 'note', tank: name, text })),
+    ...[...tankNotes(tank), ...writtenNotes(tank)].map((text): Row => ({ part: 'note', tank: name, text })),
   ];
 };
 

@@ -4,7 +4,7 @@ import { excerpt } from '../report/excerpt.ts';
 import type { SheetAnswer, SheetCaution, SheetFault, TankAnswer, WholeTank } from '../desk/sheet-answer.ts';
 import { UNPAINTED } from './look.ts';
 import { graveOf, makesGas, othersOf } from './sheet-cautions.ts';
-import { tankNotes } from './sheet-notes.ts';
+import { tankNotes, writtenNotes } from './sheet-notes.ts';
 import { runTable } from './sheet-table.ts';
 import {
   GAS_BASIS,
@@ -118,7 +118,7 @@ const wholeTank = (tank: WholeTank, sheetText: string): readonly string[] => {
     ...listed('Current efficiency by weighing', weighed(tank)),
     ...listed('Records', records(tank)),
     ...listed('Gas', gas),
-    ...listed('Notes', [...present, ...tankNotes(tank).map(plain)]),
+    ...listed('Notes', [...present, ...[...tankNotes(tank), ...writtenNotes(tank)].map(plain)]),
     ...broken.flatMap((one) => fault(one, sheetText)),
   ];
 };

@@ -7,7 +7,7 @@ import { type Cell, columns, indented } from './columns.ts';
 import type { Look } from './look.ts';
 import { halfRows } from './reactions.ts';
 import { graveOf, makesGas, othersOf } from './sheet-cautions.ts';
-import { tankNotes } from './sheet-notes.ts';
+import { tankNotes, writtenNotes } from './sheet-notes.ts';
 import { runTable, standsOut } from './sheet-table.ts';
 import {
   GAS_BASIS,
@@ -74,22 +74,33 @@ const runLines = (tank: WholeTank, look: Look): readonly string[] => {
 const outcomeLines = (tank: WholeTank, look: Look): readonly string[] => {
   const write = writingFor(look);
   const runs = tank.runs.flatMap((run) => ('fault' in run ? [] : [run]));
-  const weighed = tank.weighed === null ? [] : hanging('weighed', weighedSentence(tank.weighed, write), asIs);
+  const weighed =
+    tank.weighed === null ? [] : hanging('weighed', weighedSentence(tank.weighed, write), asIs, look.paint.faint);
   const out = runs.flatMap((run) => {
     const why = standsOut(run);
     return why === null ? [] : hanging('', `${printable(run.name)} stands out: ${why}`, look.paint.bad);
   });
   const goals = tank.targets.flatMap((target) => {
     if ('fault' in target) return [];
-    return hanging('goal', targetSentence(target, write), target.reached === false ? look.paint.bad : asIs);
+    return hanging(
+      'goal',
+      targetSentence(target, write),
+      target.reached === false ? look.paint.bad : asIs,
+      look.paint.faint,
+    );
   });
   const records = runs.flatMap(({ name, record }) => {
     if (record === null) return [];
     const remarks = record.remarks.flatMap((remark) => hanging('', printable(remark), look.paint.warn));
-    return [...hanging('record', `${printable(name)}: ${recordSentence(record, write)}`, asIs), ...remarks];
+    return [
+      ...hanging('record', `${printable(name)}: ${recordSentence(record, write)}`, asIs, look.paint.faint),
+      ...remarks,
+    ];
   });
-  const gas = tank.gas.flatMap((one) => hanging('gas', gasSentence(one, write), asIs));
-  const notes = tankNotes(tank).flatMap((note) => hanging('note', printable(note), look.paint.warn));
+  const gas = tank.gas.flatMap((one) => hanging('gas', gasSentence(one, write), asIs, look.paint.faint));
+  const notes = [...tankNotes(tank), ...writtenNotes(tank)].flatMap((note) =>
+    hanging('note', printable(note), look.paint.warn, look.paint.faint),
+  );
   return [...weighed, ...out, ...goals, ...records, ...gas, ...presentLines(tank, look), ...notes];
 };
 
@@ -140,7 +151,7 @@ export const renderTotals = ({ totals }: SheetAnswer, look: Look): string => {
     .filter(isFlow)
     .map(({ name, value, aside }) => [name, aside === '' ? value : `${value}, ${aside}`] as const);
   const made = rows.filter((row) => !isFlow(row)).map(({ name, value }) => `${name} ${value}`);
-  const products = made.length === 0 ? [] : hanging('made', made.join(';  '), asIs);
+  const products = made.length === 0 ? [] : hanging('made', made.join(';  '), asIs, look.paint.faint);
   return `${look.paint.strong('Altogether')}\n${page([[...labelled(flows, look), ...products]])}`;
 };
 
