@@ -39,8 +39,18 @@ const wantOne = (name: string, text: string): Result<readonly [QuantityName, Ans
   chain(quantityNamed(name, 'want'), (known) =>
     chain(inField(readWantedUnit(text, QUANTITIES[known]), `want.${name}`), (unit) => {
       const wrong = (known === 'volume' && /mol/u.test(text)) || isFraction(known, unit);
-      return wrong ? notAUnit(known, text) : success([known, { text: text.trim(), unit }] as const);
+      return wrong ? notAUnit(known, text) : success([known, { text: shownUnit(text.trim()), unit }] as const);
     }),
+  );
+
+/** `mAh` is `mA h`, in a divisor with brackets: `g/Ah` is `g/(A h)`. Any other unit is answered as it was typed. */
+const shownUnit = (text: string): string =>
+  text.replace(
+    /(\/\s*|\bper\s+)?(?<!\p{L})([µukM]|m)?Ah(?!\p{L})/gu,
+    (_, over: string | undefined, prefix: string | undefined) => {
+      const product = `${prefix ?? ''}A h`;
+      return over === undefined ? product : `${over}(${product})`;
+    },
   );
 
 /** A concentration cannot be answered as a mass fraction: nothing says what the solution weighs afterwards. */

@@ -1,6 +1,6 @@
 import type { Reaction } from '../balance/reaction.ts';
 import type { CellReaction, WeightedHalf } from '../cell/cell-reaction.ts';
-import { type Rational, ONE, ZERO, rationalFromText, showDecimal, signOf } from '../exact/rational.ts';
+import { type Rational, ONE, ZERO, showDecimal, signOf } from '../exact/rational.ts';
 import { type Note, note } from '../report/note.ts';
 import { type Result, all, chain, failure, inField, success } from '../report/result.ts';
 import { wholeSpan } from '../report/span.ts';
@@ -45,10 +45,6 @@ export interface Branch {
 
 const readShare = (text: string, index: number): Result<Share> => {
   const name = `electrode[${String(index)}].share`;
-  if (/^\s*\d+\/[1-9]\d*\s*$/u.test(text)) {
-    const exact = rationalFromText(text.trim());
-    return success({ exact, measured: exactly(toFloat(exact)) });
-  }
   const read = readQuantity(text, QUANTITIES.share);
   return chain(inField(read, name), ({ exact, value, uncertainty }) =>
     signOf(exact) < 0n

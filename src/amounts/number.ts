@@ -14,11 +14,12 @@ const WHOLE = `\\d{1,3}(?:${BLANK}\\d{3})+(?!\\d)|\\d+`;
 
 /**
  * A number at the start of a text: groups of three digits, a decimal point, an uncertainty in brackets, a power of
- * ten as `e3`, `x10^3` or `× 10³`. Groups: sign, whole part, decimals, uncertainty, exponent, exponent in superscript.
+ * ten as `e3`, `x10^3` or `× 10³`; the brackets may stand behind the power too. Groups: sign, whole part, decimals,
+ * uncertainty, exponent, the same after ×, the same in superscript, uncertainty behind it.
  */
 export const NUMBER_PATTERN = new RegExp(
   `([+−-]?)(${WHOLE})?(?:\\.(\\d*))?(?:\\((\\d+(?:\\.\\d+)?)\\))?` +
-    '(?:[eE]([+−-]?\\d{1,3})(?![\\d.])|\\s*[x×*·]\\s*10(?:\\^([+−-]?\\d{1,3})|([⁺⁻]?[⁰¹²³⁴-⁹]{1,3})))?',
+    '(?:(?:[eE]([+−-]?\\d+)(?![\\d.])|\\s*[x×*·]\\s*10(?:\\^([+−-]?\\d+)|([⁺⁻]?[⁰¹²³⁴-⁹]+)))(?:\\((\\d+(?:\\.\\d+)?)\\))?)?',
   'uy',
 );
 
@@ -32,26 +33,34 @@ const plainDigits = (text: string): string =>
 const tenTo = (power: number): Rational =>
   power < 0 ? rational(1n, 10n ** BigInt(-power)) : rational(10n ** BigInt(power));
 
-const MOST_DIGITS = 60;
+/** Digits of a number, and its largest power of ten either way. */
+export const MOST_DIGITS = 60;
 
 /** Brackets hold digits of the last places, `2.000(4)` is 0.004; with a point they hold the value, `20.0(1.2)`. */
 const bracketed = (text: string, lastDigit: Rational): Rational =>
   text.includes('.') ? rationalFromText(text) : rationalFromText(text).mul(lastDigit);
 
-/** The number that a match of `NUMBER_PATTERN` spells; undefined for no digits or an absurd length. */
-export const numberFromMatch = (match: RegExpExecArray): WrittenNumber | undefined => {
-  const [, sign = '', whole = '', decimals = '', uncertainty, ...exponents] = match as readonly (string | undefined)[];
+/** Why a text that looks like a number is none of use. */
+export type NumberFault = 'no-digits' | 'too-many-digits' | 'out-of-range' | 'two-uncertainties';
+
+/** The number that a match of `NUMBER_PATTERN` spells, or why it is of no use. */
+export const numberFromMatch = (match: RegExpExecArray): WrittenNumber | NumberFault => {
+  const [, sign = '', whole = '', decimals = '', inside, plain, raised, superscript, behind] = match as readonly (
+    string | undefined
+  )[];
   const digits = whole.replace(/\D/gu, '');
-  const exponent = Number(plainDigits(exponents.find((text) => text !== undefined) ?? '0'));
-  if (digits + decimals === '' || digits.length + decimals.length > MOST_DIGITS) return undefined;
-  if (Math.abs(exponent) > MOST_DIGITS) return undefined;
+  const exponent = Number(plainDigits(plain ?? raised ?? superscript ?? '0'));
+  if (digits + decimals === '') return 'no-digits';
+  if (digits.length + decimals.length > MOST_DIGITS) return 'too-many-digits';
+  if (Math.abs(exponent) > MOST_DIGITS) return 'out-of-range';
+  if (inside !== undefined && behind !== undefined) return 'two-uncertainties';
   const size = rationalFromText(`${digits === '' ? '0' : digits}.${decimals}`).mul(tenTo(exponent));
-  const lastDigit = tenTo(exponent - decimals.length);
+  const uncertainty = inside ?? behind;
   return {
     value: sign === '' || sign === '+' ? size : size.neg(),
     uncertainty:
       uncertainty === undefined ? null : bracketed(uncertainty, tenTo(-decimals.length)).mul(tenTo(exponent)),
-    lastDigit,
+    lastDigit: tenTo(exponent - decimals.length),
   };
 };
 

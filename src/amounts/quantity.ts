@@ -3,7 +3,8 @@ import { type Note, note } from '../report/note.ts';
 import { type Result, chain, failure, success, withNotes } from '../report/result.ts';
 import { type Span, shiftSpan, spanOf, wholeSpan } from '../report/span.ts';
 import { type Dimension, NUMBER, TEMPERATURE, sameDimension } from './dimension.ts';
-import { type WrittenNumber, NUMBER_PATTERN, numberFromMatch, toFloat } from './number.ts';
+import { toFloat } from './number.ts';
+import { type Segment, badNumber, segmentsOf } from './segments.ts';
 import { type UnitValue, readUnitText } from './unit-expression.ts';
 
 /** What a quantity text may measure: its name in faults, the dimensions it may have, a unit to propose. */
@@ -26,59 +27,8 @@ export interface ReadQuantity {
   readonly dimension: Dimension;
 }
 
-/** A number and its unit inside the text; places are UTF-16 offsets. */
-interface Segment {
-  readonly number: WrittenNumber;
-  readonly unitText: string;
-  readonly at: number;
-  readonly unitAt: number;
-  readonly end: number;
-}
-
 const LONGEST = 200;
 const PLUS_MINUS = /±|\+\/[-−]|\+-/u;
-/** A unit after its number: a unit of time straight before the next digit (1h30min), else up to the next number. */
-const UNIT_TEXT = /\s*(?:(min|d|h|s)(?=\d)|(.*?)(?=\s+[+−-]?\.?\d|$))\s*/uy;
-
-const badNumber = (text: string, from: number, to: number): Result<never> => {
-  const hint = /\d,\d/u.test(text)
-    ? 'Write the decimal sign as a point and separate thousands by blanks: 1 250.5 A.'
-    : 'Write a number and its unit, as in 250 A, 1 h 30 min, 96 %, 2.000(4) A or 2.000 A ± 0.004 A.';
-  return failure({ code: 'bad-ask', message: 'this is no quantity', span: spanOf(text, from, to), hint });
-};
-
-const numberAt = (text: string, at: number): { readonly number: WrittenNumber; readonly end: number } | undefined => {
-  NUMBER_PATTERN.lastIndex = at;
-  const match = NUMBER_PATTERN.exec(text);
-  const number = match === null ? undefined : numberFromMatch(match);
-  return match === null || number === undefined ? undefined : { number, end: at + match[0].length };
-};
-
-/**
- * One segment from offset `at`.   1 h 30 min
- *                                     ^      */
-const segmentAt = (text: string, at: number): Segment | undefined => {
-  const found = numberAt(text, at);
-  if (found === undefined) return undefined;
-  UNIT_TEXT.lastIndex = found.end;
-  const match = UNIT_TEXT.exec(text);
-  const unitText = (match?.[1] ?? match?.[2] ?? '').trim();
-  const unitAt = text.indexOf(unitText, found.end);
-  return { number: found.number, unitText, at, unitAt, end: found.end + (match?.[0].length ?? 0) };
-};
-
-/** The segments of `view`, which is `text` with blanks where something else was read: every offset stays. */
-const segmentsOf = (text: string, view = text): Result<readonly Segment[]> => {
-  const segments: Segment[] = [];
-  let at = view.length - view.trimStart().length;
-  do {
-    const segment = segmentAt(view, at);
-    if (segment === undefined || /^[,;]/u.test(segment.unitText)) return badNumber(text, at, view.length);
-    segments.push(segment);
-    at = segment.end;
-  } while (at < view.length);
-  return success(segments);
-};
 
 const wrongUnit = (measurand: Measurand, unitText: string, span: Span): Result<never> =>
   failure({
@@ -150,7 +100,7 @@ const addSegment = (sum: Sum | undefined, { number }: Segment, unit: UnitValue, 
   const exact = inUnit(number.value, unit);
   return {
     exact: sum === undefined ? exact : sum.exact.add(exact),
-    uncertainty: (number.uncertainty ?? ZERO).mul(unit.factor),
+    uncertainty: number.uncertainty?.mul(unit.factor) ?? sum?.uncertainty ?? ZERO,
     lastDigit: number.lastDigit.mul(unit.factor),
     unit,
     unitText,
@@ -181,12 +131,12 @@ const PERCENT = new Set(['%', 'percent', 'pct']);
 /** The size of `± …` in SI units: percent of the reading, or percentage points where the value is a percentage. */
 const spreadOf = (measurand: Measurand, sum: Sum, text: string, right: Segment): Result<Rational> => {
   const { number, unitText, unitAt } = right;
-  if (unitText === '') return success(number.value.mul(sum.unit.factor).abs());
+  if (unitText === '') return success(number.value.mul(sum.unit.factor));
   const percentage = PERCENT.has(sum.unitText);
   if (PERCENT.has(unitText) && !percentage)
     return success(sum.reading.mul(number.value).mul(rationalFromText('0.01')).abs());
   const unit = unitFor(measurand, unitText, text, unitAt);
-  return chain(unit, ({ factor }) => success(number.value.mul(factor).abs()));
+  return chain(unit, ({ factor }) => success(number.value.mul(factor)));
 };
 
 const readSpread = (measurand: Measurand, text: string, at: number, length: number): Result<Sum> => {
@@ -202,10 +152,23 @@ const readSpread = (measurand: Measurand, text: string, at: number, length: numb
   if (!right.ok) return right;
   const [spread, more] = right.value;
   if (spread === undefined || more !== undefined) return badNumber(text, at, text.length);
+  if (spread.number.value.compare(0) < 0)
+    return badNumber(text, spread.at, spread.end, 'an uncertainty cannot be negative');
+  if ([...left.value, spread].some(({ number }) => number.uncertainty !== null))
+    return badNumber(text, 0, text.length, 'this number has two uncertainties');
   const sum = sumOf(measurand, text, left.value, spread.unitText);
   if (!sum.ok) return sum;
   const size = spreadOf(measurand, sum.value, text, spread);
   return size.ok ? withNotes(success({ ...sum.value, uncertainty: size.value }), sum.notes) : size;
+};
+
+/** A part of a whole as a fraction: 24/25. */
+const FRACTION = /^\s*\d{1,60}\/0*[1-9]\d{0,59}\s*$/u;
+
+const fractionOf = (text: string): Sum => {
+  const exact = rationalFromText(text);
+  const unit = { dimension: NUMBER, factor: ONE, offset: ZERO };
+  return { exact, uncertainty: ZERO, lastDigit: ZERO, unit, unitText: '', reading: exact };
 };
 
 const readSum = (measurand: Measurand, text: string): Result<Sum> => {
@@ -218,6 +181,7 @@ const readSum = (measurand: Measurand, text: string): Result<Sum> => {
     });
   if (text.length > LONGEST)
     return failure({ code: 'too-long', message: 'this is too long for a quantity', span: wholeSpan(text) });
+  if (measurand.bare === true && FRACTION.test(text)) return success(fractionOf(text.trim()));
   const sign = PLUS_MINUS.exec(text);
   if (sign !== null) return readSpread(measurand, text, sign.index, sign[0].length);
   return chain(segmentsOf(text), (segments) => sumOf(measurand, text, segments, ''));
@@ -225,7 +189,7 @@ const readSum = (measurand: Measurand, text: string): Result<Sum> => {
 
 /**
  * Reads a quantity text: "250 A", "1 h 30 min", "96 %", "2.000(4) A", "2.000 A ± 0.004 A", "(2.000 ± 0.004) A",
- * "2 A ± 1 %". What follows ± is one standard uncertainty: percentage points on a percentage, a fraction of the reading
+ * "2 A ± 1 %", and "24/25" for a part of a whole. What follows ± is one standard uncertainty: percentage points on a percentage, a fraction of the reading
  * elsewhere, kelvins on °C. Notes: `unit-reading`. Faults, each with its place in the text: `empty`, `too-long`,
  * `bad-ask` (no quantity), `unknown-unit` (no unit, an unknown one, one with several meanings, or of another dimension).
  */

@@ -62,7 +62,7 @@ const TABLE: readonly (readonly [Dimension, string])[] = [
     MASS,
     `~g:0.001; gram grams gramme grammes:0.001; kilogram kilograms kilo kilos:1; ~t:1000; tonne tonnes:1000;
     lb lbs lb_av pound pounds:0.45359237; lb_t:0.3732417216; oz_av:0.028349523125; oz_t ozt:0.0311034768;
-    gr grain grains:0.00006479891; dwt:0.00155517384; ton_short ton_us:907.18474; ton_long ton_imp:1016.0469088;
+    grain grains:0.00006479891; dwt:0.00155517384; ton_short ton_us:907.18474; ton_long ton_imp:1016.0469088;
     ct carat:0.0002`,
   ],
   [
@@ -157,6 +157,7 @@ export const AMBIGUOUS_UNITS: ReadonlyMap<string, string> = new Map([
   ['floz', 'fl_oz_us (29.5735295625 mL) or fl_oz_imp (28.4130625 mL)'],
   ['ton', 't (1000 kg), ton_short (907.18474 kg) or ton_long (1016.0469088 kg)'],
   ['tons', 't (1000 kg), ton_short (907.18474 kg) or ton_long (1016.0469088 kg)'],
+  ['gr', 'g (gram) or grain (64.79891 mg)'],
   ['cal', 'cal_th (4.184 J) or cal_it (4.1868 J)'],
   ['kcal', 'kcal_th (4184 J) or kcal_it (4186.8 J)'],
   ['hp', 'hp_mech (550 ft lbf/s) or hp_metric (75 kgf m/s)'],

@@ -17,6 +17,7 @@ interface FaultCase {
   readonly code: string;
   readonly span: readonly [number, number];
   readonly hint?: string;
+  readonly message?: string;
 }
 const file = readFileSync(new URL('../../fixtures/amounts/quantity-texts.yaml', import.meta.url), 'utf8');
 const cases = parse(file) as { readonly read: readonly ReadCase[]; readonly faults: readonly FaultCase[] };
@@ -37,12 +38,13 @@ describe('a quantity text', () => {
 
   it.each(cases.faults)(
     'refuses "$text" as a $of and points at it',
-    ({ of, text, code, span: [from, to], hint = '' }) => {
+    ({ of, text, code, span: [from, to], hint = '', message = '' }) => {
       const result = read(of, text);
       if (result.ok) throw new Error(`read as ${String(result.value.value)}`);
       expect(result.fault.code).toBe(code);
       expect(result.fault.span).toEqual({ from, to });
       expect(result.fault.hint ?? '').toContain(hint);
+      expect(result.fault.message).toContain(message);
     },
   );
 
