@@ -47,6 +47,9 @@ const eliminateFractions = (matrix: readonly (readonly Rational[])[]): readonly 
   return rows;
 };
 
+/** Long runs are few: enough to compare, and all benchmarks end in a few minutes. */
+const BRIEFLY = { time: 200, iterations: 2, warmupTime: 0, warmupIterations: 1 };
+
 const SIZES = [
   [2, 3],
   [4, 6],
@@ -60,9 +63,13 @@ const SIZES = [
 
 describe.each(SIZES)('null space of %i rows', (rows, columns) => {
   const matrix = composition(rows, columns);
-  bench(`${String(columns)} columns`, () => {
-    nullSpace(matrix, columns);
-  });
+  bench(
+    `${String(columns)} columns`,
+    () => {
+      nullSpace(matrix, columns);
+    },
+    BRIEFLY,
+  );
 });
 
 describe.each([
@@ -101,7 +108,11 @@ describe.each([
   bench('minimal', () => {
     minimalSolutions(matrix, []);
   });
-  bench('irreducible, within bounds', () => {
-    hilbertBasis(matrix, [], startMeter({ vectors: 500, steps: 500_000, digits: 100 }));
-  });
+  bench(
+    'irreducible, within bounds',
+    () => {
+      hilbertBasis(matrix, [], startMeter({ vectors: 500, steps: 500_000, digits: 100 }));
+    },
+    BRIEFLY,
+  );
 });
