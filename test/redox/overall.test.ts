@@ -61,6 +61,19 @@ describe('couplings', () => {
     expect(couplings('PbS + O3 -> PbSO4 + O2', 'none')[0]).toBe('if 1 O3 gives 1 O2: PbS + 4 O3 -> PbSO4 + 4 O2 (8)');
   });
 
+  it('put a ratio of products before an independent helper that takes no part', () => {
+    // from memory: chlorine on thiosulfate
+    expect(couplings('S2O3^2- + Cl2 -> SO4^2- + S + Cl^-', 'acid')[0]).toMatch(
+      /^if SO4\^2- and S form one to one: S2O3\^2- \+ Cl2 \+ H2O -> SO4\^2- \+ S \+ 2 Cl\^- \+ 2 H\^\+ /,
+    );
+  });
+
+  it('let no electrons go in a circle between two reactants of one element', () => {
+    for (const skeleton of ['O3 + NO -> NO2 + O2', 'O3 + SO2 -> SO3 + O2', 'CO + O3 -> CO2 + O2']) {
+      expect(couplings(skeleton, 'none')).toHaveLength(1);
+    }
+  });
+
   it('are left out, and the family still listed, where far too much is open', () => {
     const fuels = Array.from({ length: 40 }, (_, index) => `C${String(index + 1)}H${String(2 * index + 4)}`);
     const fault = faultWith(overall(`${fuels.join(' + ')} + O2 -> CO + CO2 + H2O`, 'none'), 'several-balances');

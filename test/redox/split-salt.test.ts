@@ -36,6 +36,8 @@ describe('the ions of a salt', () => {
     ['NaOCl', '1 Na^+ + 1 OCl^-'],
     ['Ca(ClO)2', '1 Ca^2+ + 2 ClO^-'],
     ['Na2O2', '2 Na^+ + 1 O2^2-'],
+    ['Na2O', '2 Na^+ + 1 O^2-'],
+    ['CaO', '1 Ca^2+ + 1 O^2-'],
     ['NaBiO3', '1 Na^+ + 1 BiO3^-'],
     ['Ba(OH)2', '1 Ba^2+ + 2 OH^-'],
     ['Cu(NH3)4SO4', '1 Cu(NH3)4^2+ + 1 SO4^2-'],
@@ -97,6 +99,8 @@ describe('what dissolves', () => {
     'CuI',
     'Fe2O3',
     'H2C2O4',
+    'Na2O',
+    'CaO',
   ])('%s does not, or stays whole', (text) => {
     expect(dissolvedIons(plain(text))).toBeNull();
   });

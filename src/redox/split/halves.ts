@@ -6,7 +6,7 @@ import { hasTwoStates, sumOfTerms, termsOf } from './amounts.ts';
 import { type SplitHalf, completeTerms, electronsOf, halfOfTerms, helpersOf } from './complete.ts';
 import { type Background, type Component, backgroundOf, componentsOf, sidesOf } from './components.ts';
 import { divide } from './divide.ts';
-import { elementsOf, flowsOf } from './flows.ts';
+import { type Flow, elementsOf, flowsOf } from './flows.ts';
 import { ionicForms } from './forms.ts';
 import type { IonicReaction } from './ionic.ts';
 
@@ -43,9 +43,11 @@ const splitIonic = ({ amounts, medium }: IonicReaction, hosts: Reaction | null):
   const oxidised: Term[] = [];
   const reduced: Term[] = [];
   const bystanders: Component[] = [];
+  let given = ZERO;
   for (const component of components) {
     const parts = partsOf(component, background, medium);
     if (parts === null) return null;
+    given = given.add(parts.given);
     oxidised.push(...parts.oxidised);
     reduced.push(...parts.reduced);
     if (parts.oxidised.length + parts.reduced.length === 0) bystanders.push(component);
@@ -56,7 +58,6 @@ const splitIonic = ({ amounts, medium }: IonicReaction, hosts: Reaction | null):
     (meets(oxidised) && !meets(reduced) ? oxidised : reduced).push(...one.terms);
   }
   const halves = joined(oxidised, reduced, { amounts, medium });
-  const given = components.reduce((sum, component) => sum.add(givenBy(component, background)), ZERO);
   return halves === null || !decided || halves.electrons.equals(given) ? halves : null;
 };
 
@@ -76,31 +77,37 @@ const stoodTogether = (
   });
 };
 
-/** Electrons that the oxidised atoms of a component give, by their oxidation numbers. */
-const givenBy = (component: Component, background: Background): Rational => {
-  const sides = sidesOf(component, background);
-  return component.flows
-    .filter((_, at) => sides[at] === 1n)
-    .reduce((sum, flow) => sum.add(flow.to.sub(flow.from).mul(flow.atoms)), ZERO);
-};
-
 interface Parts {
   readonly oxidised: readonly Term[];
   readonly reduced: readonly Term[];
+  /** Electrons that the oxidised part gives, by the oxidation numbers. */
+  readonly given: Rational;
 }
 
-/** A component goes to one half as a whole, or is divided, or exchanges no electrons and goes to neither. */
+/**
+ * A component in which some atoms are oxidised and others reduced is divided; one that cannot be, and any other, goes to
+ * one half as a whole by the electrons that it exchanges with the others, and to neither if with none.
+ */
 const partsOf = (component: Component, background: Background, medium: Medium): Parts | null => {
   const completed = completeTerms(component.terms, medium);
   if (completed === null) return null;
+  const { flows, terms } = component;
   const sides = sidesOf(component, background);
-  if (sides.includes(1n) && sides.includes(-1n)) return divide(component, sides, background);
-  const given = signOf(electronsOf(completed));
+  const net = signOf(electronsOf(completed));
+  const isMixed = sides.includes(1n) && sides.includes(-1n);
+  const divided = isMixed ? divide(component, sides, background) : null;
+  if (divided !== null) return { ...divided, given: gainOf(flows.filter((_, at) => sides[at] === 1n)) };
+  if (isMixed && net === 0n) return null;
+  const gain = gainOf(flows);
   return {
-    oxidised: given > 0n ? component.terms : [],
-    reduced: given < 0n ? component.terms : [],
+    oxidised: net > 0n ? terms : [],
+    reduced: net < 0n ? terms : [],
+    given: signOf(gain) > 0n ? gain : ZERO,
   };
 };
+
+const gainOf = (flows: readonly Flow[]): Rational =>
+  flows.reduce((sum, flow) => sum.add(flow.to.sub(flow.from).mul(flow.atoms)), ZERO);
 
 /** Both parts completed; they must exchange electrons one for one and give the ionic reaction back. */
 const joined = (oxidised: readonly Term[], reduced: readonly Term[], ionic: IonicReaction): Halves | null => {
