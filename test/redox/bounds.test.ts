@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { answer } from '../../src/desk/answer.ts';
 import { residualOf } from '../../src/balance/recount.ts';
 import { USUAL_BOUNDS } from '../../src/exact/bounds.ts';
-import { MOST_SHOWN } from '../../src/redox/several.ts';
+import { MOST_SHOWN } from '../../src/redox/coupling/several.ts';
 import { plainEquation } from '../support/plain.ts';
 
 /** CH4, C2H6 and so on: `count` paraffins from the one of `from` carbon atoms on. */
