@@ -65,7 +65,7 @@ const equivalentOf = (
 };
 
 /** Everything known of one other species for the same charge. */
-const knownOf = (stake: Stake, problem: Problem, derived: Derived, parts: Parts['parts'], tank: boolean): Known => {
+const knownOf = (stake: Stake, problem: Problem, derived: Derived, parts: Parts['parts']): Known => {
   const equivalent = equivalentOf(stake, problem, parts);
   if (equivalent === undefined) return new Map();
   const [efficiency, faraday] = equivalent;
@@ -79,7 +79,7 @@ const knownOf = (stake: Stake, problem: Problem, derived: Derived, parts: Parts[
   }
   const mass = problem.weigh(stake.species);
   if (mass !== undefined) start.set('molar_mass', mass);
-  const gas = !tank && gasKind(stake.species) !== 'no-gas';
+  const gas = gasKind(stake.species) !== 'no-gas';
   return derive(start, speciesRelations({ volume: gas ? 'gas' : 'none', areal: false })).known;
 };
 
@@ -102,17 +102,12 @@ export interface Companion {
 }
 
 /** Every other species for the same charge, in the order of the reactions. */
-export const companionsOf = (
-  problem: Problem,
-  derived: Derived,
-  { parts }: Parts,
-  tank: boolean,
-): readonly Companion[] =>
+export const companionsOf = (problem: Problem, derived: Derived, { parts }: Parts): readonly Companion[] =>
   problem.stakes
     .filter((stake) => stake !== problem.asked)
     .map((stake) => ({
       stake,
-      known: knownOf(stake, problem, derived, parts, tank),
+      known: knownOf(stake, problem, derived, parts),
       shared: splitsCurrent(problem) && stake.parts.length === 1,
     }));
 

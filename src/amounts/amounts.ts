@@ -5,7 +5,7 @@ import { type AnswerUnits, type Quantity, readWanted, showQuantities } from './a
 import { budgetsOf } from './budget.ts';
 import { deriveAll } from './derivation.ts';
 import { checkEnough } from './enough.ts';
-import { type GivenReadings, convertGiven, readGivenTexts, speaksOfTank } from './given.ts';
+import { type GivenReadings, convertGiven, readGivenTexts } from './given.ts';
 import type { Measured } from './measured.ts';
 import { amountNotes } from './notes.ts';
 import { type Problem, electronsPerMole, setUp } from './problem.ts';
@@ -83,7 +83,7 @@ const workOut = (request: AmountsRequest, { readings, units, series }: Texts, pr
     chain(deriveAll(problem, given, series), (solved) => {
       const derived = withUnitArea(solved);
       const parts = partsOf(problem, derived);
-      const companions = companionsOf(problem, derived, parts, speaksOfTank(request.given));
+      const companions = companionsOf(problem, derived, parts);
       return success({ request, problem, given, derived, parts, companions, units });
     }),
   );

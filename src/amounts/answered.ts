@@ -82,10 +82,10 @@ const inUnit = (measured: Measured, { text, unit }: AnswerUnit, correlations: re
   return { value, unit: text, ...(uncertainty > NEGLIGIBLE * Math.abs(value) ? { uncertainty } : {}) };
 };
 
-/** Mass concentrations weigh the species; a normal volume is an amount; all else stands as it is. */
+/** Mass concentrations weigh the species; a normal volume is that of a gas; all else stands as it is. */
 const toAnswer = (name: QuantityName, known: Known, unit: UnitValue): Measured | undefined => {
   const value = known.get(name);
-  if (name === 'volume' && sameDimension(unit.dimension, AMOUNT)) return known.get('amount');
+  if (name === 'volume' && sameDimension(unit.dimension, AMOUNT)) return known.get('normal');
   if ((name !== 'from' && name !== 'to') || !sameDimension(unit.dimension, DENSITY)) return value;
   const mass = known.get('molar_mass');
   return value === undefined || mass === undefined ? undefined : times(value, mass);

@@ -1,11 +1,10 @@
 import { type Note, note } from '../report/note.ts';
-import { type Result, chain, failure, success } from '../report/result.ts';
+import { type Result, all, chain, failure, success } from '../report/result.ts';
 import { wholeSpan } from '../report/span.ts';
 import { gasKind } from './gases.ts';
 import type { Given } from './given.ts';
 import { type Measured, exactly } from './measured.ts';
 import { type Problem, allowsDefault, constantsOf, writtenEfficiency } from './problem.ts';
-import { QUANTITIES, isQuantityName } from './quantities.ts';
 import {
   FLOW_RELATIONS,
   type Relation,
@@ -13,7 +12,9 @@ import {
   type VariableName,
   speciesRelations,
 } from './relations.ts';
+import { checkDivisions, checkValues, nameOf } from './sense.ts';
 import { type Check, type Derivation, type Known, checksOf, compareValues, derive } from './solver.ts';
+import { checkTank, tankDirection } from './tank-direction.ts';
 
 /** All that follows from what was given, and what was taken for granted on the way. */
 export interface Derived {
@@ -23,22 +24,6 @@ export interface Derived {
   /** Names whose value nobody gave: no blank, a dry gas, 100 %. */
   readonly assumed: ReadonlySet<VariableName>;
 }
-
-const valueOf = (given: readonly Given[], name: VariableName): number | undefined =>
-  given.find((one) => one.name === name)?.measured.value;
-
-/**
- * Which way the concentration of a tank goes. What is used up falls. A metal that is made is counted as what leaves the
- * solution, anything else that is made rises, unless both concentrations say otherwise.
- */
-const tankDirection = (problem: Problem, given: readonly Given[]): 'falls' | 'rises' => {
-  if (problem.equivalence.sign < 0) return 'falls';
-  const from = valueOf(given, 'from');
-  const to = valueOf(given, 'to');
-  if (from !== undefined && to !== undefined) return to > from ? 'rises' : 'falls';
-  const { composition, charge } = problem.asked.species;
-  return composition.size === 1 && charge.equals(0) ? 'falls' : 'rises';
-};
 
 const volumeOf = (problem: Problem, given: readonly Given[]): RelationChoice['volume'] => {
   const has = (name: VariableName): boolean => given.some((one) => one.name === name);
@@ -106,13 +91,12 @@ const contradicted = (check: Check, given: readonly Given[]): Result<never> => {
     [...measured.slopes.keys()].some((own) => check.sources.includes(own)),
   );
   const named = involved.find(({ name }) => name === check.name) ?? involved.at(-1);
-  const what = isQuantityName(check.name) ? QUANTITIES[check.name].name : check.name;
   const unit = BASE_UNITS[check.name] ?? '';
   const known = `${show(check.known)} ${unit}`.trim();
   const found = `${show(check.found)} ${unit}`.trim();
   return failure({
     code: 'contradiction',
-    message: `${check.relation.formula}: ${what} is ${known} one way and ${found} the other`,
+    message: `${check.relation.formula}: ${nameOf(check.name)} is ${known} one way and ${found} the other`,
     ...(named === undefined ? { field: 'given' } : { field: named.field }),
     ...(named === undefined || named.text === '' ? {} : { span: wholeSpan(named.text) }),
     hint: `Given are ${involved.map(({ field }) => field).join(', ')}: correct one of them, or leave one out.`,
@@ -130,50 +114,67 @@ const judge = (derived: Derived, given: readonly Given[]): Result<Derived> => {
   return success(derived, notes.slice(0, 1));
 };
 
-/** Concentrations that go the wrong way: what is used up cannot rise. */
-const checkTank = (problem: Problem, given: readonly Given[]): Result<null> => {
-  const from = valueOf(given, 'from');
-  const to = given.find(({ name }) => name === 'to');
-  if (problem.equivalence.sign >= 0 || from === undefined || to === undefined || to.measured.value <= from)
-    return success(null);
-  return failure({
-    code: 'contradiction',
-    message: `${problem.asked.name} is used up, yet its concentration rises`,
-    field: to.field,
-    span: wholeSpan(to.text),
-    hint: 'from is the concentration at the start, to the one at the end.',
-  });
-};
-
 const WHOLE = exactly(1);
 const NONE = exactly(0);
 
-const solve = (problem: Problem, start: Known, relations: readonly Relation[]): Derived => {
+/** What follows with no blank and a dry gas where nothing else is said, before an efficiency is taken for granted. */
+const solve = (given: Known, relations: readonly Relation[]): Derived => {
   const assumed = new Set<VariableName>();
-  const known = new Map(start);
+  const start = new Map(given);
   for (const name of ['blank', 'vapour_pressure'] as const) {
-    if (known.has(name)) continue;
-    known.set(name, NONE);
+    if (start.has(name)) continue;
+    start.set(name, NONE);
     assumed.add(name);
   }
-  const first = derive(known, relations);
-  if (first.known.has('efficiency') || !allowsDefault(problem))
-    return { known: first.known, steps: first.derived, relations, assumed };
-  assumed.add('efficiency');
-  const second = derive(new Map([...first.known, ['efficiency', WHOLE]]), relations);
-  return { known: second.known, steps: [...first.derived, ...second.derived], relations, assumed };
+  const { known, derived } = derive(start, relations);
+  return { known, steps: derived, relations, assumed };
+};
+
+/** The same with an efficiency of 100 % where none follows and one may be taken. */
+const withDefault = (problem: Problem, derived: Derived): Derived => {
+  if (derived.known.has('efficiency') || !allowsDefault(problem)) return derived;
+  const { known, derived: steps } = derive(new Map([...derived.known, ['efficiency', WHOLE]]), derived.relations);
+  const assumed = new Set<VariableName>([...derived.assumed, 'efficiency']);
+  return { ...derived, known, steps: [...derived.steps, ...steps], assumed };
+};
+
+const normalVolume = (given: Given, message: string): Result<never> =>
+  failure({
+    code: 'unknown-unit',
+    message,
+    field: given.field,
+    span: wholeSpan(given.text),
+    hint: 'A normal volume counts a gas. Give a volume in L or m^3, or write the state of the species: (g).',
+  });
+
+/** Normal volumes are of a gas: neither a tank nor a solid has one. */
+const checkNormal = (problem: Problem, given: readonly Given[]): Result<null> => {
+  const normal = given.find(({ name }) => name === 'normal');
+  if (normal === undefined) return success(null);
+  const choice = volumeOf(problem, given);
+  if (choice === 'gas') return success(null);
+  return normalVolume(normal, choice === 'none' ? `${problem.asked.name} is no gas here` : 'a tank holds no gas');
 };
 
 /**
  * Derives all that follows for the species asked. `series` multiplies the charge (cells in series, bypass). Notes:
- * `surplus-agrees`. Fault: `contradiction` with both values, at one of the quantities that disagree.
+ * `surplus-agrees`. Faults: `contradiction` with both values, at one of the quantities that disagree, or where what
+ * follows cannot be; `unknown-unit` for the normal volume of what is no gas.
  */
 export const deriveAll = (problem: Problem, given: readonly Given[], series: Measured): Result<Derived> => {
   const start = new Map(constantsOf(problem, series));
   const written = writtenEfficiency(problem);
   if (written !== undefined) start.set('efficiency', written);
   const relations = relationsFor(problem, given, series);
-  return chain(checkTank(problem, given), () =>
-    chain(gather(start, given), (known) => judge(solve(problem, known, relations), given)),
+  return chain(all([checkTank(problem, given), checkNormal(problem, given)]), () =>
+    chain(gather(start, given), (known) => {
+      const first = solve(known, relations);
+      const derived = withDefault(problem, first);
+      return chain(judge(derived, given), () =>
+        chain(checkDivisions(relations, first.known, given), () =>
+          chain(checkValues(derived.known, given), () => success(derived)),
+        ),
+      );
+    }),
   );
 };

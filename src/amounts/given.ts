@@ -73,7 +73,7 @@ const isMoles = (name: QuantityName, read: ReadQuantity, text: string): boolean 
 
 const asVariable = (name: QuantityName, read: ReadQuantity): VariableName => {
   if (name === 'share') return 'efficiency';
-  return name === 'volume' && sameDimension(read.dimension, AMOUNT) ? 'amount' : name;
+  return name === 'volume' && sameDimension(read.dimension, AMOUNT) ? 'normal' : name;
 };
 
 const giveOne = (name: QuantityName, text: string): Result<GivenReading> => {

@@ -3,7 +3,8 @@ import type { QuantityName } from './quantities.ts';
 /**
  * What relations speak of besides the quantities of the contract: `working` charge of all cells, `net` of the blank;
  * `series`: number of cells times what does not bypass; `faraday`: charge per mole of the species, F z / |nu|;
- * `molar_mass`; `gas_constant`; `dry` partial pressure; `drop` in concentration; per area `charge_density`.
+ * `molar_mass`; `gas_constant`; `dry` partial pressure; `drop` in concentration; per area `charge_density`; `normal`
+ * volume of a gas, counted in mol.
  */
 export type HiddenName =
   | 'working'
@@ -15,7 +16,8 @@ export type HiddenName =
   | 'dry'
   | 'drop'
   | 'charge_density'
-  | 'areal';
+  | 'areal'
+  | 'normal';
 
 export type VariableName = QuantityName | HiddenName;
 
@@ -77,6 +79,8 @@ const GAS = relation('product', 'V = n R T / (p - p_w)', {
   dry: -1,
 });
 
+const NORMAL_GAS = relation('product', 'n = p° V° / (R T°)', { amount: -1, normal: 1 });
+
 const THICKNESS: readonly Relation[] = [
   relation('product', 'd = m / (ρ A)', { thickness: -1, mass: 1, density: -1, area: -1 }),
 ];
@@ -105,7 +109,7 @@ export interface RelationChoice {
 /** The relations of one species, in the order in which they are tried. */
 export const speciesRelations = ({ volume, areal }: RelationChoice): readonly Relation[] => [
   ...SPECIES_RELATIONS,
-  ...(volume === 'gas' ? [GAS] : []),
+  ...(volume === 'gas' ? [GAS, NORMAL_GAS] : []),
   ...(volume === 'falls' || volume === 'rises' ? tank(volume === 'rises') : []),
   ...THICKNESS,
   ...(areal ? AREAL : []),

@@ -113,6 +113,9 @@ const sourcesOf = (difference: Measured, scale: number): readonly Source[] =>
     .filter(([source, slope]) => Math.abs(slope * (source.value === 0 ? 1 : source.value)) > ROUNDING * scale)
     .map(([source]) => source);
 
+/** Whether a value that is small beside `scale` may be 0, by its digits and uncertainties. */
+export const isNearZero = (value: Measured, scale: number): boolean => agree(value, scale, sourcesOf(value, scale));
+
 /** Whether two values of one quantity agree, and the inputs on which their difference depends. */
 export const compareValues = (
   known: Measured,
