@@ -29,10 +29,11 @@ export interface Flows {
 /**
  * Which atoms change their oxidation number. For each element, what keeps its number is struck out first; the rest is
  * matched in rising order, the lowest number used with the lowest formed, so that numbers do not cross. Atoms of several
- * species with one number share in each change by their amounts. An element that stands in a species whose oxidation
+ * species with one number share in each change by their amounts; or, with `rank`, those of the lowest rank go to the lowest
+ * number and so on, as with S2O8^2- and H2O2, of which only one becomes oxygen. An element that stands in a species whose oxidation
  * numbers convention leaves open is left out.
  */
-export const flowsOf = (terms: readonly Term[]): Flows => {
+export const flowsOf = (terms: readonly Term[], rank?: (species: Species) => number): Flows => {
   const numbered = terms.map((term) => ({ term, numbers: oxidationNumbers(term.species) }));
   const open = new Set(
     numbered.flatMap(({ term, numbers }) => (numbers.kind === 'undecided' ? elementsOf(term.species) : [])),
@@ -48,7 +49,7 @@ export const flowsOf = (terms: readonly Term[]): Flows => {
         atoms: (counts[at] ?? ZERO).mul(term.nu.abs()),
       }));
     });
-  const flows = elements.flatMap((element) => matched(element, sitesOf(element, -1n), sitesOf(element, 1n)));
+  const flows = elements.flatMap((element) => matched(element, sitesOf(element, -1n), sitesOf(element, 1n), rank));
   return { flows, decided: open.size === 0 };
 };
 
@@ -73,9 +74,15 @@ const levelsOf = (sites: readonly Site[]): readonly Level[] => {
   });
 };
 
-const matched = (element: string, used: readonly Site[], formed: readonly Site[]): readonly Flow[] => {
-  const [sources, sinks] = [levelsOf(used), levelsOf(formed)];
-  return transport(withoutKept(sources, sinks), withoutKept(sinks, sources)).flatMap(({ source, sink, atoms }) =>
+const matched = (
+  element: string,
+  used: readonly Site[],
+  formed: readonly Site[],
+  rank: ((species: Species) => number) | undefined,
+): readonly Flow[] => {
+  const kept = withoutKept(levelsOf(used), levelsOf(formed));
+  const sources = rank === undefined ? kept : kept.flatMap((level) => apart(level, rank));
+  return transport(sources, withoutKept(levelsOf(formed), levelsOf(used))).flatMap(({ source, sink, atoms }) =>
     source.sites.flatMap((from) =>
       sink.sites.map((to) => ({
         element,
@@ -88,6 +95,12 @@ const matched = (element: string, used: readonly Site[], formed: readonly Site[]
     ),
   );
 };
+
+/** A level as one for each of its sites, the lowest rank first. */
+const apart = (level: Level, rank: (species: Species) => number): readonly Level[] =>
+  level.sites
+    .toSorted((a, b) => rank(a.species) - rank(b.species))
+    .map((site) => ({ number: level.number, sites: [site], atoms: level.atoms.mul(partOf(site, level)) }));
 
 /** The part that a site has of the atoms with its number. */
 const partOf = (site: Site, level: Level): Rational =>

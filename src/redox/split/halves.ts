@@ -1,5 +1,6 @@
 import type { Reaction, Term } from '../../balance/reaction.ts';
 import { type Rational, ONE, ZERO, isZero, signOf } from '../../exact/rational.ts';
+import type { Species } from '../../species/species.ts';
 import { HYDROXIDE, PROTON, WATER } from '../media.ts';
 import type { Medium } from '../medium.ts';
 import { hasTwoStates, sumOfTerms, termsOf } from './amounts.ts';
@@ -25,20 +26,31 @@ export interface Halves {
 export const halvesOf = (reaction: Reaction, medium: Medium): Halves | null => {
   if (hasTwoStates(reaction)) return null;
   const forms = ionicForms(reaction, medium);
-  for (const hosts of [null, reaction]) {
+  const tries = [
+    { hosts: null, ranked: false },
+    { hosts: null, ranked: true },
+    { hosts: reaction, ranked: false },
+  ];
+  for (const { hosts, ranked } of tries) {
     for (const form of forms) {
-      const found = splitIonic(form, hosts);
+      const found = splitIonic(form, hosts, ranked);
       if (found !== null) return found;
     }
   }
   return null;
 };
 
-/** `hosts`: the reaction whose formulas say with which half bystanders go; null: there may be none. */
-const splitIonic = ({ amounts, medium }: IonicReaction, hosts: Reaction | null): Halves | null => {
+/**
+ * `hosts`: the reaction whose formulas say with which half bystanders go; null: there may be none. `ranked`: of species that
+ * hold like atoms those with elements of their own are reduced rather than those of the medium's elements, S2O8^2- before
+ * H2O2.
+ */
+const splitIonic = ({ amounts, medium }: IonicReaction, hosts: Reaction | null, ranked: boolean): Halves | null => {
   const terms = termsOf(amounts);
   const background = backgroundOf(helpersOf(medium));
-  const { flows, decided } = flowsOf(terms);
+  const rank = (species: Species): number =>
+    elementsOf(species).some((element) => !background.elements.has(element)) ? 0 : 1;
+  const { flows, decided } = flowsOf(terms, ranked ? rank : undefined);
   const components = componentsOf(terms, flows, { ...background, keys: new Set(medium.helpers.map(({ key }) => key)) });
   const oxidised: Term[] = [];
   const reduced: Term[] = [];
