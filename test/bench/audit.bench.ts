@@ -9,7 +9,7 @@ import { publishedEquilibria, publishedHalves } from '../audit/published.ts';
 import { plainEquation } from '../support/plain.ts';
 
 /** Equations of a stream: published ones as they are printed, every second one with a planted mistake. */
-const STREAM_LENGTH = 50_000;
+const STREAM_LENGTH = 100_000;
 
 const halves = publishedHalves().map((text) => plainEquation(text.replace('(s,red)', '(s)')));
 const balanced = [...halves, ...publishedEquilibria().map(plainEquation), ...overallReactions(halves, 137)].filter(
