@@ -75,7 +75,7 @@ const productsOf = (unknowns: readonly Unknown[], { pair, halves }: PairWithHalv
   const change = isOxidation ? pair.oxidation : pair.reduction;
   const numbers = (isOxidation ? halves.oxidation : halves.reduction) ?? pair.numbers;
   const lesser = change.transitions.some(({ from }) => from.odd) ? lesserForm(unknowns, change.index) : undefined;
-  const holding = unknowns.filter(
+  const holding = halves.unknowns.filter(
     (unknown, index) => (numbers[index] ?? 0n) > 0n && (index === lesser || holdsTarget(unknown, change)),
   );
   const written = holding.filter((unknown) => unknown.written);
