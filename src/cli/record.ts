@@ -5,7 +5,8 @@ import { renderRecord } from '../render/record.ts';
 import { lookFor } from './look.ts';
 import type { Showing } from './outcome.ts';
 import { progressOn } from './progress.ts';
-import { type ExitCode, type World, bytesOf } from './world.ts';
+import { textBytes } from './text-file.ts';
+import type { ExitCode, World } from './world.ts';
 
 /** The text that a fault of an option points into. */
 const optionText = (options: RecordOptions, field: string | undefined): string | null => {
@@ -23,7 +24,7 @@ export const showRecord = async (
 ): Promise<ExitCode> => {
   const size = path === '-' ? undefined : await world.sizeOf?.(path);
   const progress = progressOn(world, size);
-  const record = await readRecordStream(bytesOf(world, path), options, progress.read).finally(progress.done);
+  const record = await readRecordStream(textBytes(world, path), options, progress.read).finally(progress.done);
   const look = lookFor(world, showing.plain);
   if (showing.json === true) {
     const shown = record.ok ? { record: record.value } : { fault: record.fault };

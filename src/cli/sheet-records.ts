@@ -3,7 +3,8 @@ import { readRecordStream } from '../amounts/record-stream.ts';
 import type { RecordSummary } from '../amounts/record-summary.ts';
 import type { NamedRecord, Records } from '../desk/sheet-record.ts';
 import { type Result, failure } from '../report/result.ts';
-import { UnreadableFile, type World, bytesOf } from './world.ts';
+import { textBytes } from './text-file.ts';
+import { UnreadableFile, type World } from './world.ts';
 
 /** A record lies beside its sheet; a sheet from standard input lies where the command was started. */
 const pathFrom = (sheet: string, record: string): string => {
@@ -14,7 +15,7 @@ const pathFrom = (sheet: string, record: string): string => {
 /** A file that cannot be opened is the fault of the run that names it, and of no other. */
 const readOne = async (sheet: string, { path, options }: NamedRecord, world: World): Promise<Result<RecordSummary>> => {
   try {
-    return await readRecordStream(bytesOf(world, pathFrom(sheet, path)), options);
+    return await readRecordStream(textBytes(world, pathFrom(sheet, path)), options);
   } catch (problem) {
     if (!(problem instanceof UnreadableFile)) throw problem;
     const hint = 'The path is seen from the folder of the sheet.';

@@ -12,7 +12,8 @@ import { sheetMarkdown } from '../render/sheet-markdown.ts';
 import { lookFor } from './look.ts';
 import type { Showing } from './outcome.ts';
 import { readRecords } from './sheet-records.ts';
-import { type ExitCode, UnreadableFile, type World, saveText, textOf } from './world.ts';
+import { textOf } from './text-file.ts';
+import { type ExitCode, UnreadableFile, type World, saveText } from './world.ts';
 
 /** The formats of a sheet's answers, each with the end of its file's name. */
 const ENDINGS = { text: 'txt', markdown: 'md', csv: 'csv', json: 'json', html: 'html' } as const;

@@ -23,8 +23,11 @@ export interface World {
 /** 0 answered; 1 a fault, or an audit that is `unbalanced`; 2 the command itself was wrong. */
 export type ExitCode = 0 | 1 | 2;
 
-/** A file that could not be read, in words for the person at the keyboard. */
+/** A file that could not be read as it was asked, in words for the person at the keyboard. */
 export class UnreadableFile extends Error {}
+
+/** An option that nothing can be answered with, as a page for the person at the keyboard. */
+export class WrongSetting extends Error {}
 
 const WHY: Readonly<Record<string, string>> = {
   ENOENT: 'there is no such file',
@@ -44,19 +47,6 @@ export const bytesOf = async function* (world: World, path: string): AsyncGenera
     const code = codeOf(problem);
     if (code === '') throw problem;
     throw new UnreadableFile(`${path} cannot be read: ${WHY[code] ?? code}.`);
-  }
-};
-
-/** The whole text of `path`, or of standard input for "-". Throws `UnreadableFile`, also where it is not UTF-8. */
-export const textOf = async (world: World, path: string): Promise<string> => {
-  const decoder = new TextDecoder('utf-8', { fatal: true });
-  let text = '';
-  try {
-    for await (const chunk of bytesOf(world, path)) text += decoder.decode(chunk, { stream: true });
-    return text + decoder.decode();
-  } catch (problem) {
-    if (problem instanceof TypeError) throw new UnreadableFile(`${path} cannot be read: it is not UTF-8 text.`);
-    throw problem;
   }
 };
 
