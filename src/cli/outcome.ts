@@ -7,12 +7,11 @@ import { auditMarkdown } from '../render/audit-markdown.ts';
 import { renderFault } from '../render/fault.ts';
 import type { Look } from '../render/look.ts';
 import { styledLines } from '../render/styled.ts';
+import { type AskFields, textAt } from './ask-text.ts';
+import { forCommandLine } from './command-fault.ts';
 import { lookFor } from './look.ts';
 import { isMarkup } from './markup-style.ts';
 import type { ExitCode, World } from './world.ts';
-
-/** The fields that an ask may have; unknown fields and wrong types are the desk's to find. */
-export type AskFields = Readonly<Record<string, unknown>>;
 
 /** How an answer is shown. */
 export interface Showing {
@@ -24,18 +23,6 @@ export interface Showing {
 }
 
 const lookOf = ({ plain, style }: Showing, world: World): Look => lookFor(world, plain, style);
-
-/** The text that a fault's field names: of "anode[1]" the skeleton that stands there; null where there is none. */
-const textAt = (ask: unknown, field: string | undefined): string | null => {
-  const steps = [...(field ?? '').matchAll(/\[(\d+)\]|([^.[\]]+)/g)].map(([, index, name]) => index ?? name ?? '');
-  const found = steps.reduce<unknown>(
-    (part, step) => (typeof part === 'object' && part !== null ? (part as AskFields)[step] : undefined),
-    ask,
-  );
-  if (typeof found === 'string') return found;
-  const inner = typeof found === 'object' && found !== null && 'skeleton' in found ? found.skeleton : undefined;
-  return typeof inner === 'string' ? inner : null;
-};
 
 /** The exit code that an answer stands for. */
 const exitCodeOf = (given: Answer): ExitCode => {
@@ -54,7 +41,7 @@ const subjectOf = (ask: AskFields): Subject => {
 };
 
 const showFault = (fault: Fault, ask: AskFields, showing: Showing, world: World): void => {
-  world.err(renderFault(fault, textAt(ask, fault.field), lookOf(showing, world)));
+  world.err(renderFault(forCommandLine(fault), textAt(ask, fault.field), lookOf(showing, world)));
 };
 
 /** A page for a person; or the formulas alone, to be pasted: then what must be known besides goes to standard error. */

@@ -1,15 +1,18 @@
 import { CommanderError } from '@commander-js/extra-typings';
 import { shielded, unshielded } from './arrow-argument.ts';
-import { BrokenList } from './equation-list.ts';
 import { program } from './program.ts';
 import type { Shell } from './shell.ts';
-import { type ExitCode, type World, UnreadableFile } from './world.ts';
+import { type ExitCode, type World, UnreadableFile, WrongSetting } from './world.ts';
 
 /** Help and version end a command well; everything else that commander ends is a wrong command. */
 const codeOf = (problem: unknown, world: World): ExitCode => {
   if (problem instanceof CommanderError) return problem.exitCode === 0 ? 0 : 2;
-  if (problem instanceof UnreadableFile || problem instanceof BrokenList) {
+  if (problem instanceof UnreadableFile) {
     world.err(`${problem.message}\n`);
+    return 2;
+  }
+  if (problem instanceof WrongSetting) {
+    world.err(problem.message);
     return 2;
   }
   world.err(`The program broke: ${problem instanceof Error ? problem.message : String(problem)}. Please report it.\n`);

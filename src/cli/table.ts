@@ -4,9 +4,11 @@ import { type WallEntryAnswer, type WallLine, type WallSettings, answerWall } fr
 import { renderFault } from '../render/fault.ts';
 import type { Look } from '../render/look.ts';
 import { renderWall, renderWallRemarks } from '../render/wall.ts';
+import { forCommandLine } from './command-fault.ts';
 import { equationsOfText } from './equation-list.ts';
 import { lookFor } from './look.ts';
-import { type ExitCode, type World, bytesOf } from './world.ts';
+import { textPieces } from './text-file.ts';
+import type { ExitCode, World } from './world.ts';
 
 /** How the table is written. */
 export type TableFormat = 'text' | WallFormat | 'json';
@@ -26,11 +28,6 @@ export interface TableRequest {
 /** One text as a stream of one piece. */
 const texts = async function* (lines: readonly string[]): AsyncGenerator<string> {
   yield await Promise.resolve(lines.map((line) => `${line}\n`).join(''));
-};
-
-const decoded = async function* (world: World, path: string): AsyncGenerator<string> {
-  const decoder = new TextDecoder();
-  for await (const chunk of bytesOf(world, path)) yield decoder.decode(chunk, { stream: true });
 };
 
 const linesOf = async (pieces: AsyncIterable<string>): Promise<readonly WallLine[]> => {
@@ -64,7 +61,7 @@ const showTable = async (
 };
 
 const faultText = ({ fault, half, species }: Faulted, look: Look): string =>
-  renderFault(fault, fault.field === 'species' ? (species ?? null) : half, look);
+  renderFault(forCommandLine(fault), fault.field === 'species' ? (species ?? null) : half, look);
 
 /** Answers a table of half-reactions and shows it; exit code 1 where a line or the conditions are at fault. */
 export const answerTable = async (request: TableRequest, world: World): Promise<ExitCode> => {
@@ -75,7 +72,7 @@ export const answerTable = async (request: TableRequest, world: World): Promise<
   };
   const look = lookFor(world, request.plain);
   const typed = await linesOf(texts(request.lines));
-  const listed = file === undefined ? [] : await linesOf(decoded(world, file));
+  const listed = file === undefined ? [] : await linesOf(textPieces(world, file));
   const table = answerWall([...typed, ...listed], { ...settings, conditions });
   if (format === 'json') {
     const shown = table.ok ? { conditions, table: table.value } : { fault: table.fault };

@@ -10,18 +10,22 @@ export interface Outcome {
 
 /** A world without a process: files by path, standard input as text. */
 export interface Surroundings {
-  readonly files?: Readonly<Record<string, string>>;
+  /** As text, or as bytes where they are none. */
+  readonly files?: Readonly<Record<string, string | Uint8Array>>;
   readonly input?: string;
   readonly terminal?: boolean;
   readonly colour?: boolean;
 }
 
-const bytes = async function* (text: string): AsyncGenerator<Uint8Array> {
+const bytes = async function* (text: string | Uint8Array): AsyncGenerator<Uint8Array> {
   await Promise.resolve();
-  yield new TextEncoder().encode(text);
+  yield typeof text === 'string' ? new TextEncoder().encode(text) : text;
 };
 
-const fileOf = async function* (files: Readonly<Record<string, string>>, path: string): AsyncGenerator<Uint8Array> {
+const fileOf = async function* (
+  files: Readonly<Record<string, string | Uint8Array>>,
+  path: string,
+): AsyncGenerator<Uint8Array> {
   const text = files[path];
   if (text === undefined) throw Object.assign(new Error(path), { code: 'ENOENT' });
   yield* bytes(text);
