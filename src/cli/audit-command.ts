@@ -1,4 +1,5 @@
 import { Argument, Command, type CommandUnknownOpts, Option } from '@commander-js/extra-typings';
+import type { PrintStyle } from '../notation/print/print.ts';
 import type { ListFormat } from './audit-list.ts';
 import { isMarkup } from './markup-style.ts';
 import {
@@ -25,6 +26,50 @@ const formatOption = new Option(
 )
   .choices(LIST_FORMATS)
   .default('text' as const);
+
+interface Asked {
+  readonly equation?: string | undefined;
+  readonly file?: string | undefined;
+  readonly column?: string | undefined;
+  readonly format: ListFormat;
+  readonly contributions?: true | undefined;
+  readonly json?: true | undefined;
+  readonly style?: PrintStyle | undefined;
+  /** The lines of a cell that are given. */
+  readonly whole: Readonly<Record<string, unknown>>;
+}
+
+/** What a whole cell still needs, in words; null where it is whole, or where none was begun. */
+const missingOfWhole = (whole: Asked['whole']): string | null => {
+  const missing = ['anode', 'cathode', 'overall'].filter((name) => !(name in whole)).map((name) => `--${name}`);
+  const last = missing.pop();
+  if (last === undefined || Object.keys(whole).length === 0) return null;
+  return `A whole cell needs ${missing.length === 0 ? last : `${missing.join(', ')} and ${last}`} too.`;
+};
+
+/** Options that say nothing about a file. */
+const wrongForFile = ({ style, contributions, format, json }: Asked): string | null => {
+  if (isMarkup(style)) return '--style html, latex and mathml are for one equation or a cell.';
+  if (contributions === true && json !== true && format !== 'ndjson')
+    return '--contributions is for one equation or a cell; of a file only --format ndjson holds them.';
+  return null;
+};
+
+/** Options that say nothing without a file. */
+const wrongWithoutFile = ({ column, format }: Asked): string | null => {
+  if (column !== undefined) return '--column is for --file.';
+  return format === 'csv' ? '--format csv is for --file.' : null;
+};
+
+/** Why there is nothing to audit, or an option that would be passed over; null where all is well. */
+const wrongAudit = (asked: Asked): string | null => {
+  const { equation, file, whole, json, format } = asked;
+  const ways = [equation !== undefined, file !== undefined, Object.keys(whole).length > 0].filter(Boolean);
+  if (ways.length !== 1) return 'Give an equation, or --anode, --cathode and --overall, or --file.';
+  if (json === true && (format === 'markdown' || format === 'csv'))
+    return `Give --json or --format ${format}, not both.`;
+  return missingOfWhole(whole) ?? (file === undefined ? wrongWithoutFile(asked) : wrongForFile(asked));
+};
 
 /** `audit`: one equation, a whole cell, or a file of equations. */
 export const auditCommand = (shell: Shell): CommandUnknownOpts => {
@@ -64,21 +109,19 @@ export const auditCommand = (shell: Shell): CommandUnknownOpts => {
       ),
     );
   return command.action(async (equation, options) => {
-    const { anode, cathode, overall, electrons, file, column, format, contributions } = options;
+    const { anode, cathode, overall, electrons, file, column, format, contributions, style, plain } = options;
     const { medium } = balancingFields(options);
     const fields = given({ medium, contributions, ...requestFields(options), ...commonFields(options) });
     const whole = given({ anode, cathode, overall, electrons });
-    const ways = [equation, file, Object.keys(whole).length > 0 ? whole : undefined].filter((way) => way !== undefined);
-    if (ways.length !== 1) command.error('Give an equation, or --anode, --cathode and --overall, or --file.');
-    const { json = format === 'ndjson' ? true : undefined, plain, style } = options;
+    const wrong = wrongAudit({ ...options, equation, whole });
+    if (wrong !== null) command.error(wrong);
+    const json = options.json === true || format === 'ndjson' ? true : undefined;
     if (file !== undefined) {
-      if (isMarkup(style)) command.error('--style html, latex and mathml are for one equation or a cell.');
       const { auditList } = await import('./audit-list.ts');
       const listFormat = json === true ? 'ndjson' : format;
       shell.finish(await auditList({ path: file, column, format: listFormat, fields, plain, style }, shell.world));
       return;
     }
-    if (format === 'csv') command.error('--format csv is for --file.');
     const markdown = format === 'markdown';
     await shell.ask({ ask: 'audit', ...given({ equation }), ...whole, ...fields }, { json, plain, style, markdown });
   });

@@ -3,8 +3,8 @@ import { collect, given } from './options.ts';
 
 type Fields = Readonly<Record<string, unknown>>;
 
-/** "Ni^2+ -> Ni @ 95 %": what stands behind the last " @ " is the share of the electrode's current. */
-const SHARED = /^(.*\S)\s+@\s*(\S.*)$/s;
+/** "Ni^2+ -> Ni @ 95 %": behind the last " @ " stands the share of the electrode's current; before a number the blank may go. */
+const SHARED = /^(.*\S)(?:\s+@\s*(?=\S)|\s*@\s*(?=[\d.]+(?:\/\d+)?\s*%?\s*$))(.*)$/s;
 
 /** A reaction as it was typed, with its share where one is given; `medium` is that of its electrode. */
 export const reactionFields = (typed: string, textField: 'skeleton' | 'half', medium?: string): Fields => {

@@ -7,7 +7,7 @@ import { cellCommand } from './cell-command.ts';
 import { equationCommand, speciesCommand } from './reading-commands.ts';
 import { recordCommand } from './record-command.ts';
 import { schemaCommand } from './schema-command.ts';
-import { type Shell, examples } from './shell.ts';
+import { type Shell, UNQUOTED, examples } from './shell.ts';
 import { tableCommand } from './table-command.ts';
 import { VERSION } from './version.ts';
 
@@ -23,6 +23,9 @@ command itself was wrong.
 couplet COMMAND --help shows the options and examples of a command.
 `;
 
+/** How the parser of the line begins when words are left over. */
+const TOO_MANY = /^error: too many arguments/;
+
 /** The line and its errors go to the world; nothing ends the process. */
 const bound = (command: CommandUnknownOpts, { world }: Shell): CommandUnknownOpts =>
   command
@@ -32,6 +35,9 @@ const bound = (command: CommandUnknownOpts, { world }: Shell): CommandUnknownOpt
       writeOut: (text) => void world.out(text),
       writeErr: (text) => {
         world.err(text);
+      },
+      outputError: (text, write) => {
+        write(TOO_MANY.test(text) ? `${text}${UNQUOTED}\n` : text);
       },
       getOutHelpWidth: () => 80,
       getErrHelpWidth: () => 80,
@@ -46,7 +52,8 @@ export const program = (shell: Shell): CommandUnknownOpts => {
       'Balances electrode reactions exactly, composes cells, audits equations, and finds charge, mass and gas.',
     )
     .version(VERSION, '--version', 'print the version')
-    .helpOption('--help', 'show this help')
+    .helpOption('-h, --help', 'show this help')
+    .helpCommand('help [command]', 'show the help of a command')
     .addHelpText('after', AFTER);
   bound(root, shell);
   const commands = [
@@ -63,6 +70,6 @@ export const program = (shell: Shell): CommandUnknownOpts => {
     batchCommand(shell),
     schemaCommand(shell),
   ];
-  for (const command of commands) root.addCommand(bound(command.helpOption('--help', 'show this help'), shell));
-  return root.helpCommand(false);
+  for (const command of commands) root.addCommand(bound(command.helpOption('-h, --help', 'show this help'), shell));
+  return root;
 };

@@ -1,4 +1,5 @@
-import type { AskFields, Showing } from './outcome.ts';
+import type { AskFields } from './ask-text.ts';
+import type { Showing } from './outcome.ts';
 import type { ExitCode, World } from './world.ts';
 
 /** What a command needs: the world, and a place for its exit code. */
@@ -8,6 +9,9 @@ export interface Shell {
   /** Answers one ask, shows it and keeps the exit code. */
   readonly ask: (fields: AskFields, showing: Showing) => Promise<void>;
 }
+
+/** What to try where a text has fallen into words. */
+export const UNQUOTED = 'Put a text with blanks, = or > in quotes: "Cu^2+ -> Cu", --given current="2 A".';
 
 const MEASURE = 76;
 

@@ -11,7 +11,7 @@ import {
   strictOption,
   whereOption,
 } from './options.ts';
-import { type Shell, examples } from './shell.ts';
+import { type Shell, UNQUOTED, examples } from './shell.ts';
 
 const formatOption = new Option('--format <FORMAT>', 'how the table is written: --format markdown')
   .choices(['text', 'markdown', 'csv'] as const)
@@ -45,8 +45,10 @@ export const tableCommand = (shell: Shell): CommandUnknownOpts => {
   return command.action(async (typed, options) => {
     const { file, format, temperature, pressure, json, plain } = options;
     if (typed.length === 0 && file === undefined) command.error('Give half-reactions, or --file.');
-    const { answerTable } = await import('./table.ts');
     const lines = typed.map((line) => String(unshielded(line)));
+    if (lines.some((line) => /^[-=+→⇌>]+$/.test(line))) command.error(UNQUOTED);
+    if (json === true && format !== 'text') command.error(`Give --json or --format ${format}, not both.`);
+    const { answerTable } = await import('./table.ts');
     const settings = { ...balancingFields(options), ...commonFields(options) };
     const shown = json === true ? 'json' : format;
     shell.finish(
