@@ -64,9 +64,13 @@ const TYPES: Readonly<Record<string, string>> = {
   number: 'a number',
 };
 
+/** A reaction is called `skeleton` in a cell and `half` at the electrode of an ask of amounts. */
+const TWINS: Readonly<Record<string, string>> = { skeleton: 'half', half: 'skeleton' };
+
 const unknownKey = (path: readonly PropertyKey[], key: string, known: readonly string[], where: string): Fault => {
-  const candidates = path.length === 0 ? known : [...NESTED_FIELDS, ...known];
-  const guess = didYouMean(nearest(key, candidates, 3, 1));
+  const candidates = (path.length === 0 ? known : [...NESTED_FIELDS, ...known]).filter((name) => name !== key);
+  const twin = path.length === 0 ? undefined : TWINS[key];
+  const guess = didYouMean(twin === undefined ? nearest(key, candidates, 3, 1) : [twin]);
   const fields = path.length === 0 ? `The fields are ${known.join(', ')}.` : undefined;
   const hint = guess ?? fields;
   const field = fieldName([...path, key]);
@@ -74,20 +78,30 @@ const unknownKey = (path: readonly PropertyKey[], key: string, known: readonly s
   return { code: 'bad-ask', field, message, ...(hint === undefined ? {} : { hint }) };
 };
 
+const CELL_FORMS = 'Give the cell as anode and cathode, or as a diagram.';
+
 const wrongType = (field: string, issue: Issue & { readonly code: 'invalid_type' }): Fault => {
   const wanted = TYPES[issue.expected] ?? issue.expected;
   if (issue.message.endsWith('received undefined')) {
-    return { code: 'bad-ask', field, message: `${field} is missing.`, hint: `Give ${field} as ${wanted}.` };
+    const hint = /(^|\.)cell\.diagram$/u.test(field) ? CELL_FORMS : `Give ${field} as ${wanted}.`;
+    return { code: 'bad-ask', field, message: `${field} is missing.`, hint };
   }
   const hint = wanted === 'text' ? 'Numbers and quantities are written as text: "0.4", "2 A".' : undefined;
   const message = `${field} must be ${wanted}.`;
   return { code: 'bad-ask', field, message, ...(hint === undefined ? {} : { hint }) };
 };
 
+/** Something else stands where a part with fields is wanted: nothing, a text, a list. */
+const noFields = (known: readonly string[], where: string): Fault => {
+  const message = `${where.slice(0, 1).toUpperCase()}${where.slice(1)} must be written as fields, each with its value.`;
+  return { code: 'bad-ask', field: '', message, hint: `The fields are ${known.join(', ')}.` };
+};
+
 /** The `bad-ask` that says what a schema found: `known` are the field names of the object, `where` its name. */
 export const issueFault = (issue: Issue, known: readonly string[], where: string): Fault => {
   if (issue.code === 'unrecognized_keys') return unknownKey(issue.path, issue.keys[0] ?? '', known, where);
   const field = fieldName(issue.path);
+  if (field === '') return noFields(known, where);
   if (issue.code === 'invalid_type') return wrongType(field, issue);
   if (issue.code === 'too_small') return { code: 'bad-ask', field, message: `${field} is empty.` };
   return { code: 'bad-ask', field, message: `${field} has a form that is not understood.` };

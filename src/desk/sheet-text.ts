@@ -120,7 +120,7 @@ const placer =
       node === null
         ? {}
         : { span: firstLine(text, key === null ? within(text, node, fault.span) : spanOfNode(text, key)) };
-    return { ...fault, field: fieldName(full), ...span };
+    return { ...fault, field: full.length === 0 ? 'sheet' : fieldName(full), ...span };
   };
 
 /** A map or list spans many lines: only its first is underlined. */

@@ -228,3 +228,26 @@ describe('a sheet that cannot be read', () => {
     expect(faultOf('#'.repeat(LONGEST_SHEET + 1)).code).toBe('too-long');
   });
 });
+
+describe('a part of a sheet that has no fields', () => {
+  it.each([
+    ['', 'sheet', 'A sheet', 'plant'],
+    ['# to be written\n', 'sheet', 'A sheet', 'cells'],
+    ['Tern Quay\n', 'sheet', 'A sheet', 'plant'],
+    ['- Tern Quay\n', 'sheet', 'A sheet', 'cells'],
+  ])('is told what must stand there: %j', (text, field, subject, named) => {
+    const sheet = answerSheet(text);
+    expect(sheet).toMatchObject({ ok: false, fault: { code: 'bad-ask', field } });
+    if (sheet.ok) return;
+    expect(sheet.fault.message).toBe(`${subject} must be written as fields, each with its value.`);
+    expect(sheet.fault.hint).toContain(named);
+  });
+
+  it.each(['null', 'copper', '[copper]'])('is named where it is a tank: %s', (tank) => {
+    const sheet = answerSheet(`plant: P\ncells: [${tank}]\n`);
+    const fault = sheet.ok ? sheet.value.tanks.flatMap((one) => ('fault' in one ? [one.fault] : []))[0] : undefined;
+    expect(fault).toMatchObject({ code: 'bad-ask', field: 'cells[0]', span: { from: 17, to: 17 + tank.length } });
+    expect(fault?.message).toMatch(/^A tank must be/);
+    expect(fault?.hint).toContain('anode');
+  });
+});
