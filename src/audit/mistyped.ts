@@ -2,12 +2,12 @@ import { type Rational, ZERO, isWhole, isZero, signOf } from '../exact/rational.
 import { type Species, isElectron, plainSpecies } from '../species/species.ts';
 import { CHARGE } from '../balance/matrix.ts';
 import { editDistance } from '../report/suggest.ts';
-import { commonWith, familiarityOf, sameContents } from './known.ts';
+import { commonWith, familiarityOf, isOddlyCharged, sameContents } from './known.ts';
 import type { Candidate, Problem } from './problem.ts';
 import { withCharge, withOneSubscript } from './respell.ts';
 import type { DraftTerm } from './writing.ts';
 
-/** Charge numbers beyond this are believed of a known species only. */
+/** Charge numbers beyond this are believed of a listed species only. */
 const LARGEST_UNKNOWN_CHARGE = 4;
 
 /**
@@ -63,8 +63,9 @@ const spelledAlike = (
 
 const isCommon = (species: Species): boolean => familiarityOf(species) === 'common';
 
+/** A species in no table is never proposed with a charge that its atoms do not bear: no H2O^2+, no Na^2+. */
 const isBelievable = (species: Species): boolean =>
-  isCommon(species) || Math.abs(Number(species.charge.n)) <= LARGEST_UNKNOWN_CHARGE;
+  isCommon(species) || (Math.abs(Number(species.charge.n)) <= LARGEST_UNKNOWN_CHARGE && !isOddlyCharged(species));
 
 /** Known species with these contents whose spelling is near what was written. */
 const fromTable = (species: Species, wanted: ReadonlyMap<string, Rational>, charge: Rational): readonly Species[] =>

@@ -5,7 +5,9 @@ import { type Rational, ONE, ZERO, isZero } from '../exact/rational.ts';
 import { isElectron } from '../species/species.ts';
 import { type Change, changesOf } from './changes.ts';
 import { isHelper, isHydroxide, isProton } from './helper-ions.ts';
-import { familiarityOf } from './known.ts';
+import { familiarityOf, sameContents } from './known.ts';
+import { standsOnBothSides } from './mistyped-skeleton.ts';
+import { isSuspect } from './near-species.ts';
 import type { Candidate, Problem } from './problem.ts';
 import { EDIT_COSTS, IMPROBABLE, REPAIR_KINDS, RESPELLING_COSTS, type RepairKind, TIE } from './repair-kinds.ts';
 import { redoxChangeOf } from './redox-change.ts';
@@ -53,24 +55,38 @@ const before = (a: Ranked, b: Ranked): number => {
 
 const rank = (problem: Problem, { kind, draft }: Candidate): Ranked => {
   const changes = changesOf(problem.draft, draft);
-  const costs = changes.map((change) => costOf(problem, change));
-  const extra = addedHelpers(changes).length > 1 ? EDIT_COSTS.furtherHelper - EDIT_COSTS.helperAdded : 0;
+  const isTrusted = !draft.some(({ species }) => isSuspect(species));
+  const costs = changes.map((change) => costOf(problem, change, isTrusted));
+  const further = addedHelpers(changes).length > 1 ? EDIT_COSTS.furtherHelper - EDIT_COSTS.helperAdded : 0;
+  const doubtful = !isTrusted && isSkeleton(problem.draft) ? EDIT_COSTS.suspectInSkeleton : 0;
+  const idle = leavesOnBothSides(problem, draft) ? EDIT_COSTS.leftOnBothSides : 0;
   return {
     kind,
     reaction: reactionOf(draft),
     changes,
-    cost: kind === 'rounding' ? 0 : costs.reduce((sum, cost) => sum + cost, extra),
-    improbable: kind !== 'rounding' && isImprobable(problem.draft, draft, changes),
+    cost: kind === 'rounding' ? 0 : costs.reduce((sum, cost) => sum + cost, further + doubtful + idle),
+    improbable: kind !== 'rounding' && isImprobable(problem.draft, draft, changes, isTrusted),
   };
 };
+
+/** True where a species that was written on both sides, no helper, still stands there unchanged. */
+const leavesOnBothSides = ({ draft: written, medium }: Problem, draft: Draft): boolean =>
+  draft.some(
+    (term) =>
+      !isElectron(term.species) &&
+      !isHelper(term.species, medium) &&
+      standsOnBothSides(draft, term) &&
+      standsOnBothSides(written, term),
+  );
 
 const addedHelpers = (changes: readonly Change[]): readonly DraftTerm[] =>
   changes.flatMap((change) => (change.kind === 'added' && !isElectron(change.is.species) ? [change.is] : []));
 
-const costOf = (problem: Problem, change: Change): number => {
+/** `isTrusted`: no species that looks mistyped is left. */
+const costOf = (problem: Problem, change: Change, isTrusted: boolean): number => {
   switch (change.kind) {
     case 'number':
-      return numberCost(problem.draft, change.was, change.is);
+      return numberCost(isTrusted && isSkeleton(problem.draft), change.was, change.is);
     case 'moved':
       if (isElectron(change.was.species)) return EDIT_COSTS.electronMoved;
       return isHelper(change.was.species, problem.medium) ? EDIT_COSTS.helperMoved : EDIT_COSTS.termMoved;
@@ -98,9 +114,9 @@ const dropCost = ({ draft, medium }: Problem, { species }: DraftTerm): number =>
 
 const isSkeleton = (draft: Draft): boolean => !draft.some(({ coefficientWritten }) => coefficientWritten);
 
-const numberCost = (draft: Draft, was: DraftTerm, is: DraftTerm): number => {
+const numberCost = (ofSkeleton: boolean, was: DraftTerm, is: DraftTerm): number => {
   const far = EDIT_COSTS.perDoubling * doublings(was.coefficient, is.coefficient);
-  if (isSkeleton(draft)) return EDIT_COSTS.skeletonNumber + far;
+  if (ofSkeleton) return EDIT_COSTS.skeletonNumber + far;
   return far + (was.coefficientWritten ? EDIT_COSTS.writtenNumber : EDIT_COSTS.unwrittenNumber);
 };
 
@@ -110,14 +126,28 @@ const respellingCost = ({ medium }: Problem, was: DraftTerm, is: DraftTerm): num
     return foreign ? EDIT_COSTS.foreignIonExchanged : EDIT_COSTS.ionExchanged;
   }
   const further = EDIT_COSTS.perFurtherUnit * Math.max(0, distanceBetween(was, is) - 1);
+  const twoSlips = !was.species.charge.equals(is.species.charge) && !sameAtoms(was, is);
   const stateClash = isZero(was.species.charge) && !isZero(is.species.charge) && isBulk(was.species.state);
   return (
-    RESPELLING_COSTS[familiarityOf(was.species)][familiarityOf(is.species) === 'common' ? 'common' : 'other'] +
+    RESPELLING_COSTS[familiarityOf(was.species)][meantAs(is)] +
     further +
+    (sameElements(was, is) ? 0 : EDIT_COSTS.otherElements) +
+    (twoSlips ? EDIT_COSTS.chargeAndAtoms : 0) +
     (stateClash ? EDIT_COSTS.ionInBulk : 0) -
     (isDissolvedElement(was) ? EDIT_COSTS.dissolvedElement : 0)
   );
 };
+
+const meantAs = ({ species }: DraftTerm): 'common' | 'salt' | 'other' => {
+  const familiarity = familiarityOf(species);
+  return familiarity === 'common' || familiarity === 'salt' ? familiarity : 'other';
+};
+
+const sameElements = ({ species: a }: DraftTerm, { species: b }: DraftTerm): boolean =>
+  a.composition.size === b.composition.size && [...a.composition.keys()].every((element) => b.composition.has(element));
+
+const sameAtoms = ({ species: a }: DraftTerm, { species: b }: DraftTerm): boolean =>
+  sameContents({ ...a, charge: ZERO }, { ...b, charge: ZERO });
 
 /** An element of single atoms in solution lacks its charge: Ag(aq). */
 const isDissolvedElement = ({ species }: DraftTerm): boolean =>
@@ -146,8 +176,8 @@ const distanceBetween = ({ species: a }: DraftTerm, { species: b }: DraftTerm): 
 };
 
 /** A re-solve that leaves hardly a number standing, or protons and electrons brought in together. */
-const isImprobable = (written: Draft, draft: Draft, changes: readonly Change[]): boolean =>
-  bringsProtonsAndElectrons(changes) || (!isSkeleton(written) && isReSolve(written, draft, changes));
+const isImprobable = (written: Draft, draft: Draft, changes: readonly Change[], isTrusted: boolean): boolean =>
+  bringsProtonsAndElectrons(changes) || (!(isTrusted && isSkeleton(written)) && isReSolve(written, draft, changes));
 
 const bringsProtonsAndElectrons = (changes: readonly Change[]): boolean => {
   const ions = addedHelpers(changes).filter(({ species }) => species.charge.n !== 0n);

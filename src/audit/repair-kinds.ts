@@ -21,6 +21,16 @@
  * | 7     | `term-dropped`  | a term too many that is no helper                                   |
  *
  * Equal costs are a tie, shown as one; the class then decides only which is printed first.
+ *
+ * | what is never offered, or not behind something sensible                        | instead                       |
+ * |---------------------------------------------------------------------------------|-------------------------------|
+ * | an unlisted species with a charge that its atoms are not known to bear (H2O^2+)  | never proposed                |
+ * | an everyday species taken for an odd one: a radical (O), Na^-, an unlisted one   | only where nothing else is found |
+ * | a species in no table brought in, where one repair has listed species throughout | dropped                       |
+ *
+ * Where more than half of the numbers are 1, hardly anything was claimed of them: one species is then taken for a near
+ * one and the numbers are solved anew, first for species that look mistyped, and for any only where nothing sensible is
+ * found. A species looks mistyped where it is no common one, or stands on both sides unchanged.
  */
 export const REPAIR_KINDS = {
   'lowest-terms': { order: 0, words: 'divided by the common factor' },
@@ -44,8 +54,10 @@ export const EDIT_COSTS = {
   writtenNumber: 1,
   /** A number where none was written: left out, not wrong. */
   unwrittenNumber: 0.8,
-  /** The same in an equation without any number: a skeleton, whose numbers nobody claimed. */
+  /** The same in an equation without any number, once no species looks mistyped: nobody claimed the numbers. */
   skeletonNumber: 0.15,
+  /** Left in such an equation: a species that looks mistyped. */
+  suspectInSkeleton: 0.7,
   /** Per doubling or halving of a number; so that the smallest change comes first. */
   perDoubling: 0.01,
   electronMoved: 1.05,
@@ -67,18 +79,28 @@ export const EDIT_COSTS = {
   termDropped: 1.7,
   /** Per unit of charge or atom by which a species changes, after the first. */
   perFurtherUnit: 0.08,
+  /** Charge and atoms change both: two slips in one species. */
+  chargeAndAtoms: 0.9,
+  /** An element comes in or goes: more than a subscript. */
+  otherElements: 0.4,
+  /** A species written on both sides, no helper, is left there unchanged: one of the two was meant otherwise. */
+  leftOnBothSides: 0.6,
   /** A solid, a liquid or a gas becomes an ion. */
   ionInBulk: 1,
   /** Taken off where an element of single atoms is written as dissolved: its charge was left out. */
   dissolvedElement: 0.7,
 } as const;
 
-/** What it costs to take one species for another, by how well both are known. */
+/**
+ * What it costs to take one species for another, by how well both are known. A salt is one whose ions cancel though no
+ * table holds it: likelier meant than an unlisted species, less likely than a common one.
+ */
 export const RESPELLING_COSTS = {
-  common: { common: 1.5, other: 3 },
-  rare: { common: 0.5, other: 2 },
-  unlisted: { common: 0.75, other: 1.8 },
-  'unlisted-ion': { common: 0.12, other: 1.8 },
+  common: { common: 1.5, salt: 2.4, other: 3 },
+  salt: { common: 0.75, salt: 1.5, other: 1.8 },
+  rare: { common: 0.5, salt: 1.5, other: 2 },
+  unlisted: { common: 0.75, salt: 1.1, other: 1.8 },
+  'unlisted-ion': { common: 0.12, salt: 0.5, other: 1.8 },
 } as const;
 
 /** Costs that differ by less are a tie. */
@@ -89,6 +111,6 @@ export const MOST_REPAIRS = 6;
 
 /**
  * A re-solve is improbable where more than `share` of the numbers change and the largest grows over `growth` times,
- * unless no number was written at all.
+ * unless no number was written at all and no species looks mistyped.
  */
 export const IMPROBABLE = { share: 0.5, growth: 4 } as const;

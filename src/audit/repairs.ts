@@ -6,10 +6,12 @@ import { additions } from './additions.ts';
 import { type Edit, editOf } from './changes.ts';
 import { exchanges } from './exchange.ts';
 import { respellings } from './mistyped.ts';
+import { mistypedSkeletons } from './mistyped-skeleton.ts';
 import { type Candidate, type Problem, problemOf } from './problem.ts';
 import { type Ranked, ranked } from './rank.ts';
 import { renumberings } from './renumber.ts';
 import { MOST_REPAIRS, type RepairKind, TIE } from './repair-kinds.ts';
+import { isSensible, withoutNonsense } from './sensible.ts';
 import { sayTiny, unrounded } from './rounding.ts';
 import type { Draft } from './writing.ts';
 
@@ -41,11 +43,19 @@ export const repairsOf = (
     return none(`No repair was sought: more than ${String(MOST_TERMS)} terms are written.`);
   }
   const problem = problemOf(draft, medium);
-  const found = ranked(problem, candidatesFor(problem, residual));
+  const found = searched(problem, residual);
   const [first] = found;
   if (first === undefined) return none(reasonFor(problem, residual));
   if (first.improbable) return none(onlyImprobable(first));
   return { repairs: found.slice(0, MOST_REPAIRS).map(repairFrom), notes: notesOn(first, found, residual) };
+};
+
+/** Any species is doubted only where nothing sensible is found otherwise. */
+const searched = (problem: Problem, residual: ReadonlyMap<string, Rational>): readonly Ranked[] => {
+  const candidates = candidatesFor(problem, residual);
+  const found = ranked(problem, candidates);
+  if (found.some(isSensible)) return withoutNonsense(found);
+  return withoutNonsense(ranked(problem, [...candidates, ...mistypedSkeletons(problem, 'any')]));
 };
 
 const candidatesFor = (problem: Problem, residual: ReadonlyMap<string, Rational>): readonly Candidate[] => [
@@ -54,6 +64,7 @@ const candidatesFor = (problem: Problem, residual: ReadonlyMap<string, Rational>
   ...exchanges(problem),
   ...additions(problem),
   ...respellings(problem, residual),
+  ...mistypedSkeletons(problem, 'suspects'),
 ];
 
 const repairFrom = ({ kind, reaction, changes, improbable }: Ranked): Repair => ({

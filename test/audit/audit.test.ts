@@ -284,3 +284,34 @@ describe('repairs', () => {
     }
   });
 });
+
+describe('what no chemist would write', () => {
+  const brought = (text: string): readonly string[] =>
+    audited(text).audit.repairs.flatMap(({ edits }) => edits.map(({ to }) => to));
+
+  it('bears no charge that its atoms are not known to bear', () => {
+    for (const text of ['O2 + 4 H^+ + 2 e^- -> 2 H2O', 'Na^+ -> Na + e^-', 'PbSO4 + e^- -> Pb + SO4^2-']) {
+      expect(brought(text).filter((to) => /^(H2O\^|Na\^2\+|PbSO4\^)/.test(to))).toEqual([]);
+    }
+  });
+
+  it('does not stand behind something sensible', () => {
+    expect(repairs('Na^+ -> Na + e^-')).toEqual(['Na^+ + e^- -> Na']);
+    expect(repairs('H2 + O2 -> H2O')).toEqual(['2 H2 + O2 -> 2 H2O', 'H2 + O2 -> H2O2']);
+    expect(brought('Ag^+ + 2 e^- -> Ag')).not.toContain('Ag^-');
+  });
+
+  it('is no re-solve with numbers that grow over fourfold, while an ion is left that nobody knows', () => {
+    const found = audited('Cl2 + OH^- -> Cl^- + ClO3^2- + H2O').audit.repairs;
+    expect(found.map(({ reaction, improbable }) => [plainReaction(reaction), improbable])).toEqual([
+      ['3 Cl2 + 6 OH^- -> 5 Cl^- + ClO3^- + 3 H2O', false],
+      ['5 Cl2 + 12 OH^- -> 8 Cl^- + 2 ClO3^2- + 6 H2O', true],
+    ]);
+  });
+
+  it('still gives the numbers of a complex that no table holds', () => {
+    expect(repairs('Co(C3H8N2)3^3+ + H2O -> Co(C3H8N2)3^2+ + O2 + H^+')).toEqual([
+      '4 Co(C3H8N2)3^3+ + 2 H2O -> 4 Co(C3H8N2)3^2+ + O2 + 4 H^+',
+    ]);
+  });
+});
