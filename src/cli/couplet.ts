@@ -39,4 +39,7 @@ process.stdout.on('error', (problem: NodeJS.ErrnoException) => {
   process.exit(problem.code === 'EPIPE' ? 0 : 1);
 });
 
+/** Nobody reads the faults either. */
+process.stderr.on('error', () => process.exit(1));
+
 process.exitCode = await run(process.argv.slice(2), world);

@@ -1,5 +1,6 @@
-import { excerpt } from '../report/excerpt.ts';
+import { displayWidth, excerpt, printable } from '../report/excerpt.ts';
 import type { Fault, ShownCoupling, ShownReaction } from '../report/fault.ts';
+import { wrapped } from './block.ts';
 import { columns, indented } from './columns.ts';
 import type { Look } from './look.ts';
 import { reactionText, speciesText } from './spelling.ts';
@@ -69,6 +70,21 @@ const withoutHint = (fault: Fault): Fault => {
   return hint === undefined ? fault : rest;
 };
 
+/** Columns of a terminal that nothing is wider than. */
+const TERMINAL = 80;
+
+/** The place, the text and the carets with the sentence behind them; a sentence that is too long stands below. */
+const placeLines = (fault: Fault, text: string | null): readonly string[] => {
+  const lines = excerpt({ ...fault, message: '' }, text).split('\n');
+  const carets = lines.pop()?.trimEnd() ?? '';
+  const beside = `${carets === '' ? ' ' : carets} ${printable(fault.message)}`;
+  if (displayWidth(beside) <= TERMINAL) return [...lines, beside];
+  return [...lines, ...(carets === '' ? [] : [carets]), ...indented(wrapped(printable(fault.message)))];
+};
+
 /** A fault for a person: the place with carets, the sentence, the hint, and what else it carries. */
-export const renderFault = (fault: Fault, text: string | null, look: Look): string =>
-  `${[excerpt(withoutHint(fault), text), ...indented(particulars(fault, look))].join('\n')}\n`;
+export const renderFault = (fault: Fault, text: string | null, look: Look): string => {
+  const { hint, ...rest } = withoutHint(fault);
+  const below = [...(hint === undefined ? [] : wrapped(printable(hint))), ...particulars(fault, look)];
+  return `${[...placeLines(rest, text), ...indented(below)].join('\n')}\n`;
+};

@@ -93,3 +93,19 @@ describe('help', () => {
     expect(out).toBe((await couplet(['half', '--help'])).out);
   });
 });
+
+describe('a fault in a terminal of 80 columns', () => {
+  it.each([
+    [['half', 'Cu^2+ -> Cu', '--medium', 'vinegar']],
+    [['half', 'Cu^2+ -> Cu', '--per', 'a species that nobody has ever written down']],
+    [['half', `Cu^2+ + ${'H2O + '.repeat(12)}Xx -> Cu`]],
+    [['redox', 'MnO4^- + H2O2 -> Mn^2+ + O2', '--medium', 'acid']],
+    [['audit', 'Cu(EDTA)^2- -> Cu', '--define', 'EDTA=C10H12N2O8^4-']],
+    [['amounts', '--half', 'Cu^2+ -> Cu', '--species', 'Cu', '--given', 'time=6 fortnights']],
+  ])('is not broken by it: %j', async (argv) => {
+    const { code, err } = await couplet(argv);
+    expect(code).toBe(1);
+    expect(err.split('\n').filter((line) => line.length > 80)).toEqual([]);
+    expect(err.split('\n').filter((line) => line !== line.trimEnd())).toEqual([]);
+  });
+});
