@@ -1,12 +1,15 @@
 import { FARADAY } from '../elements/constants.ts';
+import { type Result, success } from '../report/result.ts';
+import { type Shared, shareFault, showPercent } from './found-shares.ts';
 import { gasKind } from './gases.ts';
 import type { Derived } from './derivation.ts';
+import type { Given } from './given.ts';
 import { type Measured, exactly, over, scaled, times, weightedSum } from './measured.ts';
 import { toFloat } from './number.ts';
 import { type Problem, chargePerMole, equivalenceIn } from './problem.ts';
 import type { QuantityName } from './quantities.ts';
 import { type VariableName, speciesRelations } from './relations.ts';
-import { type Known, derive } from './solver.ts';
+import { type Known, derive, isNearZero } from './solver.ts';
 import { type Stake, foldedMeasure, measuredYield } from './stakes.ts';
 
 /** The part of the electrode's current that each reaction takes, as far as it is known. */
@@ -14,6 +17,8 @@ export interface Parts {
   readonly parts: readonly (Measured | null)[];
   /** The reaction that was left with the rest of the current; null where none was. */
   readonly rest: number | null;
+  /** True where several reactions of the species asked were found to share the current so. */
+  readonly found: boolean;
 }
 
 const WHOLE = exactly(1);
@@ -27,20 +32,41 @@ const ownPart = (problem: Problem, share: Measured | null, efficiency: Measured 
 };
 
 /** Parts of the current after the efficiency of the species asked is known; a last open one takes the rest. */
-export const partsOf = (problem: Problem, { known }: Derived): Parts => {
+export const partsOf = (problem: Problem, { derived: { known }, found }: Shared): Parts => {
   const own = new Set(problem.asked.parts.map(({ branch }) => branch));
   const efficiency = known.get('efficiency');
   const parts = problem.branches.map(({ share }, branch) => {
-    const measured = share?.measured ?? null;
+    const measured = share?.measured ?? found?.[branch] ?? null;
+    if (found !== null) return measured;
     return own.has(branch) ? ownPart(problem, measured, efficiency) : measured;
   });
   const open = parts.flatMap((part, branch) => (part === null ? [branch] : []));
   const [rest, more] = open;
-  if (rest === undefined || more !== undefined) return { parts, rest: null };
+  const all = { found: found !== null };
+  if (rest === undefined || more !== undefined) return { ...all, parts, rest: null };
   const taken = parts.filter((part) => part !== null);
   const left = weightedSum([[1, WHOLE], ...taken.map((part) => [-1, part] as const)]);
-  if (left.value < -ROUNDING) return { parts, rest: null };
-  return { parts: parts.map((part, branch) => (branch === rest ? left : part)), rest };
+  if (left.value < -ROUNDING) return { ...all, parts, rest: null };
+  return { ...all, parts: parts.map((part, branch) => (branch === rest ? left : part)), rest };
+};
+
+/**
+ * A share found from what was measured and the shares written cannot exceed the whole together; what was weighed over
+ * 100 % by itself is for a note. Fault: `contradiction`.
+ */
+export const checkParts = (
+  { circuit, asked, branches }: Problem,
+  { parts }: Parts,
+  given: readonly Given[],
+): Result<null> => {
+  const own = new Set(asked.parts.map(({ branch }) => branch));
+  const taken = parts.flatMap((part) => part ?? []);
+  const beside = parts.some((part, branch) => part !== null && part.value > 0 && !own.has(branch));
+  const open = branches.some(({ share }) => share === null);
+  const over = weightedSum([[-1, WHOLE], ...taken.map((part) => [1, part] as const)]);
+  if (circuit.kind !== 'electrode' || !beside || !open || over.value <= 0 || isNearZero(over, 1)) return success(null);
+  const sum = showPercent(weightedSum(taken.map((part) => [1, part] as const)));
+  return shareFault(given, `what ${asked.name} takes and the shares written add up to ${sum} of the current`);
 };
 
 /** Names that are the same for every species of the circuit. */

@@ -1,10 +1,11 @@
 import { showRational } from '../exact/rational.ts';
-import { type Result, chain, success } from '../report/result.ts';
-import { ALONGSIDE_NAMES, type Companion, companionsOf, partsOf, splitsCurrent } from './alongside.ts';
+import { type Result, chain, map, success } from '../report/result.ts';
+import { ALONGSIDE_NAMES, type Companion, checkParts, companionsOf, partsOf, splitsCurrent } from './alongside.ts';
 import { type AnswerUnits, type Quantity, readWanted, showQuantities } from './answered.ts';
 import { budgetsOf } from './budget.ts';
 import { deriveAll } from './derivation.ts';
 import { checkEnough } from './enough.ts';
+import { findShares } from './found-shares.ts';
 import { type GivenReadings, convertGiven, readGivenTexts } from './given.ts';
 import type { Measured } from './measured.ts';
 import { amountNotes } from './notes.ts';
@@ -71,7 +72,8 @@ interface Texts {
   readonly series: Measured;
 }
 
-const readTexts = (request: AmountsRequest): Result<Texts> =>
+/** Reads the texts of an ask. Faults of reading in `given.NAME`, `want.NAME`, `cells`, `bypass`. */
+export const readTexts = (request: Pick<AmountsRequest, 'given' | 'want' | 'cells' | 'bypass'>): Result<Texts> =>
   chain(readGivenTexts(request.given), (readings) =>
     chain(readWanted(request.want ?? {}), (units) =>
       chain(readStack(request), (series) => success({ readings, units, series })),
@@ -80,12 +82,15 @@ const readTexts = (request: AmountsRequest): Result<Texts> =>
 
 const workOut = (request: AmountsRequest, { readings, units, series }: Texts, problem: Problem): Result<Working> =>
   chain(convertGiven(readings, problem.weigh(problem.asked.species)), (given) =>
-    chain(deriveAll(problem, given, series), (solved) => {
-      const derived = withUnitArea(solved);
-      const parts = partsOf(problem, derived);
-      const companions = companionsOf(problem, derived, parts);
-      return success({ request, problem, given, derived, parts, companions, units });
-    }),
+    chain(deriveAll(problem, given, series), (solved) =>
+      chain(findShares(problem, solved, given), (shared) => {
+        const derived = withUnitArea(shared.derived);
+        const parts = partsOf(problem, shared);
+        const companions = companionsOf(problem, derived, parts);
+        const working = { request, problem, given, derived, parts, companions, units };
+        return map(checkParts(problem, parts, given), () => working);
+      }),
+    ),
   );
 
 /**

@@ -4,6 +4,7 @@ import { type Rational, ONE, ZERO, showDecimal, signOf } from '../exact/rational
 import { type Note, note } from '../report/note.ts';
 import { type Result, all, chain, failure, inField, success } from '../report/result.ts';
 import { wholeSpan } from '../report/span.ts';
+import { isElectron } from '../species/species.ts';
 import { type Measured, exactly, measuredFrom, weightedSum } from './measured.ts';
 import { toFloat } from './number.ts';
 import { QUANTITIES } from './quantities.ts';
@@ -67,11 +68,30 @@ const restOf = (shares: readonly Share[]): Share => {
   return { exact, measured: { value: toFloat(exact), slopes } };
 };
 
+/** 1 for an oxidation, electrons on the right; -1 for a reduction. */
+const directionOf = ({ reaction }: ParallelReaction): number =>
+  reaction.terms.filter(({ species }) => isElectron(species)).reduce((sum, { nu }) => sum + Number(signOf(nu)), 0);
+
+/** One current flows one way: what runs in parallel is all oxidation or all reduction. */
+const turned = (reactions: readonly ParallelReaction[]): Result<never> | null => {
+  const [first, ...others] = reactions.map(directionOf);
+  const at = others.findIndex((direction) => direction !== first) + 1;
+  if (at === 0) return null;
+  return failure({
+    code: 'electrode-direction',
+    message: `electrode[0] is ${first === 1 ? 'an oxidation' : 'a reduction'}, electrode[${String(at)}] the opposite: one current does not drive both`,
+    field: `electrode[${String(at)}]`,
+    hint: 'Write it the other way round, or give the two electrodes as a cell with an anode and a cathode.',
+  });
+};
+
 const parallelBranches = (reactions: readonly ParallelReaction[]): Result<readonly Branch[]> => {
   const read = all(
     reactions.map(({ share }, index) => (share === undefined ? success(null) : readShare(share, index))),
   );
   if (!read.ok) return read;
+  const opposite = turned(reactions);
+  if (opposite !== null) return opposite;
   const given = read.value.filter((share) => share !== null);
   const sum = given.reduce((total, share) => total.add(share.exact), ZERO);
   if (sum.compare(ONE) > 0) return overWhole(sum);
@@ -109,7 +129,8 @@ const cellBranches = (
 
 /**
  * The reactions of a circuit with their shares. Notes: `share-assigned`. Faults: `contradiction` over 100 %, `bad-ask`
- * or a fault of reading for a share, in the field `electrode[i].share`.
+ * or a fault of reading for a share, in the field `electrode[i].share`; `electrode-direction` for an oxidation beside a
+ * reduction.
  */
 export const branchesOf = (circuit: Circuit): Result<readonly Branch[]> => {
   if (circuit.kind === 'half') return parallelBranches([circuit.half]);

@@ -170,10 +170,8 @@ export const deriveAll = (problem: Problem, given: readonly Given[], series: Mea
     chain(gather(start, given), (known) => {
       const first = solve(known, relations);
       const derived = withDefault(problem, first);
-      return chain(judge(derived, given), () =>
-        chain(checkDivisions(relations, first.known, given), () =>
-          chain(checkValues(derived.known, given), () => success(derived)),
-        ),
+      return chain(checkDivisions(relations, first.known, given), () =>
+        chain(judge(derived, given), () => chain(checkValues(derived.known, given), () => success(derived))),
       );
     }),
   );

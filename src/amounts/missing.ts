@@ -24,12 +24,18 @@ const PROPOSALS: readonly QuantityName[] = [
   'charge_per_mass',
 ];
 
+/** With a current density the area leads from it to the current; a current given too would leave it idle. */
+const DENSITY_FIRST: readonly QuantityName[] = ['time', 'area', 'density', ...PROPOSALS];
+
 /** What is known by name, the relations, and whether an efficiency may be taken as 100 % where none follows. */
 export interface Knowledge {
   readonly names: ReadonlySet<VariableName>;
   readonly relations: readonly Relation[];
   readonly defaultEfficiency: boolean;
 }
+
+/** True where a name follows by name alone: then only a division by zero can be in the way. */
+export const followsByName = (knowledge: Knowledge, name: VariableName): boolean => reachable(knowledge, []).has(name);
 
 /** The names that follow when `more` is given too, by the same steps as the values. */
 const reachable = (
@@ -49,7 +55,8 @@ export const whatWouldDo = (
   reached: (names: ReadonlySet<VariableName>) => boolean,
   except: readonly VariableName[] = [],
 ): readonly QuantityName[] => {
-  const open = PROPOSALS.filter((name) => !knowledge.names.has(name) && !except.includes(name));
+  const proposals = knowledge.names.has('current_density') ? [...new Set(DENSITY_FIRST)] : PROPOSALS;
+  const open = proposals.filter((name) => !knowledge.names.has(name) && !except.includes(name));
   for (let size = 1; size <= 3; size += 1) {
     const found = subsets(open, size).find((set) => reached(reachable(knowledge, set)));
     if (found !== undefined) return found;

@@ -43,23 +43,47 @@ const bracketed = (text: string, lastDigit: Rational): Rational =>
 /** Why a text that looks like a number is none of use. */
 export type NumberFault = 'no-digits' | 'too-many-digits' | 'out-of-range' | 'two-uncertainties';
 
-/** The number that a match of `NUMBER_PATTERN` spells, or why it is of no use. */
-export const numberFromMatch = (match: RegExpExecArray): WrittenNumber | NumberFault => {
-  const [, sign = '', whole = '', decimals = '', inside, plain, raised, superscript, behind] = match as readonly (
-    string | undefined
-  )[];
-  const digits = whole.replace(/\D/gu, '');
-  const exponent = Number(plainDigits(plain ?? raised ?? superscript ?? '0'));
+/** The parts of a match, '' for what is not written. */
+interface Parts {
+  readonly sign: string;
+  readonly digits: string;
+  readonly decimals: string;
+  readonly exponent: number;
+  /** Brackets before the power of ten and behind it. */
+  readonly uncertainties: readonly string[];
+}
+
+const partsOf = (match: RegExpExecArray): Parts => {
+  const [, sign = '', whole = '', decimals = '', ...others] = match as readonly (string | undefined)[];
+  const [inside, plain, raised, superscript, behind] = others;
+  return {
+    sign,
+    digits: whole.replace(/\D/gu, ''),
+    decimals,
+    exponent: Number(plainDigits(plain ?? raised ?? superscript ?? '0')),
+    uncertainties: [inside, behind].filter((text) => text !== undefined),
+  };
+};
+
+const faultOf = ({ digits, decimals, exponent, uncertainties }: Parts): NumberFault | null => {
   if (digits + decimals === '') return 'no-digits';
   if (digits.length + decimals.length > MOST_DIGITS) return 'too-many-digits';
   if (Math.abs(exponent) > MOST_DIGITS) return 'out-of-range';
-  if (inside !== undefined && behind !== undefined) return 'two-uncertainties';
+  return uncertainties.length > 1 ? 'two-uncertainties' : null;
+};
+
+/** The number that a match of `NUMBER_PATTERN` spells, or why it is of no use. */
+export const numberFromMatch = (match: RegExpExecArray): WrittenNumber | NumberFault => {
+  const parts = partsOf(match);
+  const fault = faultOf(parts);
+  if (fault !== null) return fault;
+  const { sign, digits, decimals, exponent, uncertainties } = parts;
+  const [uncertainty] = uncertainties;
   const size = rationalFromText(`${digits === '' ? '0' : digits}.${decimals}`).mul(tenTo(exponent));
-  const uncertainty = inside ?? behind;
+  const spread = uncertainty === undefined ? null : bracketed(uncertainty, tenTo(-decimals.length));
   return {
     value: sign === '' || sign === '+' ? size : size.neg(),
-    uncertainty:
-      uncertainty === undefined ? null : bracketed(uncertainty, tenTo(-decimals.length)).mul(tenTo(exponent)),
+    uncertainty: spread?.mul(tenTo(exponent)) ?? null,
     lastDigit: tenTo(exponent - decimals.length),
   };
 };

@@ -54,6 +54,17 @@ const noPart = (species: Species, stakes: readonly Stake[]): Result<never> => {
   });
 };
 
+const severalStates = (species: Species, one: Stake, other: Stake): Result<never> => {
+  const name = plainWithState(species);
+  return failure({
+    code: 'bad-ask',
+    message: `${name} takes part in more than one state`,
+    field: 'species',
+    span: wholeSpan(name),
+    hint: `Write which is meant: ${one.name} or ${other.name}.`,
+  });
+};
+
 const nothingLeft = (species: Species): Result<never> => {
   const name = plainWithState(species);
   return failure({
@@ -76,14 +87,15 @@ const isNothing = (stake: Stake, branches: readonly Branch[], electronsPerMole: 
   electronsPerMole === null && stake.parts.every(({ branch }) => (branches[branch]?.share ?? null) !== null);
 
 /**
- * Sets up the circuit for one species. Faults: those of the shares; `bad-ask` in `species` where it takes no part or
- * nothing of it is left.
+ * Sets up the circuit for one species. Faults: those of the shares; `bad-ask` in `species` where it takes no part, takes
+ * part in several states, or nothing of it is left.
  */
 export const setUp = (circuit: Circuit, species: Species): Result<Problem> =>
   chain(branchesOf(circuit), (branches) => {
     const stakes = allStakes(circuit, branches);
-    const asked = stakes.find((stake) => sameSpecies(stake.species, species));
+    const [asked, other] = stakes.filter((stake) => sameSpecies(stake.species, species));
     if (asked === undefined) return noPart(species, stakes);
+    if (other !== undefined) return severalStates(species, asked, other);
     const folding = folds(circuit) ? foldingOf(stakes, branches) : null;
     const equivalence = equivalenceIn(asked, { branches, folding });
     if (isNothing(asked, branches, equivalence.electronsPerMole)) return nothingLeft(species);

@@ -14,6 +14,8 @@ const HIDDEN_NAMES: Partial<Record<VariableName, string>> = {
   normal: 'the normal volume',
 };
 
+const isNamed = (name: VariableName): boolean => isQuantityName(name) || HIDDEN_NAMES[name] !== undefined;
+
 /** A variable in words. */
 export const nameOf = (name: VariableName): string =>
   isQuantityName(name) ? QUANTITIES[name].name : (HIDDEN_NAMES[name] ?? name);
@@ -102,7 +104,9 @@ const checkDivision = ({ kind, formula, terms }: Relation, known: Known, given: 
   const [divisor] = zeros;
   const value = divisor === undefined ? undefined : known.get(divisor[0]);
   if (divisor === undefined || value === undefined || !zeros.every(divides)) return success(null);
-  const others = terms.filter((term) => term !== unknown && !divides(term)).map(([name]) => nameOf(name));
+  const others = terms
+    .filter((term) => term !== unknown && !divides(term) && isNamed(term[0]))
+    .map(([name]) => nameOf(name));
   const message = `${formula}: ${nameOf(divisor[0])} is 0, but ${others.join(' and ')} ${others.length > 1 ? 'are' : 'is'} not`;
   return impossible(value, given, message);
 };

@@ -55,6 +55,8 @@ export const NOTE_CODES = {
   'dry-gas': 'no vapour pressure was given: the gas was taken as dry',
   'per-area': 'no area was given: thickness is per unit area',
   'unit-reading': 'a unit with more than one meaning was read as the one stated',
+  'runs-backwards': 'the net charge is negative: amounts are negative, the reaction runs the other way',
+  'below-zero': 'a concentration comes out below nothing, within the digits of what was given',
   summed: 'a species takes part in several reactions; its amounts were added',
 } as const;
 
