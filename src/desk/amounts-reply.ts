@@ -1,4 +1,4 @@
-import { computeAmounts } from '../amounts/amounts.ts';
+import { computeAmounts, readTexts } from '../amounts/amounts.ts';
 import type { Circuit } from '../amounts/branches.ts';
 import { computeSeries } from '../amounts/series.ts';
 import { type TankBalance, tankBalance } from '../amounts/tank-balance.ts';
@@ -35,11 +35,13 @@ interface ReadCell extends PlacedCircuit {
   readonly species: Species;
 }
 
-/** The reactions and the species of one cell: both are read before a fault of either is told. */
+/** The reactions, the species and the quantities of one cell: all are read before a fault of one is told. */
 const readCell = (ask: AmountsAsk | SeriesCell, options: DeskOptions): Result<ReadCell> => {
   const circuit = readCircuit(ask, options);
   const asked = inField(readSpecies(ask.species, options), 'species');
-  return chain(allByRank<unknown>([circuit, asked]), () =>
+  const { given = {}, want } = ask;
+  const texts = readTexts({ given, ...(want === undefined ? {} : { want }), ...('ask' in ask ? stackOf(ask) : {}) });
+  return chain(withoutNotes(allByRank<unknown>([circuit, asked, texts])), () =>
     chain(circuit, (through) =>
       map(asked, ({ species }) => ({
         circuit: through,
@@ -49,6 +51,9 @@ const readCell = (ask: AmountsAsk | SeriesCell, options: DeskOptions): Result<Re
     ),
   );
 };
+
+/** The notes come again where the values are used. */
+const withoutNotes = <T>(result: Result<T>): Result<T> => (result.ok ? success(result.value) : result);
 
 const stackOf = ({ cells, bypass }: AmountsAsk) => ({
   ...(cells === undefined ? {} : { cells }),

@@ -8,6 +8,7 @@ const LATER: readonly (readonly FaultCode[])[] = [
   ['several-balances', 'no-balance', 'wrong-side', 'idle-species', 'too-hard'],
   ['no-electrons'],
   ['electrode-direction'],
+  ['not-enough-given', 'contradiction'],
 ];
 
 /** 0 for a fault of reading, more for what comes after. */
