@@ -7,6 +7,7 @@ import type { Equation } from '../species/equation.ts';
 import { type Species, isElectron } from '../species/species.ts';
 import { type Audit, type Verdict, auditEquation } from './audit.ts';
 import { type Combination, type Composition, combinationOf, composed, electronsGiven } from './combination.ts';
+import { spectatorNotes } from './spectators.ts';
 
 /** A cell as somebody wrote it down: two electrode equations, the overall one, and the electron number claimed. */
 export interface ClaimedCell {
@@ -107,7 +108,7 @@ const judged = (parts: Parts, claimed: Rational | null): Result<CellAudit> => {
     failed,
     electronsPerMole: perMole(made),
   };
-  return success(audit, [...directionNotes(parts), ...sumNotes(made), ...wrongNumber]);
+  return success(audit, [...directionNotes(parts), ...sumNotes(made), ...ionicNotes(parts, made), ...wrongNumber]);
 };
 
 /** As written where it balances, else its likely repairs; an electrode also turned around. */
@@ -174,10 +175,26 @@ const sumNotes = ({ match, overall, electrons }: Made): readonly Note[] => {
   return [note('not-the-sum', `${start}: they make ${text} with ${showRational(electrons)} electrons.`)];
 };
 
-const claimNotes = (claimed: Rational | null, found: Rational | null): readonly Note[] =>
-  claimed === null || found === null || claimed.equals(found)
+/** Where an overall equation that conserves is the sum only once it is taken apart into ions. */
+const ionicNotes = ({ anode, cathode, overall }: Parts, { match }: Made): readonly Note[] => {
+  const [first] = versionsOf(anode);
+  const [second] = versionsOf(cathode);
+  if (match !== null || overall.residual.size > 0 || first === undefined || second === undefined) return [];
+  return spectatorNotes(first.reaction, second.reaction, overall.reaction);
+};
+
+const claimNotes = (claimed: Rational | null, found: Rational | null): readonly Note[] => {
+  if (claimed !== null && signOf(claimed) <= 0n) return [noNumber(claimed, found)];
+  return claimed === null || found === null || claimed.equals(found)
     ? []
     : [note('electrons-claimed', `${showRational(found)} electrons are exchanged, not ${showRational(claimed)}.`)];
+};
+
+/** An electron number is the count of electrons exchanged, whichever way they go. */
+const noNumber = (claimed: Rational, found: Rational | null): Note => {
+  const exchanged = found === null ? '' : ` ${showRational(found)} electrons are exchanged.`;
+  return note('electrons-claimed', `An electron number is positive, ${showRational(claimed)} is none.${exchanged}`);
+};
 
 const perMole = ({ overall, electrons }: Made): CellAudit['electronsPerMole'] =>
   (overall?.terms ?? []).flatMap(({ species, nu }) =>

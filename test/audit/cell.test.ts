@@ -25,6 +25,8 @@ interface Row {
 
 const rows = parse(readFileSync(new URL('../../fixtures/audit/cells.yaml', import.meta.url), 'utf8')) as readonly Row[];
 
+const NOTHING: Row['expect'] = { verdict: '', failed: [], multipliers: null, found: null };
+
 const show = (value: Rational | null): string | null => (value === null ? null : showRational(value));
 
 const auditOf = ({ anode, cathode, overall, electrons }: Row) => {
@@ -70,6 +72,36 @@ describe('a claimed cell', () => {
     if (row === undefined) throw new Error('the row is gone');
     const told = auditOf(row).notes.find(({ code }) => code === 'not-the-sum')?.message;
     expect(told).toContain('Zn + 2 Ag^+ -> Zn^2+ + 2 Ag with 2 electrons');
+  });
+
+  it.each([
+    ['Zn + CuSO4 -> ZnSO4 + Cu', 'without the spectators SO4^2-: Zn + Cu^2+ -> Zn^2+ + Cu.'],
+    ['Zn + 2 CuCl -> ZnCl2 + 2 Cu', null],
+    ['Zn + Cu(NO3)2 -> Zn(NO3)2 + Cu', 'without the spectators NO3^-: Zn + Cu^2+ -> Zn^2+ + Cu.'],
+  ])('names the spectators of %s over ionic electrodes', (overall, expected) => {
+    const row = { anode: 'Zn -> Zn^2+ + 2 e^-', cathode: 'Cu^2+ + 2 e^- -> Cu', overall };
+    const told = auditOf({ name: '', ...row, expect: NOTHING }).notes.filter(({ code }) => code === 'spectator');
+    expect(told.map(({ message }) => message)).toEqual(expected === null ? [] : [expect.stringContaining(expected)]);
+  });
+
+  it('takes an acid apart, but nothing that an electrode holds', () => {
+    const told = auditOf({
+      name: '',
+      anode: 'Pb + SO4^2- -> PbSO4 + 2 e^-',
+      cathode: 'PbO2 + SO4^2- + 4 H^+ + 2 e^- -> PbSO4 + 2 H2O',
+      overall: 'Pb + PbO2 + 2 H2SO4 -> 2 PbSO4 + 2 H2O',
+      expect: NOTHING,
+    }).notes.find(({ code }) => code === 'spectator');
+    expect(told?.message).toContain('is the sum: Pb + PbO2 + 4 H^+ + 2 SO4^2- -> 2 PbSO4 + 2 H2O.');
+  });
+
+  it('says that an electron number is positive', () => {
+    const row = rows.find(({ name }) => name === 'a claim of no electrons');
+    if (row === undefined) throw new Error('the row is gone');
+    expect(auditOf(row).notes).toContainEqual({
+      code: 'electrons-claimed',
+      message: 'An electron number is positive, 0 is none. 2 electrons are exchanged.',
+    });
   });
 
   it('checks the electrodes against the medium, and the overall equation not', () => {
