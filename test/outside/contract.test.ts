@@ -16,7 +16,7 @@ interface Case {
   readonly first?: string;
 }
 
-const cases = ['asks', 'more-asks', 'audit-asks'].flatMap(
+const cases = ['asks', 'more-asks', 'audit-asks', 'amounts-asks'].flatMap(
   (name) => parse(readFileSync(`fixtures/contract/${name}.yaml`, 'utf8')) as readonly Case[],
 );
 
