@@ -45,6 +45,10 @@ const bound = (command: CommandUnknownOpts, { world }: Shell): CommandUnknownOpt
       getErrHasColors: () => false,
     });
 
+/** "table [half-reactions...]": that it has options is said once below, not in every line. */
+const termOf = (command: CommandUnknownOpts): string =>
+  [command.name(), command.usage().replace('[options]', '').trim()].join(' ').trim();
+
 /** All commands. */
 export const program = (shell: Shell): CommandUnknownOpts => {
   const root = new Command('couplet')
@@ -54,6 +58,7 @@ export const program = (shell: Shell): CommandUnknownOpts => {
     .version(VERSION, '--version', 'print the version')
     .helpOption('-h, --help', 'show this help')
     .helpCommand('help [command]', 'show the help of a command')
+    .configureHelp({ subcommandTerm: termOf })
     .addHelpText('after', AFTER);
   bound(root, shell);
   const commands = [

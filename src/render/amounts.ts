@@ -4,7 +4,7 @@ import { budgetLines } from './budget.ts';
 import { type Alignment, type Cell, columns } from './columns.ts';
 import { figureOf, uncertaintyOf } from './figure.ts';
 import type { Look } from './look.ts';
-import { speciesText } from './spelling.ts';
+import { electronText, speciesText } from './spelling.ts';
 import { tankLines } from './tank-balance.ts';
 
 type Blocks = readonly (readonly string[])[];
@@ -44,7 +44,7 @@ const speciesTable = (heading: string, rows: readonly SpeciesRow[], look: Look):
   const known = PER_SPECIES.filter((name) => rows.some(({ quantities }) => quantities[name] !== undefined));
   // four quantities are wider than a terminal: where there is gas, its volume says more
   const shown = known.includes('volume') ? known.filter((name) => name !== 'mass_per_charge') : known;
-  const head = [heading, 'e- per mole', ...shown.flatMap((name) => [worded(name), ''])];
+  const head = [heading, `${electronText(look)} per mole`, ...shown.flatMap((name) => [worded(name), ''])];
   const lines = rows.map(({ species, electronsPerMole, quantities }) => [
     speciesText(species, look),
     exactDecimal(electronsPerMole ?? '-'),

@@ -54,7 +54,7 @@ const attention = (audited: Audited, look: Look): readonly string[] => {
   return [
     head,
     `  ${audited.text}`,
-    ...(gap === '' ? [] : [`  ${paint.faint('right minus left:')} ${gap}`]),
+    ...(gap === '' ? [] : [`  ${paint.faint('right minus left:')} ${look.unicode ? gap.replaceAll('-', '−') : gap}`]),
     ...(repair === undefined ? [] : [`  ${paint.faint('likeliest repair:')} ${repaired(repair, look)}`]),
   ];
 };

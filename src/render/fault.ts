@@ -3,13 +3,13 @@ import type { Fault, ShownCoupling, ShownReaction } from '../report/fault.ts';
 import { wrapped } from './block.ts';
 import { columns, indented } from './columns.ts';
 import type { Look } from './look.ts';
-import { reactionText, speciesText } from './spelling.ts';
+import { electronText, reactionText, speciesText } from './spelling.ts';
 
 const MOST = 8;
 
 const couplingRow = (coupling: ShownCoupling, look: Look): readonly string[] => [
   reactionText((coupling.overall ?? coupling.reaction)?.plain ?? '', look),
-  `${coupling.electrons} e-`,
+  `${coupling.electrons} ${electronText(look)}`,
 ];
 
 /** Each way to settle it with its electrons, and below it the option that does. */

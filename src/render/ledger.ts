@@ -1,16 +1,15 @@
 import type { ShownLedger } from '../desk/schema/shape.ts';
 import { type Alignment, type Cell, columns } from './columns.ts';
 import type { Look } from './look.ts';
+import { numberText } from './spelling.ts';
 
 const LABEL = 10;
-
-const minus = (text: string, look: Look): string => (look.unicode ? text.replace('-', '−') : text);
 
 const signed = (text: string): string => (/^[1-9]/.test(text) ? `+${text}` : text);
 
 /** A number of the ledger; a charge carries its sign. */
 const entry = (label: string, text: string, look: Look): string =>
-  minus(label === 'charge' ? signed(text) : text, look);
+  numberText(label === 'charge' ? signed(text) : text, look);
 
 const nothing = (look: Look): string => (look.unicode ? '·' : '.');
 
@@ -35,7 +34,9 @@ export const ledgerLines = (
   const side = (at: 0 | 1): readonly string[] => labels.map((label) => entry(label, ledger[label]?.[at] ?? '0', look));
   const gap = labels.map((label): Cell => {
     const off = residual?.[label];
-    return off === undefined ? { text: nothing(look), paint: faint } : { text: minus(signed(off), look), paint: bad };
+    return off === undefined
+      ? { text: nothing(look), paint: faint }
+      : { text: numberText(signed(off), look), paint: bad };
   });
   const rows: readonly (readonly (Cell | string)[])[] = [
     [named(''), ...labels.map((label): Cell => ({ text: label, paint: faint }))],

@@ -4,7 +4,7 @@ import { labelled } from './block.ts';
 import { type Cell, columns } from './columns.ts';
 import { ledgerLines } from './ledger.ts';
 import type { Look } from './look.ts';
-import { reactionText, speciesText } from './spelling.ts';
+import { numberText, reactionText, speciesText } from './spelling.ts';
 
 type Blocks = readonly (readonly string[])[];
 
@@ -51,7 +51,10 @@ export const redoxBlocks = (answer: RedoxAnswer, look: Look): Blocks => {
     ...(reduction === undefined ? [] : halfRows('reduction', [reduction], look)),
   ];
   const arrow = look.unicode ? '→' : '->';
-  const moved = changes.map(({ element, from, to }): readonly [string, string] => [element, `${from} ${arrow} ${to}`]);
+  const moved = changes.map(({ element, from, to }): readonly [string, string] => [
+    element,
+    `${numberText(from, look)} ${arrow} ${numberText(to, look)}`,
+  ]);
   const numbers: readonly (readonly [string, string])[] = [['electrons', electrons]];
   return [
     [look.paint.strong(reactionText(overall.plain, look))],
@@ -74,7 +77,9 @@ export const cellBlocks = (answer: CellAnswer, look: Look): Blocks => {
   const struck = cancelled.map(({ species, amount }) => `${amount} ${speciesText(species, look)}`).join(', ');
   const rows: readonly (readonly [string, string])[] = [
     ...(struck === '' ? [] : [['cancelled', struck] as const]),
-    ...(waterFormed === '0' ? [] : [['water', `${waterFormed} from H+ and OH-`] as const]),
+    ...(waterFormed === '0'
+      ? []
+      : [['water', `${waterFormed} from ${speciesText('H^+', look)} and ${speciesText('OH^-', look)}`] as const]),
     ...crossingRows(answer, look),
   ];
   return [

@@ -64,3 +64,9 @@ export const termText = (plain: string, look: Look): string =>
 /** A canonical reaction as the look wants it: coefficients stay on the line. */
 export const reactionText = (plain: string, look: Look): string =>
   plain === '' ? 'nothing is left' : styledReaction(plain, styleOf(look));
+
+/** A number that may be negative as the look wants it: with a minus sign, or with a hyphen. */
+export const numberText = (plain: string, look: Look): string => (look.unicode ? plain.replace('-', '−') : plain);
+
+/** What e^- is called in headings and counts. */
+export const electronText = (look: Look): string => (look.unicode ? 'e⁻' : 'e-');

@@ -5,7 +5,7 @@ import { page } from './block.ts';
 import { type Alignment, type Cell, columns } from './columns.ts';
 import type { Look } from './look.ts';
 import { absenceLines, cautionLines, graveLines, noteLines } from './remarks.ts';
-import { reactionText, speciesText } from './spelling.ts';
+import { electronText, reactionText, speciesText } from './spelling.ts';
 
 const HEAD = ['product', 'e- per mole', 'mol e-/kg', 'g/(A h)', 'A h/kg', 'mL/(A min)'];
 const SIDES: readonly Alignment[] = ['left', 'right', 'right', 'right', 'right', 'right'];
@@ -21,7 +21,7 @@ const cellsOf = (row: WallRow, look: Look): readonly string[] => [
 
 /** The rows under one another, each half-reaction on a line of its own above its products. */
 const tableLines = (rows: readonly WallRow[], look: Look): readonly string[] => {
-  const head = HEAD.map((text): Cell => ({ text, paint: look.paint.faint }));
+  const head = HEAD.map((words): Cell => ({ text: words.replace('e-', electronText(look)), paint: look.paint.faint }));
   const [first = '', ...lines] = columns([head, ...rows.map((row) => cellsOf(row, look))], SIDES);
   return [
     first,

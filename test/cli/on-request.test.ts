@@ -145,6 +145,36 @@ describe('a page in colour', () => {
   });
 });
 
+describe('a sheet in colour', () => {
+  it('says what it says without', async () => {
+    const files = {
+      'p.yaml': `plant: P\nabout: A works.\ncells:\n  - { name: A, anode: [H2O -> O2(g)], cathode: [Cu^2+ -> Cu] }\n`,
+    };
+    const coloured = await couplet(['sheet', 'p.yaml'], { files, terminal: true, colour: true });
+    const bare = await couplet(['sheet', 'p.yaml'], { files, terminal: true });
+    expect(bare.out).toMatch(/^A works\.$/m);
+    expect(coloured.out).toContain(ESCAPE);
+    expect(coloured.out.replaceAll(new RegExp(`${ESCAPE}\\[\\d+m`, 'g'), '')).toBe(bare.out);
+  });
+});
+
+describe('a page in Unicode', () => {
+  it.each([
+    [['species', 'SO4^2-'], 'charge      −2', 'O −2'],
+    [['redox', 'Cl2 -> Cl^- + ClO3^-', '--medium', 'base'], '0 → −1', '3 Cl₂ + 6 OH⁻'],
+    [['table', 'Cu^2+ -> Cu'], 'e⁻ per mole', 'mol e⁻/kg'],
+    [['half', 'MnO4^- -> Mn^2+', '--medium', 'acid'], '(MnO₄⁻; GHS', 'Mn²⁺'],
+    [
+      ['amounts', '--half', 'Cu^2+ -> Cu', '--species', 'Cu'],
+      'e⁻ per mole',
+      'No efficiency is known: 100 % was taken.',
+    ],
+  ])('spells signs, electrons and what calls for a caution alike: %j', async (argv, ...said) => {
+    const { out } = await couplet(argv, { terminal: true });
+    for (const words of said) expect(out).toContain(words);
+  });
+});
+
 describe('the version', () => {
   it('is that of package.json', async () => {
     const { version } = JSON.parse(readFileSync('package.json', 'utf8')) as { readonly version: string };
