@@ -165,7 +165,7 @@ describe('a page in Unicode', () => {
     [['table', 'Cu^2+ -> Cu'], 'e⁻ per mole', 'mol e⁻/kg'],
     [['half', 'MnO4^- -> Mn^2+', '--medium', 'acid'], '(MnO₄⁻; GHS', 'Mn²⁺'],
     [
-      ['amounts', '--half', 'Cu^2+ -> Cu', '--species', 'Cu'],
+      ['amounts', '--half', 'Cu^2+ -> Cu', '--species', 'Cu', '--given', 'current=1 A', '--given', 'time=1 h'],
       'e⁻ per mole',
       'No efficiency is known: 100 % was taken.',
     ],
