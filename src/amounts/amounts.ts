@@ -1,4 +1,5 @@
 import { showRational } from '../exact/rational.ts';
+import { allByRank } from '../report/precedence.ts';
 import { type Result, chain, map, success } from '../report/result.ts';
 import { ALONGSIDE_NAMES, type Companion, checkParts, companionsOf, partsOf, splitsCurrent } from './alongside.ts';
 import { type AnswerUnits, type Quantity, readWanted, showQuantities } from './answered.ts';
@@ -72,13 +73,21 @@ interface Texts {
   readonly series: Measured;
 }
 
-/** Reads the texts of an ask. Faults of reading in `given.NAME`, `want.NAME`, `cells`, `bypass`. */
-export const readTexts = (request: Pick<AmountsRequest, 'given' | 'want' | 'cells' | 'bypass'>): Result<Texts> =>
-  chain(readGivenTexts(request.given), (readings) =>
-    chain(readWanted(request.want ?? {}), (units) =>
-      chain(readStack(request), (series) => success({ readings, units, series })),
-    ),
+/** Reads the texts of an ask. Faults in `given.NAME`, `want.NAME`, `cells`, `bypass`, those of reading first. */
+export const readTexts = (request: Pick<AmountsRequest, 'given' | 'want' | 'cells' | 'bypass'>): Result<Texts> => {
+  const given = readGivenTexts(request.given);
+  const want = readWanted(request.want ?? {});
+  const stack = readStack(request);
+  return chain(first([given, want, stack]), () =>
+    chain(given, (readings) => chain(want, (units) => map(stack, (series) => ({ readings, units, series })))),
   );
+};
+
+/** The fault that comes first, or nothing: the notes come with the values. */
+const first = (results: readonly Result<unknown>[]): Result<null> => {
+  const ranked = allByRank(results);
+  return ranked.ok ? success(null) : ranked;
+};
 
 const workOut = (request: AmountsRequest, { readings, units, series }: Texts, problem: Problem): Result<Working> =>
   chain(convertGiven(readings, problem.weigh(problem.asked.species)), (given) =>

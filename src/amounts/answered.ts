@@ -1,4 +1,5 @@
-import { type Result, all, chain, failure, inField, success } from '../report/result.ts';
+import { allByRank } from '../report/precedence.ts';
+import { type Result, chain, failure, inField, success } from '../report/result.ts';
 import { wholeSpan } from '../report/span.ts';
 import { AMOUNT, DENSITY, NUMBER, sameDimension } from './dimension.ts';
 import { type Correlation, type Measured, times, uncertaintyOf } from './measured.ts';
@@ -68,7 +69,7 @@ const notAUnit = (name: QuantityName, text: string): Result<never> =>
 
 /** The units of the answer. Faults: `unknown-quantity`, `unknown-unit`, in `want.NAME`. */
 export const readWanted = (want: Readonly<Record<string, string>>): Result<AnswerUnits> =>
-  chain(all(Object.entries(want).map(([name, text]) => wantOne(name, text))), (wanted) =>
+  chain(allByRank(Object.entries(want).map(([name, text]) => wantOne(name, text))), (wanted) =>
     success(new Map([...usualUnits, ...wanted])),
   );
 

@@ -44,7 +44,8 @@ export interface Branch {
   readonly written: boolean;
 }
 
-const readShare = (text: string, index: number): Result<Share> => {
+/** A share as text: "96 %", "24/25", "0.96(1)". Faults of reading, `bad-ask` below 0, in `electrode[index].share`. */
+export const readShare = (text: string, index: number): Result<Share> => {
   const name = `electrode[${String(index)}].share`;
   const read = readQuantity(text, QUANTITIES.share);
   return chain(inField(read, name), ({ exact, value, uncertainty }) =>

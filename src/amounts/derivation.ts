@@ -171,7 +171,7 @@ export const deriveAll = (problem: Problem, given: readonly Given[], series: Mea
       const first = solve(known, relations);
       const derived = withDefault(problem, first);
       return chain(checkDivisions(relations, first.known, given), () =>
-        chain(judge(derived, given), () => chain(checkValues(derived.known, given), () => success(derived))),
+        chain(judge(derived, given), () => chain(checkValues(derived, given), () => success(derived))),
       );
     }),
   );

@@ -1,4 +1,5 @@
-import { type Result, all, chain, failure, inField, success } from '../report/result.ts';
+import { allByRank } from '../report/precedence.ts';
+import { type Result, all, chain, failure, inField, map, success } from '../report/result.ts';
 import { wholeSpan } from '../report/span.ts';
 import { didYouMean, nearest } from '../report/suggest.ts';
 import { AMOUNT, DENSITY, MOLAR_CONCENTRATION, sameDimension } from './dimension.ts';
@@ -149,17 +150,20 @@ export interface GivenReadings {
   readonly readings: readonly GivenReading[];
 }
 
-/** Reads every quantity given, in the order of the ask. Faults of reading carry their field and span. */
+/** Reads every quantity given, in the order of the ask. Faults carry their field and span, those of reading first. */
 export const readGivenTexts = (given: GivenTexts): Result<GivenReadings> => {
   const entries = Object.entries(given).filter(([name]) => name !== 'record');
-  const read = all(
+  const read = allByRank(
     entries.map(([name, text]) => {
       const known = quantityNamed(name, 'given');
       if (!known.ok) return known;
       return typeof text === 'string' ? giveOne(known.value, text) : notText(name);
     }),
   );
-  return chain(giveRecord(given['record']), (recorded) => chain(read, (readings) => success({ recorded, readings })));
+  const recorded = giveRecord(given['record']);
+  const ranked = allByRank<unknown>([recorded, read]);
+  if (!ranked.ok) return ranked;
+  return chain(recorded, (record) => map(read, (readings) => ({ recorded: record, readings })));
 };
 
 /** Everything given in SI base units, concentrations counted in moles of the species of this molar mass. */

@@ -24,16 +24,30 @@ export const nameOf = (name: VariableName): string =>
 const culprit = (value: Measured, given: readonly Given[]): Given | undefined =>
   given.filter(({ measured }) => [...measured.slopes.keys()].some((source) => value.slopes.has(source))).at(-1);
 
-const impossible = (value: Measured, given: readonly Given[], message: string, at?: VariableName): Result<never> => {
+const IMPOSSIBLE = 'What is given cannot all be true: correct it, or leave out what can be derived.';
+
+const impossible = (
+  value: Measured,
+  given: readonly Given[],
+  message: string,
+  at?: VariableName,
+  hint = IMPOSSIBLE,
+): Result<never> => {
   const named = given.find(({ name }) => name === at) ?? culprit(value, given);
   return failure({
     code: 'contradiction',
     message,
     field: named?.field ?? 'given',
     ...(named === undefined || named.text === '' ? {} : { span: wholeSpan(named.text) }),
-    hint: 'What is given cannot all be true: correct it, or leave out what can be derived.',
+    hint,
   });
 };
+
+/** Values and which of them nobody gave. */
+interface Values {
+  readonly known: Known;
+  readonly assumed: ReadonlySet<VariableName>;
+}
 
 /** No charge makes these negative, whichever way it flows; a mass that is taken off may be. */
 const NEVER_NEGATIVE: readonly VariableName[] = [
@@ -62,12 +76,14 @@ const checkVapour = (known: Known, given: readonly Given[]): Result<null> => {
 };
 
 /** A tank cannot lose more than it holds; what is below nothing within its digits passes. */
-const checkConcentration = (name: 'from' | 'to', known: Known, given: readonly Given[]): Result<null> => {
+const checkConcentration = (name: 'from' | 'to', { known, assumed }: Values, given: readonly Given[]): Result<null> => {
   const value = known.get(name);
   const other = known.get(name === 'to' ? 'from' : 'to');
   if (value === undefined || value.value >= 0 || isNearZero(value, Math.abs(other?.value ?? 0))) return success(null);
   const shown = String(Number((value.value / 1000).toPrecision(4)));
-  return impossible(value, given, `${nameOf(name)} comes out as ${shown} mol/L: the tank does not hold so much`);
+  const hint = assumed.has('efficiency') ? 'An efficiency of 100 % was taken: give the efficiency.' : undefined;
+  const message = `${nameOf(name)} comes out as ${shown} mol/L: the tank does not hold so much`;
+  return impossible(value, given, message, undefined, hint);
 };
 
 const checkTankVolume = (known: Known, given: readonly Given[]): Result<null> => {
@@ -77,10 +93,11 @@ const checkTankVolume = (known: Known, given: readonly Given[]): Result<null> =>
 };
 
 /** Values that follow and cannot be. Fault: `contradiction`, at a quantity that enters. */
-export const checkValues = (known: Known, given: readonly Given[]): Result<null> => {
+export const checkValues = (values: Values, given: readonly Given[]): Result<null> => {
+  const { known } = values;
   const checks = [
     checkVapour(known, given),
-    ...(['from', 'to'] as const).map((name) => checkConcentration(name, known, given)),
+    ...(['from', 'to'] as const).map((name) => checkConcentration(name, values, given)),
     checkTankVolume(known, given),
     ...NEVER_NEGATIVE.map((name) => checkNegative(name, known, given)),
   ];

@@ -1,5 +1,5 @@
 import { computeAmounts, readTexts } from '../amounts/amounts.ts';
-import type { Circuit } from '../amounts/branches.ts';
+import { type Circuit, readShare } from '../amounts/branches.ts';
 import { computeSeries } from '../amounts/series.ts';
 import { type TankBalance, tankBalance } from '../amounts/tank-balance.ts';
 import type { AmountsAnswer, AmountsRequest } from '../amounts/working.ts';
@@ -11,7 +11,7 @@ import { readCorrelations } from './correlations.ts';
 import { dividedOf } from './divided.ts';
 import { under } from './electrodes.ts';
 import type { DeskOptions } from './hydronium.ts';
-import { allByRank } from './precedence.ts';
+import { allByRank } from '../report/precedence.ts';
 import type { AmountsAnswerShown } from './schema/answer.ts';
 import type { AskOf, SeriesCell } from './schema/ask.ts';
 import type { Quantity } from './schema/shape.ts';
@@ -35,13 +35,18 @@ interface ReadCell extends PlacedCircuit {
   readonly species: Species;
 }
 
+const sharesOf = (ask: AmountsAsk | SeriesCell): readonly Result<unknown>[] =>
+  'electrode' in ask
+    ? ask.electrode.flatMap(({ share }, at) => (share === undefined ? [] : [readShare(share, at)]))
+    : [];
+
 /** The reactions, the species and the quantities of one cell: all are read before a fault of one is told. */
 const readCell = (ask: AmountsAsk | SeriesCell, options: DeskOptions): Result<ReadCell> => {
   const circuit = readCircuit(ask, options);
   const asked = inField(readSpecies(ask.species, options), 'species');
   const { given = {}, want } = ask;
   const texts = readTexts({ given, ...(want === undefined ? {} : { want }), ...('ask' in ask ? stackOf(ask) : {}) });
-  return chain(withoutNotes(allByRank<unknown>([circuit, asked, texts])), () =>
+  return chain(withoutNotes(allByRank<unknown>([circuit, asked, texts, ...sharesOf(ask)])), () =>
     chain(circuit, (through) =>
       map(asked, ({ species }) => ({
         circuit: through,

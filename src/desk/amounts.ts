@@ -11,7 +11,7 @@ import type { Equation } from '../species/equation.ts';
 import { isElectron, sameSpecies } from '../species/species.ts';
 import { type SkeletonFields, balanceSkeleton, composeDiagram, readElectrodes, under } from './electrodes.ts';
 import { type DeskOptions, readSketch, readWritten } from './hydronium.ts';
-import { allByRank } from './precedence.ts';
+import { allByRank } from '../report/precedence.ts';
 import type { AskOf, AskedMedium, CellFields, SeriesCell } from './schema/ask.ts';
 import { readMedium } from './settings.ts';
 

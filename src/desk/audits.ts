@@ -5,7 +5,7 @@ import type { Medium } from '../redox/medium.ts';
 import { type Result, chain, inField, map, success } from '../report/result.ts';
 import type { Equation } from '../species/equation.ts';
 import { type DeskOptions, readWritten } from './hydronium.ts';
-import { allByRank } from './precedence.ts';
+import { allByRank } from '../report/precedence.ts';
 import type { AskOf } from './schema/ask.ts';
 import { readExact, readMedium } from './settings.ts';
 

@@ -12,7 +12,7 @@ import { type Result, chain, failure, inField, map, success } from '../report/re
 import type { Equation } from '../species/equation.ts';
 import { readDiagram } from '../species/diagram.ts';
 import { type DeskOptions, readSketch } from './hydronium.ts';
-import { allByRank } from './precedence.ts';
+import { allByRank } from '../report/precedence.ts';
 import type { AskedMedium, CellFields } from './schema/ask.ts';
 import { readMedium, readShare } from './settings.ts';
 

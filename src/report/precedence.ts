@@ -1,5 +1,5 @@
-import type { FaultCode } from '../report/fault.ts';
-import { type Result, all } from '../report/result.ts';
+import type { FaultCode } from './fault.ts';
+import { type Result, all } from './result.ts';
 
 /** Outcomes in the contract's order: of several faults in one ask the first of these is told. */
 const LATER: readonly (readonly FaultCode[])[] = [
