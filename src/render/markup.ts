@@ -1,8 +1,5 @@
-/** `text` with what HTML and SVG keep for themselves written as entities, and without characters that XML forbids. */
-export const escaped = (text: string): string =>
-  Array.from(text)
-    .map((point) => (FORBIDDEN.test(point) ? '\ufffd' : (ENTITIES[point] ?? point)))
-    .join('');
+import type { Piece } from '../notation/print/pieces.ts';
+import { speciesPieces, styledReaction, styledSpecies } from './spelling.ts';
 
 const ENTITIES: Readonly<Record<string, string>> = {
   '&': '&amp;',
@@ -13,7 +10,13 @@ const ENTITIES: Readonly<Record<string, string>> = {
 };
 
 /** Controls but tab and line end, lone surrogates, and what turns the direction of text around. */
-const FORBIDDEN = /[^\P{Cc}\t\n]|[\p{Cs}\ufffe\uffff\u202a-\u202e\u2066-\u2069]/u;
+const FORBIDDEN = /[^\P{Cc}\t\n]|[\p{Cs}\ufffe\uffff\u202a-\u202e\u2066-\u2069]/gu;
+
+const allowed = (text: string): string => text.replaceAll(FORBIDDEN, '\ufffd');
+
+/** `text` with what HTML and SVG keep for themselves written as entities, and without characters that XML forbids. */
+export const escaped = (text: string): string =>
+  allowed(text).replaceAll(/[&<>"']/g, (point) => ENTITIES[point] ?? point);
 
 /** A part of a formula: on the line, lowered or raised. */
 export interface FormulaPart {
@@ -21,21 +24,29 @@ export interface FormulaPart {
   readonly place: 'line' | 'low' | 'high';
 }
 
-/** `^2+`, `^{18}`: raised; a number behind a letter or a closing bracket: lowered, "1/3" and "0.5" too. */
-const PARTS = /\^\{(\d+)\}|\^(\d*[+-])|(?<=[A-Za-z)\]}])(\d+(?:\.\d+|\/\d+)?)|->|[*]|./gsu;
-
-const partOf = ([whole, mass, charge, count]: RegExpMatchArray): FormulaPart => {
-  if (mass !== undefined) return { text: mass, place: 'high' };
-  if (charge !== undefined) return { text: charge.replace('-', '−'), place: 'high' };
-  if (count !== undefined) return { text: count, place: 'low' };
-  return { text: whole === '->' ? '→' : whole === '*' ? '·' : whole, place: 'line' };
+const partOf = (piece: Piece): FormulaPart => {
+  switch (piece.kind) {
+    case 'count':
+      return { text: piece.text.includes('/') ? `(${piece.text})` : piece.text, place: 'low' };
+    case 'mass':
+      return { text: piece.text, place: 'high' };
+    case 'charge':
+      return { text: piece.size + (piece.sign === '-' ? '−' : '+'), place: 'high' };
+    case 'dot':
+      return { text: '·', place: 'line' };
+    case 'state':
+      return { text: `(${piece.text})`, place: 'line' };
+    case 'symbol':
+    case 'bracket':
+    case 'multiplier':
+      return { text: piece.text, place: 'line' };
+  }
 };
 
-/** A canonical species or reaction in the parts that print differently; neighbours on the line are joined. */
+/** A canonical species in the parts that a picture places by itself; neighbours on the line are joined. */
 export const formulaParts = (plain: string): readonly FormulaPart[] => {
   const parts: FormulaPart[] = [];
-  for (const match of plain.matchAll(PARTS)) {
-    const part = partOf(match);
+  for (const part of speciesPieces(plain).map(partOf)) {
     const last = parts.at(-1);
     if (last?.place === 'line' && part.place === 'line')
       parts[parts.length - 1] = { ...last, text: last.text + part.text };
@@ -44,16 +55,8 @@ export const formulaParts = (plain: string): readonly FormulaPart[] => {
   return parts;
 };
 
-/** A coefficient and the blank behind it: a line is not broken between it and its species. */
-const COEFFICIENT = /(?<=^| )([\d./]+) (?=\S)/g;
-
-const TAGS = { line: '', low: 'sub', high: 'sup' } as const;
-
 /** A canonical species or reaction in HTML. */
-export const formulaHtml = (plain: string): string =>
-  formulaParts(plain.replace(COEFFICIENT, '$1\u00a0'))
-    .map(({ text, place }) => {
-      const tag = TAGS[place];
-      return tag === '' ? escaped(text) : `<${tag}>${escaped(text)}</${tag}>`;
-    })
-    .join('');
+export const formulaHtml = (plain: string): string => {
+  const text = allowed(plain);
+  return text.includes('->') ? styledReaction(text, 'html') : styledSpecies(text, 'html');
+};

@@ -1,6 +1,6 @@
 import { ONE, ZERO } from '../exact/rational.ts';
 import { type PrintStyle, type PrintedTerm, printReaction, printSpecies, printTerm } from '../notation/print/print.ts';
-import type { Spelled } from '../notation/print/pieces.ts';
+import { type Piece, type Spelled, piecesOf } from '../notation/print/pieces.ts';
 import { readSpecies } from '../species/read.ts';
 import type { Look } from './look.ts';
 
@@ -29,6 +29,9 @@ const spelledOf = (plain: string): Spelled => {
   const read = readSpecies(plain);
   return read.ok ? read.value.species : withNames(plain, namesIn(plain));
 };
+
+/** A canonical species cut into what a picture places differently. */
+export const speciesPieces = (plain: string): readonly Piece[] => piecesOf(spelledOf(plain));
 
 const TERM = /^(?:(\d[\d./]*) )?(.+)$/s;
 

@@ -38,10 +38,18 @@ describe('a scale', () => {
 
 describe('markup', () => {
   it('lowers counts, raises charges, and leaves coefficients and states on the line', () => {
-    expect(formulaHtml('2 Ag(S2O3)2^3-(aq)')).toBe(
-      '2\u00a0Ag(S<sub>2</sub>O<sub>3</sub>)<sub>2</sub><sup>3−</sup>(aq)',
+    expect(formulaHtml('2 Ag(S2O3)2^3-(aq) -> 2 Ag')).toBe(
+      '2\u00a0Ag(S<sub>2</sub>O<sub>3</sub>)<sub>2</sub><sup>3−</sup>(aq) → 2\u00a0Ag',
     );
     expect(formulaHtml('e^- -> Fe0.95O')).toBe('e<sup>−</sup> → Fe<sub>0.95</sub>O');
+    expect(formulaHtml('[18O]2^-')).toBe('<sup>18</sup>O<sub>2</sub><sup>−</sup>');
+    expect(formulaParts('[18O]2^-(g)').map(({ text, place }) => `${place} ${text}`)).toEqual([
+      'high 18',
+      'line O',
+      'low 2',
+      'high −',
+      'line (g)',
+    ]);
     expect(formulaHtml('CuSO4*5H2O')).toBe('CuSO<sub>4</sub>·5H<sub>2</sub>O');
   });
 
