@@ -6,6 +6,7 @@ import { type Result, chain, inField, success } from '../report/result.ts';
 import type { Equation } from '../species/equation.ts';
 import { type Species, isElectron } from '../species/species.ts';
 import { type Audit, type Verdict, auditEquation } from './audit.ts';
+import { claimNotes } from './claimed-electrons.ts';
 import { type Combination, type Composition, combinationOf, composed, electronsGiven } from './combination.ts';
 import { spectatorNotes } from './spectators.ts';
 
@@ -181,19 +182,6 @@ const ionicNotes = ({ anode, cathode, overall }: Parts, { match }: Made): readon
   const [second] = versionsOf(cathode);
   if (match !== null || overall.residual.size > 0 || first === undefined || second === undefined) return [];
   return spectatorNotes(first.reaction, second.reaction, overall.reaction);
-};
-
-const claimNotes = (claimed: Rational | null, found: Rational | null): readonly Note[] => {
-  if (claimed !== null && signOf(claimed) <= 0n) return [noNumber(claimed, found)];
-  return claimed === null || found === null || claimed.equals(found)
-    ? []
-    : [note('electrons-claimed', `${showRational(found)} electrons are exchanged, not ${showRational(claimed)}.`)];
-};
-
-/** An electron number is the count of electrons exchanged, whichever way they go. */
-const noNumber = (claimed: Rational, found: Rational | null): Note => {
-  const exchanged = found === null ? '' : ` ${showRational(found)} electrons are exchanged.`;
-  return note('electrons-claimed', `An electron number is positive, ${showRational(claimed)} is none.${exchanged}`);
 };
 
 const perMole = ({ overall, electrons }: Made): CellAudit['electronsPerMole'] =>

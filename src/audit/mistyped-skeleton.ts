@@ -14,7 +14,7 @@ const MOST_TERMS = 12;
 const MOST_SOLVED = 40;
 
 /** Which terms may be mistyped: those that look it, or any. */
-export type Suspicion = 'suspects' | 'any';
+type Suspicion = 'suspects' | 'any';
 
 /**
  * Class 6 where the numbers are those of a skeleton: one species for its near ones, and the numbers solved anew.

@@ -45,10 +45,10 @@ const meant = (
   );
   if (!isWhole(charge) || [...wanted.values()].some((count) => signOf(count) < 0n)) return [];
   if ([...wanted.values()].every(isZero)) return [];
-  return distinct([...spelledAlike(species, wanted, charge), ...fromTable(species, wanted, charge)]);
+  return nearestSpellings(species, [...fromTable(species, wanted, charge), ...spelledAlike(species, wanted, charge)]);
 };
 
-/** The written spelling with another charge, or with another subscript. */
+/** The written spelling with another charge, or with another subscript at the same charge. */
 const spelledAlike = (
   species: Species,
   wanted: ReadonlyMap<string, Rational>,
@@ -56,9 +56,7 @@ const spelledAlike = (
 ): readonly Species[] => {
   const atomsStand = [...wanted].every(([element, count]) => (species.composition.get(element) ?? ZERO).equals(count));
   if (atomsStand) return [withCharge(species, charge)].filter(isBelievable);
-  return withOneSubscript(withCharge(species, charge), wanted).filter(
-    (found) => isCommon(found) || (charge.equals(species.charge) && isBelievable(found)),
-  );
+  return charge.equals(species.charge) ? withOneSubscript(species, wanted).filter(isBelievable) : [];
 };
 
 const isCommon = (species: Species): boolean => familiarityOf(species) === 'common';
@@ -73,7 +71,9 @@ const fromTable = (species: Species, wanted: ReadonlyMap<string, Rational>, char
     .filter((found) => editDistance(plainSpecies(found), plainSpecies(species)) <= 3)
     .map((found) => ({ ...found, state: species.state }));
 
-const distinct = (species: readonly Species[]): readonly Species[] => {
-  const seen = new Set<string>();
-  return species.filter(({ key }) => !seen.has(key) && seen.add(key).size > 0);
+/** Of each contents the spelling nearest to what was written, that of the table before another as near. */
+const nearestSpellings = (written: Species, found: readonly Species[]): readonly Species[] => {
+  const distance = (one: Species): number => editDistance(plainSpecies(one), plainSpecies(written));
+  const sorted = found.toSorted((a, b) => distance(a) - distance(b));
+  return sorted.filter((one, index) => sorted.findIndex((other) => sameContents(other, one)) === index);
 };

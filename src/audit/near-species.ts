@@ -44,7 +44,7 @@ const isOneSlipAway = (species: Species, other: Species): boolean => {
  *
  *     Na|SO4     the cut between the ions is tried everywhere, with every ratio:   Na2SO4
  */
-export const saltsOfSameIons = (species: Species): readonly Species[] => {
+const saltsOfSameIons = (species: Species): readonly Species[] => {
   const [part, ...adducts] = species.parts;
   if (part === undefined || adducts.length > 0 || !isZero(species.charge)) return [];
   return part.members.slice(1).flatMap((_, index) => {

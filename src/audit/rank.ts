@@ -5,12 +5,12 @@ import { type Rational, ONE, ZERO, isZero } from '../exact/rational.ts';
 import { isElectron } from '../species/species.ts';
 import { type Change, changesOf } from './changes.ts';
 import { isHelper, isHydroxide, isProton } from './helper-ions.ts';
-import { familiarityOf, sameContents } from './known.ts';
 import { standsOnBothSides } from './mistyped-skeleton.ts';
 import { isSuspect } from './near-species.ts';
 import type { Candidate, Problem } from './problem.ts';
-import { EDIT_COSTS, IMPROBABLE, REPAIR_KINDS, RESPELLING_COSTS, type RepairKind, TIE } from './repair-kinds.ts';
+import { EDIT_COSTS, IMPROBABLE, REPAIR_KINDS, type RepairKind, TIE } from './repair-kinds.ts';
 import { redoxChangeOf } from './redox-change.ts';
+import { respellingCost } from './respelling-cost.ts';
 import { doublings } from './scale.ts';
 import { type Draft, type DraftTerm, reactionOf } from './writing.ts';
 
@@ -118,61 +118,6 @@ const numberCost = (ofSkeleton: boolean, was: DraftTerm, is: DraftTerm): number 
   const far = EDIT_COSTS.perDoubling * doublings(was.coefficient, is.coefficient);
   if (ofSkeleton) return EDIT_COSTS.skeletonNumber + far;
   return far + (was.coefficientWritten ? EDIT_COSTS.writtenNumber : EDIT_COSTS.unwrittenNumber);
-};
-
-const respellingCost = ({ medium }: Problem, was: DraftTerm, is: DraftTerm): number => {
-  if (isIonExchange(was, is)) {
-    const foreign = medium !== undefined && !medium.helpers.some(({ key }) => key === was.species.key);
-    return foreign ? EDIT_COSTS.foreignIonExchanged : EDIT_COSTS.ionExchanged;
-  }
-  const further = EDIT_COSTS.perFurtherUnit * Math.max(0, distanceBetween(was, is) - 1);
-  const twoSlips = !was.species.charge.equals(is.species.charge) && !sameAtoms(was, is);
-  const stateClash = isZero(was.species.charge) && !isZero(is.species.charge) && isBulk(was.species.state);
-  return (
-    RESPELLING_COSTS[familiarityOf(was.species)][meantAs(is)] +
-    further +
-    (sameElements(was, is) ? 0 : EDIT_COSTS.otherElements) +
-    (twoSlips ? EDIT_COSTS.chargeAndAtoms : 0) +
-    (stateClash ? EDIT_COSTS.ionInBulk : 0) -
-    (isDissolvedElement(was) ? EDIT_COSTS.dissolvedElement : 0)
-  );
-};
-
-const meantAs = ({ species }: DraftTerm): 'common' | 'salt' | 'other' => {
-  const familiarity = familiarityOf(species);
-  return familiarity === 'common' || familiarity === 'salt' ? familiarity : 'other';
-};
-
-const sameElements = ({ species: a }: DraftTerm, { species: b }: DraftTerm): boolean =>
-  a.composition.size === b.composition.size && [...a.composition.keys()].every((element) => b.composition.has(element));
-
-const sameAtoms = ({ species: a }: DraftTerm, { species: b }: DraftTerm): boolean =>
-  sameContents({ ...a, charge: ZERO }, { ...b, charge: ZERO });
-
-/** An element of single atoms in solution lacks its charge: Ag(aq). */
-const isDissolvedElement = ({ species }: DraftTerm): boolean =>
-  species.state === 'aq' &&
-  isZero(species.charge) &&
-  species.composition.size === 1 &&
-  [...species.composition.values()].every((count) => count.equals(ONE));
-
-/** No ion is written as a solid, a liquid or a gas. */
-const isBulk = (state: string | null): boolean => state === 's' || state === 'l' || state === 'g';
-
-const isIonExchange = (was: DraftTerm, is: DraftTerm): boolean =>
-  (isProton(was.species) && isHydroxide(is.species)) || (isHydroxide(was.species) && isProton(is.species));
-
-/** Atoms and charges by which two species differ. */
-const distanceBetween = ({ species: a }: DraftTerm, { species: b }: DraftTerm): number => {
-  const size = (value: Rational): number => Number(value.n) / Number(value.d);
-  // a sign turned over is one slip, however large the charge
-  const isTurned = !isZero(a.charge) && a.charge.equals(b.charge.neg());
-  let sum = isTurned ? 1 : size(a.charge.sub(b.charge));
-  for (const element of new Set([...a.composition.keys(), ...b.composition.keys()])) {
-    const here = a.composition.get(element) ?? ZERO;
-    sum += size(here.sub(b.composition.get(element) ?? ZERO));
-  }
-  return sum;
 };
 
 /** A re-solve that leaves hardly a number standing, or protons and electrons brought in together. */

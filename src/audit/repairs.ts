@@ -91,12 +91,15 @@ const onlyImprobable = ({ reaction, changes }: Ranked): string =>
     ? `No plausible repair was found. Only protons and electrons added together would balance it (${plainReaction(reaction)}), and they balance nearly anything.`
     : `No plausible repair was found. The only balance of these species, ${plainReaction(reaction)}, leaves hardly a number as written: look for a mistyped species.`;
 
+const SEVERAL = 'the written species allow several balances, and no one or two numbers settle which was meant';
+
 /** Why nothing was found: an element on one side only, or more than one slip. */
-const reasonFor = ({ draft }: Problem, residual: ReadonlyMap<string, Rational>): string => {
+const reasonFor = ({ draft, balances }: Problem, residual: ReadonlyMap<string, Rational>): string => {
   const sidesOf = (element: string): ReadonlySet<string> =>
     new Set(draft.filter(({ species }) => species.composition.has(element)).map(({ side }) => side));
   const orphan = [...residual.keys()].find((element) => sidesOf(element).size === 1);
-  if (orphan === undefined) return 'No plausible repair was found: no single slip explains what is left over.';
+  if (orphan === undefined)
+    return `No plausible repair was found: ${balances.length > 1 ? SEVERAL : 'no single slip explains what is left over'}.`;
   const [side = 'left'] = sidesOf(orphan);
   return `No plausible repair was found: ${orphan} stands on the ${side} only.`;
 };

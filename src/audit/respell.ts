@@ -26,13 +26,18 @@ interface Slot {
   readonly set: (count: Rational) => Species;
 }
 
+/** A round bracket that counts once goes: CuNO3, not Cu(NO3). */
+const bare = (member: Member): readonly Member[] =>
+  member.kind === 'group' && member.bracket === '(' && member.count.equals(ONE) ? member.members : [member];
+
 const slotsIn = (
   members: readonly Member[],
   outer: Rational,
   rebuild: (changed: readonly Member[]) => Species,
 ): Slot[] =>
   members.flatMap((member, index) => {
-    const replace = (changed: Member): Species => rebuild(members.map((other, at) => (at === index ? changed : other)));
+    const replace = (changed: Member): Species =>
+      rebuild(members.flatMap((other, at) => (at === index ? bare(changed) : [other])));
     const one = { ...member, count: ONE };
     const own: Slot = {
       worth: countAtoms([{ multiplier: outer, members: [one] }]),

@@ -314,4 +314,15 @@ describe('what no chemist would write', () => {
       '4 Co(C3H8N2)3^3+ + 2 H2O -> 4 Co(C3H8N2)3^2+ + O2 + 4 H^+',
     ]);
   });
+
+  it('does not say of several balances that a slip explains nothing', () => {
+    const { audit, notes } = audited('H2O2 + MnO4^- + H^+ -> Mn^2+ + O2 + H2O');
+    expect(audit.repairs).toEqual([]);
+    expect(notes.find(({ code }) => code === 'no-repair')?.message).toContain('several balances');
+  });
+
+  it('spells a salt that a bracket is not needed in without it', () => {
+    expect(repairs('AgNO3 + Cu -> Cu(NO3)3 + Ag')).toContain('AgNO3 + Cu -> CuNO3 + Ag');
+    expect(repairs('C2H5OH + H2O -> CH3COOH + 3 H^+ + 4 e^-').filter((text) => text.includes('HO^-'))).toEqual([]);
+  });
 });
