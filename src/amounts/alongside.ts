@@ -38,6 +38,8 @@ export const partsOf = (problem: Problem, { derived: { known }, found }: Shared)
   const parts = problem.branches.map(({ share }, branch) => {
     const measured = share?.measured ?? found?.[branch] ?? null;
     if (found !== null) return measured;
+    // An efficiency of several reactions together says nothing of any of them.
+    if (measured === null && own.size > 1) return null;
     return own.has(branch) ? ownPart(problem, measured, efficiency) : measured;
   });
   const open = parts.flatMap((part, branch) => (part === null ? [branch] : []));

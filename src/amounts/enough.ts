@@ -136,7 +136,11 @@ const missingFor = (working: Working, name: QuantityName): readonly string[] => 
   if (name === 'share' || name === 'efficiency') return missingForEfficiency(working);
   if (working.derived.assumed.has(name)) return [name];
   const variable = variableOf(working, name);
-  return whatWouldDo(knowledgeOf(working), (names) => names.has(variable), [name]);
+  const found = whatWouldDo(knowledgeOf(working), (names) => names.has(variable), [name]);
+  if (found.length > 0) return found;
+  // No relation of this ask leads there: a tank needs its other figures, anything else can only be given.
+  const tank = TANK.filter((one) => one !== name && !working.derived.known.has(one));
+  return name === 'from' || name === 'to' ? tank : [name];
 };
 
 const doesNotFollow = (working: Working, name: QuantityName): Result<never> => {

@@ -97,17 +97,25 @@ const alike = (
   return notSettled(`these reactions have as much of ${name} for a charge: the amount does not say their shares`);
 };
 
+/** What the open reactions of the species take together: what an efficiency leaves of it, else what is left of the whole. */
+const remainderOf = ({ branches }: Problem, own: readonly Own[], efficiency: Measured | undefined): Measured => {
+  const whole = branches.flatMap(({ share }) => share?.measured ?? []);
+  const written = efficiency === undefined ? whole : own.flatMap(({ share }) => share ?? []);
+  return weightedSum([[1, efficiency ?? WHOLE], ...written.map((share) => [-1, share] as const)]);
+};
+
 const sharesOf = (
-  { asked, branches }: Problem,
+  problem: Problem,
   perElectron: Measured,
   own: readonly Own[],
+  efficiency: Measured | undefined,
   given: readonly Given[],
 ): Result<FoundShares> => {
-  const written = branches.flatMap(({ share }) => share?.measured ?? []);
-  const rest = weightedSum([[1, WHOLE], ...written.map((share) => [-1, share] as const)]);
+  const { asked, branches } = problem;
+  const rest = remainderOf(problem, own, efficiency);
   const [one, two, more] = own.filter(({ share }) => share === null);
   const open = branches.filter(({ share }) => share === null).length;
-  if (one === undefined || more !== undefined || (two !== undefined && open > 2))
+  if (one === undefined || more !== undefined || (two !== undefined && open > 2 && efficiency === undefined))
     return notSettled(
       `the shares of ${String(open)} reactions are open: the amount of ${asked.name} alone does not settle them`,
     );
@@ -140,8 +148,7 @@ export const findShares = (problem: Problem, derived: Derived, given: readonly G
   const { known, relations } = derived;
   const amount = known.get('amount');
   const net = known.get('net');
-  if (!isOpen(problem) || amount === undefined || net === undefined || known.has('efficiency'))
-    return success({ derived, found: null });
+  if (!isOpen(problem) || amount === undefined || net === undefined) return success({ derived, found: null });
   const { parts, name } = problem.asked;
   const [sign] = parts.map(({ perElectron }) => Math.sign(toFloat(perElectron)));
   if (parts.some(({ perElectron }) => Math.sign(toFloat(perElectron)) !== sign))
@@ -155,10 +162,12 @@ export const findShares = (problem: Problem, derived: Derived, given: readonly G
     yield: Math.abs(toFloat(size)),
     share: problem.branches[branch]?.share?.measured ?? null,
   }));
-  const found = sharesOf(problem, perElectron, own, given);
+  const found = sharesOf(problem, perElectron, own, known.get('efficiency'), given);
   if (!found.ok) return found;
   const shares = own.flatMap(({ branch, share }) => share ?? found.value[branch] ?? []);
   const efficiency = weightedSum(shares.map((share) => [1, share] as const));
+  if (!compareValues(known.get('efficiency') ?? efficiency, efficiency).agrees)
+    return shareFault(given, `the efficiency given and the amount of ${name} do not go together`);
   const solution = derive(new Map([...known, ['efficiency', efficiency] as const]), relations);
   const settled = { ...derived, known: solution.known, steps: [...derived.steps, ...solution.derived] };
   return success({ derived: settled, found: found.value });

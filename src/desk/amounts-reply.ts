@@ -5,16 +5,16 @@ import { type TankBalance, tankBalance } from '../amounts/tank-balance.ts';
 import type { AmountsAnswer, AmountsRequest } from '../amounts/working.ts';
 import { type Result, chain, failure, inField, map, success } from '../report/result.ts';
 import { readSpecies } from '../species/read.ts';
-import { type Species, sameSpecies } from '../species/species.ts';
+import type { Species } from '../species/species.ts';
 import { readCircuit } from './amounts.ts';
 import { readCorrelations } from './correlations.ts';
 import { dividedOf } from './divided.ts';
 import { under } from './electrodes.ts';
+import { asText, withFoundShares } from './found-shares.ts';
 import type { DeskOptions } from './hydronium.ts';
 import { allByRank } from '../report/precedence.ts';
 import type { AmountsAnswerShown } from './schema/answer.ts';
 import type { AskOf, SeriesCell } from './schema/ask.ts';
-import type { Quantity } from './schema/shape.ts';
 import { strictly } from './strict-amounts.ts';
 
 type AmountsAsk = AskOf<'amounts'>;
@@ -85,27 +85,10 @@ const requestOf = (ask: AmountsAsk, { circuit, species }: ReadCell): Result<Amou
     ...stackOf(ask),
   }));
 
-const asText = ({ value, unit, uncertainty }: Quantity): string =>
-  `${String(value)} ${unit}${uncertainty === undefined ? '' : ` ± ${String(uncertainty)} ${unit}`}`;
-
-/** Two reactions in parallel without shares: what was measured has given that of the species asked, the other takes the rest. */
-const withFoundShare = ({ circuit, species }: AmountsRequest, share: Quantity | undefined): Circuit => {
-  if (circuit.kind !== 'electrode' || share === undefined || circuit.reactions.length !== 2) return circuit;
-  if (circuit.reactions.some((one) => one.share !== undefined)) return circuit;
-  const takesPart = circuit.reactions.map(({ reaction }) =>
-    reaction.terms.some((term) => sameSpecies(term.species, species)),
-  );
-  if (takesPart[0] === takesPart[1]) return circuit;
-  const reactions = circuit.reactions.map((one, at) =>
-    takesPart[at] === true ? { ...one, share: asText(share) } : one,
-  );
-  return { kind: 'electrode', reactions };
-};
-
 /** The balance of the tank for the charge of an answer: what it was derived from need not be derived again. */
-const tankOf = (request: AmountsRequest, { quantities }: AmountsAnswer, stack: object): Result<TankBalance> => {
-  const { charge, efficiency, share } = quantities;
-  const circuit = withFoundShare(request, share);
+const tankOf = (request: AmountsRequest, answer: AmountsAnswer, stack: object): Result<TankBalance> => {
+  const { charge, efficiency } = answer.quantities;
+  const circuit = withFoundShares(request, answer);
   const lone = circuit.kind === 'half' || (circuit.kind === 'electrode' && circuit.reactions.length === 1);
   const { blank } = request.given;
   const given = {

@@ -42,6 +42,14 @@ describe('what leads nowhere', () => {
     expect(wanted).toMatchObject({ code: 'not-enough-given', field: 'want.blank', missing: ['blank'] });
   });
 
+  it.each<readonly [string, string, readonly string[]]>([
+    ['temperature', 'K', ['temperature']],
+    ['from', 'g/L', ['volume', 'to']],
+    ['area', 'dm^2', ['time', 'current_density']],
+  ])('names what would give %s', (name, unit, missing) => {
+    expect(faultOf(COPPER, 'Cu', { charge: '1 A h' }, { want: { [name]: unit } })).toMatchObject({ missing });
+  });
+
   it('names nothing where only a division by nothing is in the way', () => {
     const still = { from: '3 g/L', to: '3 g/L', charge: '1 C' };
     const fault = faultOf(COPPER, 'Cu^2+', still, { want: { volume: 'L' } });

@@ -72,6 +72,13 @@ describe('shares of two reactions of one species', () => {
     expect(alongside['H2']?.['amount']?.value).toBeCloseTo(0.4, 9);
   });
 
+  it('share what an efficiency leaves them', () => {
+    // s + t = 0.9 and s/2 + t = 2.5/4: s = 0.55, t = 0.35
+    const { alongside } = answerOf(both, 'H2O', { charge: '4 F', amount: '2.5 mol', efficiency: '90 %' });
+    expect(alongside['O2']?.['share']?.value).toBeCloseTo(55, 9);
+    expect(alongside['H2O2']?.['share']?.value).toBeCloseTo(35, 9);
+  });
+
   it('are a contradiction where no shares give the amount', () => {
     expect(faultOf(both, 'H2O', { charge: '4 F', amount: '5 mol' })).toMatchObject({
       code: 'contradiction',
