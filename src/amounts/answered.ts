@@ -44,15 +44,15 @@ const wantOne = (name: string, text: string): Result<readonly [QuantityName, Ans
     }),
   );
 
+/** An ampere hour in one word: what divides it, its prefix, its power.   g/mAh, Ah^-1 */
+const AMPERE_HOUR = /(\/\s*|\bper\s+)?(?<!\p{L})([µumkM]?)Ah(\^?[⁻−-]?[\d⁰¹²³⁴-⁹]+)?(?![\p{L}\d])/gu;
+
 /** `mAh` is `mA h`, in a divisor with brackets: `g/Ah` is `g/(A h)`. Any other unit is answered as it was typed. */
 const shownUnit = (text: string): string =>
-  text.replace(
-    /(\/\s*|\bper\s+)?(?<!\p{L})([µukM]|m)?Ah(?!\p{L})/gu,
-    (_, over: string | undefined, prefix: string | undefined) => {
-      const product = `${prefix ?? ''}A h`;
-      return over === undefined ? product : `${over}(${product})`;
-    },
-  );
+  text.replace(AMPERE_HOUR, (_, over: string | undefined, prefix: string, power = '') => {
+    const product = `${prefix}A${power} h${power}`;
+    return over === undefined ? product : `${over}(${product})`;
+  });
 
 /** A concentration cannot be answered as a mass fraction: nothing says what the solution weighs afterwards. */
 const isFraction = (name: QuantityName, unit: UnitValue): boolean =>

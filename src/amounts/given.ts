@@ -179,6 +179,3 @@ export const convertGiven = (
   );
   return chain(converted, (values) => success([...recorded, ...values]));
 };
-
-/** True where the ask speaks of a tank: then `volume` is that of the tank and not of a gas. */
-export const speaksOfTank = (given: GivenTexts): boolean => given['from'] !== undefined || given['to'] !== undefined;

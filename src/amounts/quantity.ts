@@ -163,7 +163,7 @@ const readSpread = (measurand: Measurand, text: string, at: number, length: numb
 };
 
 /** A part of a whole as a fraction: 24/25. */
-const FRACTION = /^\s*\d{1,60}\/0*[1-9]\d{0,59}\s*$/u;
+const FRACTION = /^\s*-?\d{1,60}\/0*[1-9]\d{0,59}\s*$/u;
 
 const fractionOf = (text: string): Sum => {
   const exact = rationalFromText(text);

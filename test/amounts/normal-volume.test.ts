@@ -64,10 +64,21 @@ describe('units of an answer', () => {
     ['charge', 'mAh', 'mA h'],
     ['mass_per_charge', 'g/Ah', 'g/(A h)'],
     ['mass_per_charge', 'kg/(kAh)', 'kg/(kA h)'],
+    ['mass_per_charge', 'mg mAh^-1', 'mg mA^-1 h^-1'],
+    ['mass_per_charge', 'g per Ah', 'g per (A h)'],
     ['charge_per_mass', 'Ah/kg', 'A h/kg'],
+    ['charge_per_mass', 'mAh g^-1', 'mA h g^-1'],
     ['mass', 'lb', 'lb'],
     ['charge', 'coulombs', 'coulombs'],
   ])('%s in %s is answered in %s', (name, unit, shown) => {
     expect(answerOf(COPPER, 'Cu', { charge: '1 A h' }, { want: { [name]: unit } }).quantities[name]?.unit).toBe(shown);
+  });
+
+  it('are read back as what they were', () => {
+    for (const unit of ['mg mAh^-1', 'g/Ah', 'kg/(kAh)']) {
+      const shown = answerOf(COPPER, 'Cu', {}, { want: { mass_per_charge: unit } }).quantities['mass_per_charge'];
+      const again = answerOf(COPPER, 'Cu', {}, { want: { mass_per_charge: shown?.unit ?? '' } });
+      expect(again.quantities['mass_per_charge']).toEqual(shown);
+    }
   });
 });
