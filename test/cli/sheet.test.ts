@@ -165,7 +165,7 @@ describe('the README', () => {
 });
 
 describe('couplet schema', () => {
-  it.each(['sheet', 'asks', 'answers'])('prints the schema of %s as JSON', async (what) => {
+  it.each(['sheet', 'asks', 'answers', 'record'])('prints the schema of %s as JSON', async (what) => {
     const { code, out } = await couplet(['schema', what], {});
     expect(code).toBe(0);
     expect(JSON.parse(out)).toMatchObject({ $schema: 'https://json-schema.org/draft/2020-12/schema' });

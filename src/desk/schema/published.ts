@@ -1,10 +1,11 @@
 import * as z from 'zod';
 import { answerSchema } from './answer.ts';
 import { askSchema } from './ask.ts';
+import { recordReplySchema } from './record.ts';
 import { wholeSheetSchema } from './sheet.ts';
 
 /** The schemas that are published. */
-export const PUBLISHED = ['sheet', 'asks', 'answers'] as const;
+export const PUBLISHED = ['sheet', 'asks', 'answers', 'record'] as const;
 export type Published = (typeof PUBLISHED)[number];
 
 const DIALECT = 'https://json-schema.org/draft/2020-12/schema';
@@ -30,6 +31,7 @@ const asWritten = (node: Node): void => {
 const schemaOf = (which: Published): Node => {
   if (which === 'asks') return z.toJSONSchema(askSchema);
   if (which === 'answers') return z.toJSONSchema(answerSchema);
+  if (which === 'record') return z.toJSONSchema(recordReplySchema);
   return z.toJSONSchema(wholeSheetSchema, {
     override: ({ jsonSchema }) => {
       asWritten(jsonSchema);
@@ -41,9 +43,10 @@ const TITLES: Readonly<Record<Published, string>> = {
   sheet: 'A sheet of Couplet',
   asks: 'An ask of Couplet',
   answers: 'An answer of Couplet',
+  record: 'What a current record comes to, by Couplet',
 };
 
-/** JSON Schema (2020-12) of what the code itself checks against: a sheet as YAML or JSON, an ask, an answer. */
+/** JSON Schema (2020-12) of what the code itself checks against: a sheet as YAML or JSON, an ask, an answer, what a record comes to. */
 export const publishedSchema = (which: Published): object => {
   const schema = schemaOf(which);
   return { ...schema, $schema: DIALECT, title: TITLES[which] };
