@@ -175,4 +175,42 @@ describe('laws of the amounts', () => {
       { numRuns: 1500 },
     );
   });
+
+  it('answers nothing that cannot be: no negative time, area, efficiency or concentration, whatever is given', () => {
+    const value = fc.constantFrom('-3', '0', '0.5', '2', '40');
+    const units = {
+      charge: 'A h',
+      current: 'A',
+      current_density: 'A/dm^2',
+      area: 'dm^2',
+      time: 'h',
+      blank: 'A h',
+      mass: 'g',
+      volume: 'L',
+      from: 'g/L',
+      to: 'g/L',
+      voltage: 'V',
+      energy: 'kWh',
+      vapour_pressure: 'kPa',
+      pressure: 'kPa',
+    };
+    const names = Object.entries(units);
+    const given = fc
+      .uniqueArray(fc.tuple(fc.constantFrom(...names), value), { selector: ([[name]]) => name, maxLength: 5 })
+      .map((entries) => Object.fromEntries(entries.map(([[name, unit], number]) => [name, `${number} ${unit}`])));
+    const species = fc.constantFrom(['Cu^2+ + 2 e^- -> Cu', 'Cu^2+'], ['2 H^+ + 2 e^- -> H2(g)', 'H2'] as const);
+    fc.assert(
+      fc.property(species, given, ([reaction, asked], texts) => {
+        const result = amountsOf(reaction, asked, texts);
+        if (!result.ok) return result.fault.message !== '';
+        const codes = result.notes.map(({ code }) => code);
+        const { quantities } = result.value;
+        const never = ['time', 'area', 'efficiency', 'temperature', 'mass_per_charge', 'charge_per_mass'];
+        const stays = [...never, ...(codes.includes('below-zero') ? [] : ['from', 'to'])];
+        const turned = codes.includes('runs-backwards') ? [] : ['mass', 'amount', 'volume'];
+        return [...stays, ...turned].every((name) => (quantities[name]?.value ?? 0) >= 0);
+      }),
+      { numRuns: 400 },
+    );
+  });
 });
