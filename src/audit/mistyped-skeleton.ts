@@ -34,13 +34,7 @@ const isNearlySkeleton = (draft: Draft): boolean =>
   2 * draft.filter(({ coefficient }) => coefficient.equals(ONE)).length > draft.length;
 
 const looksMistyped = (draft: Draft, term: DraftTerm): boolean =>
-  isDoubtful(term.species) || standsOnBothSides(draft, term);
-
-/** In no table of common species; a radical is what it is. */
-const isDoubtful = (species: Species): boolean => {
-  const familiarity = familiarityOf(species);
-  return familiarity === 'rare' ? !isZero(species.charge) : familiarity !== 'common';
-};
+  familiarityOf(term.species) !== 'common' || standsOnBothSides(draft, term);
 
 /** True where a term stands on the other side too, unchanged: one of the two was meant otherwise. */
 export const standsOnBothSides = (draft: Draft, { species, side }: DraftTerm): boolean =>
@@ -50,9 +44,12 @@ const respelledAt = (draft: Draft, term: DraftTerm): readonly Draft[] => {
   if (isElectron(term.species)) return [];
   const isNew = (near: Species): boolean => !draft.some(({ species }) => sameContents(species, near));
   return nearSpecies(term.species)
-    .filter(isNew)
+    .filter((near) => isNew(near) && (!isRadical(term.species) || !near.charge.equals(term.species.charge)))
     .map((species) => draft.map((other) => (other === term ? { ...other, species } : other)));
 };
+
+/** A radical is what it is, or an ion whose charge was left out: OH for OH^-. */
+const isRadical = (species: Species): boolean => isZero(species.charge) && familiarityOf(species) === 'rare';
 
 const solvedAnew = (problem: Problem, draft: Draft): readonly Candidate[] => {
   const columns = columnsOf(draft.map(({ species }) => species));

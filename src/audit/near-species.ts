@@ -33,11 +33,13 @@ const search = (species: Species): readonly Species[] => {
   return [...inTables, ...salts].map((other) => ({ ...other, state: species.state }));
 };
 
-/** Of the same elements: the charge alone differs, or one letter or digit of the formula does. */
+/** Of the same elements: the charge alone differs, or one digit of the formula does, brackets aside. */
 const isOneSlipAway = (species: Species, other: Species): boolean => {
   if (!other.charge.equals(species.charge)) return sameContents({ ...other, charge: species.charge }, species);
-  return editDistance(other.formula, species.formula) <= 1;
+  return editDistance(unbracketed(other), unbracketed(species)) <= 1;
 };
+
+const unbracketed = ({ formula }: Species): string => formula.replaceAll(/[()]/gu, '');
 
 /**
  * The salts that the ions of a neutral formula make where their charges cancel:
@@ -72,11 +74,13 @@ const times = (ion: readonly Member[], count: bigint): readonly Member[] => {
 
 /**
  * True where a species is in no table and an everyday one is near: an ion nobody knows beside one that all know
- * (ClO3^2-), an ion without its charge (MnO4), or a salt whose charges do not cancel (NaSO4). Another neutral species that no table holds proves nothing else.
+ * (ClO3^2-), an ion without its charge (MnO4), a molecule of an element
+ * (Cu2), or a salt whose charges do not cancel (NaSO4). Another neutral species that no table holds proves nothing else.
  */
 export const isSuspect = (species: Species): boolean => {
   const familiarity = familiarityOf(species);
   if (familiarity === 'unlisted-ion') return nearSpecies(species).length > 0;
   if (familiarity !== 'unlisted') return false;
-  return isOddlyCharged(species) || saltsOfSameIons(species).length > 0;
+  const isElement = species.composition.size === 1 && nearSpecies(species).length > 0;
+  return isElement || isOddlyCharged(species) || saltsOfSameIons(species).length > 0;
 };
