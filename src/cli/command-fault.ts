@@ -11,12 +11,14 @@ const HINTS: readonly (readonly [said: RegExp, here: string])[] = [
   [/^Write \[\["0 s", .*$/, 'couplet record FILE finds the charge of a record: --given charge=...'],
 ];
 
-/** Where a share may stand behind a reaction. */
+/** Where a share may stand behind a reaction: at an electrode. */
 const SHARED = /^(?:cell\.)?(?:anode|cathode|electrode|half)\b/;
 
 const hintFor = ({ code, field = '', message, hint = '' }: Fault): string => {
-  if (code === 'unknown-character' && message.startsWith('@') && SHARED.test(field)) {
-    return 'A share stands behind the whole reaction: "Cu^2+ -> Cu @ 95 %".';
+  if (code === 'unknown-character' && message.startsWith('@')) {
+    return SHARED.test(field)
+      ? 'A share stands behind the whole reaction: "Cu^2+ -> Cu @ 95 %".'
+      : 'Shares (@ 95 %) are for couplet cell and couplet amounts.';
   }
   return HINTS.reduce((text, [said, here]) => text.replace(said, here), hint);
 };

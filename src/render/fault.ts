@@ -60,7 +60,10 @@ const particulars = (fault: Fault, look: Look): readonly string[] => {
   if (fault.code === 'several-balances') return waysOut(fault, look);
   if (fault.code === 'wrong-side') return list('as it would balance', one(fault.reaction), look);
   if (fault.code === 'no-electrons') return list('as it balances', one(fault.reaction), look);
-  return fault.code === 'not-enough-given' ? list('missing', [[fault.missing.join(', ')]], look) : [];
+  // The hint names them already where there is one.
+  return fault.code === 'not-enough-given' && fault.hint === undefined
+    ? list('missing', [[fault.missing.join(', ')]], look)
+    : [];
 };
 
 /** Where the ways out are listed, the hint that there are some says nothing more. */

@@ -3,12 +3,12 @@ import type { Quantity } from '../desk/schema/shape.ts';
 import { labelled } from './block.ts';
 import { figureOf, uncertaintyOf } from './figure.ts';
 import type { Look } from './look.ts';
-import { speciesText } from './spelling.ts';
+import { numberText, speciesText } from './spelling.ts';
 
 /** "+1.86532 mol" or "-0.5 mol": what is gained has its sign. */
-const gained = (quantity: Quantity): string => {
+const gained = (quantity: Quantity, look: Look): string => {
   const sign = quantity.value > 0 ? '+' : '';
-  return [`${sign}${figureOf(quantity)}`, uncertaintyOf(quantity), quantity.unit]
+  return [`${sign}${numberText(figureOf(quantity), look)}`, uncertaintyOf(quantity), quantity.unit]
     .filter((word) => word !== '')
     .join(' ');
 };
@@ -18,11 +18,14 @@ export const tankLines = (tank: TankBalanceShown | undefined, look: Look): reado
   if (tank === undefined) return [];
   const { acid, base, water } = tank;
   const rows: readonly string[] = [
-    ...(acid === undefined ? [] : [`${gained(acid)} of ${speciesText('H^+', look)}`]),
-    ...(base === undefined ? [] : [`${gained(base)} of ${speciesText('OH^-', look)}`]),
+    ...(acid === undefined ? [] : [`${gained(acid, look)} of ${speciesText('H^+', look)}`]),
+    ...(base === undefined ? [] : [`${gained(base, look)} of ${speciesText('OH^-', look)}`]),
     ...(water === undefined
       ? []
-      : [`${gained(water.amount)} of water: ${gained(water.mass)}, ${gained(water.volume)} at 25 °C`]),
+      : [
+          `${gained(water.amount, look)} of water`,
+          `that is ${gained(water.mass, look)}, ${gained(water.volume, look)} at 25 °C`,
+        ]),
   ];
   const shown = rows.length === 0 ? ['no acid, base or water is made or used up'] : rows;
   return labelled(

@@ -32,7 +32,10 @@ describe('couplet amounts', () => {
     const cell = ['amounts', '--anode', 'H2O -> O2', '--cathode', 'Cu^2+ -> Cu', '--species', 'Cu', '--tank'];
     const { out } = await couplet([...cell, '--given', 'charge=96485.33212 C']);
     expect(out).toMatch(/^ {2}tank {8}\+1 mol of H\^\+$/m);
-    expect(out).toMatch(/^ {14}-0\.5 mol of water: -9\.007\d+ .* g, -0\.00903\d+ .* L at 25 °C$/m);
+    expect(out).toMatch(/^ {14}-0\.5 mol of water\n {14}that is -9\.007\d+ .* g, -0\.00903\d+ .* L at 25 °C$/m);
+    const long = await couplet([...cell, '--given', 'charge=1 kA h'], { terminal: true });
+    expect(long.out).toMatch(/^ {14}−18\.6\d+ mol of water\n {14}that is −336\./m);
+    expect(long.out.split('\n').filter((line) => line.length > 80)).toEqual([]);
   });
 
   it('takes cells in series, a coulometer among them', async () => {

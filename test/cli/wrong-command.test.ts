@@ -56,6 +56,7 @@ describe('a hint', () => {
     [['half', 'H^+ + OH^- -> H2'], '--medium acid, base or neutral'],
     [['amounts', '--half', 'Cu^2+ -> Cu', '--species', 'Cu', '--given', 'record=a.csv'], 'couplet record FILE'],
     [['cell', '--anode', 'Cu@95% -> Cu^2+', '--cathode', 'Ag^+ -> Ag'], '"Cu^2+ -> Cu @ 95 %"'],
+    [['half', 'Cu^2+ -> Cu @ 95 %'], 'couplet cell and couplet amounts'],
   ])('speaks of options, not of JSON: %j', async (argv, said) => {
     const { code, err } = await couplet(argv);
     expect(code).toBe(1);
