@@ -18,8 +18,8 @@ const AFTER = `${examples(
   'couplet sheet fixtures/tern-quay.yaml',
 )}
 Charges are written with a caret: Cu^2+, SO4^2-; the electron is e^-.
-Exit codes: 0 answered; 1 a fault, or an audit that is unbalanced; 2 the
-command itself was wrong.
+Exit codes: 0 answered; 1 a fault, or an audit that is unbalanced or found
+nothing to audit; 2 the command itself was wrong.
 couplet COMMAND --help shows the options and examples of a command.
 `;
 

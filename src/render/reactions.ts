@@ -65,10 +65,13 @@ export const redoxBlocks = (answer: RedoxAnswer, look: Look): Blocks => {
   ];
 };
 
+/** What crosses the separator; charge that ions without a part carry has a line more. */
 const crossingRows = (answer: CellAnswer, look: Look): readonly (readonly [string, string])[] =>
-  (answer.crossing ?? []).map(({ species, amount, from, to }, at) => {
-    const who = species === null ? 'positive charge of ions that take no part' : speciesText(species, look);
-    return [at === 0 ? 'crossing' : '', `${amount} ${who} per electron, ${from} to ${to}`];
+  (answer.crossing ?? []).flatMap(({ species, amount, from, to }, at): readonly (readonly [string, string])[] => {
+    const label = at === 0 ? 'crossing' : '';
+    const who = species === null ? 'positive charge' : speciesText(species, look);
+    const row = [label, `${amount} ${who} per electron, ${from} to ${to}`] as const;
+    return species === null ? [row, ['', 'carried by ions that take no part']] : [row];
   });
 
 /** A cell: overall reaction, electron number, the electrodes, what was struck out. */

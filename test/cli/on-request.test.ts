@@ -133,6 +133,7 @@ describe('a page in colour', () => {
     ['half', 'MnO4^- -> Mn^2+'],
     ['table', 'Cl^- -> Cl2', 'H2O -> H2', '--medium', 'neutral'],
     ['audit', 'H2 + O2 -> H2O', '--contributions'],
+    ['cell', '--anode', 'Cl^- -> Cl2', '--cathode', 'H2O -> H2', '--cathode-medium', 'base', '--separator'],
     ['amounts', '--half', '2 Cl^- -> Cl2(g) + 2 e^-', '--species', 'Cl2', '--given', 'charge=1.00(1) A h', '--budget'],
   ];
 
