@@ -73,8 +73,17 @@ export const familiarityOf = (species: Species): Familiarity => {
   return isSalt(species) ? 'salt' : 'unlisted';
 };
 
+/** Found once for each species: a pure function of it, kept as long as it lives. */
+const salts = new WeakMap<Species, boolean>();
+
 /** True for ions whose charges cancel in the lowest ratio: Na2SO4, not H2Cl2. */
 const isSalt = (species: Species): boolean => {
+  const known = salts.get(species) ?? hasIonsInLowestRatio(species);
+  salts.set(species, known);
+  return known;
+};
+
+const hasIonsInLowestRatio = (species: Species): boolean => {
   const ions = ionsOfSalt(species);
   return ions !== null && gcdOf(ions.map(({ count }) => numeratorOf(count))) === 1n;
 };

@@ -11,6 +11,9 @@ const RATIOS = [1n, 2n, 3n]
   .flatMap((first) => [1n, 2n, 3n, 4n].map((second) => [first, second] as const))
   .filter((ratio) => gcdOf(ratio) === 1n);
 
+/** A formula with more members is no salt of two ions that a slip would hide: the work stays bounded. */
+const MOST_MEMBERS = 10;
+
 /** Found once for each species: a pure function of it, kept as long as it lives. */
 const found = new WeakMap<Species, readonly Species[]>();
 
@@ -48,7 +51,8 @@ const unbracketed = ({ formula }: Species): string => formula.replaceAll(/[()]/g
  */
 const saltsOfSameIons = (species: Species): readonly Species[] => {
   const [part, ...adducts] = species.parts;
-  if (part === undefined || adducts.length > 0 || !isZero(species.charge)) return [];
+  if (part === undefined || adducts.length > 0 || !isZero(species.charge) || part.members.length > MOST_MEMBERS)
+    return [];
   return part.members.slice(1).flatMap((_, index) => {
     const [first, second] = [part.members.slice(0, index + 1), part.members.slice(index + 1)];
     return RATIOS.map(([a, b]) =>
