@@ -24,9 +24,7 @@ describe('the scale of a reaction', () => {
   });
 
   it('is one electron on request', () => {
-    expect(shown(perElectron(reactionOf('O2 + 4 H^+ + 4 e^- -> 2 H2O')))).toBe(
-      '1/4 O2 + H^+ + e^- -> 1/2 H2O',
-    );
+    expect(shown(perElectron(reactionOf('O2 + 4 H^+ + 4 e^- -> 2 H2O')))).toBe('1/4 O2 + H^+ + e^- -> 1/2 H2O');
     expect(shown(perElectron(reactionOf('2 CrO4^2- + 2 H^+ -> Cr2O7^2- + H2O')))).toBe('none');
   });
 

@@ -71,7 +71,10 @@ describe('certificates in words', () => {
   });
 
   it('say who is oxidised only where electrons are no unknown', () => {
-    const weights = [['Fe', -2n], ['charge', 1n]] as const;
+    const weights = [
+      ['Fe', -2n],
+      ['charge', 1n],
+    ] as const;
     expect(words(weights, 'Fe^2+ -> Fe^3+')).toBe('the only reactant is oxidised: no electrons are accepted');
     expect(words(weights, 'Fe^2+ -> Fe^3+', true)).toBe(
       'counted as 2 Fe - charge, the left exceeds the right in any amounts',
@@ -94,7 +97,9 @@ describe('families', () => {
 
   it('too large to list are refused with the limit', () => {
     const side = (charge: string): string =>
-      Array.from({ length: 80 }, (_, index) => `C${String(index + 1)}H${String((index + 1) ** 2)}O${charge}`).join(' + ');
+      Array.from({ length: 80 }, (_, index) => `C${String(index + 1)}H${String((index + 1) ** 2)}O${charge}`).join(
+        ' + ',
+      );
     const many = unknowns(`${side('')} -> ${side('2')}`);
     expect(minimalBalances(many)).toMatchObject({ kind: 'too-hard' });
   });
