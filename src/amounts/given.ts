@@ -6,7 +6,7 @@ import { AMOUNT, DENSITY, MOLAR_CONCENTRATION, sameDimension } from './dimension
 import { type Measured, measuredFrom, over, times } from './measured.ts';
 import { QUANTITIES, QUANTITY_NAMES, type QuantityKind, type QuantityName, isQuantityName } from './quantities.ts';
 import { type ReadQuantity, readQuantity } from './quantity.ts';
-import { type RecordText, readRecord } from './record.ts';
+import { type RecordText, readRecord } from './record/record.ts';
 import type { VariableName } from './relations.ts';
 
 /** What an ask gives: quantity texts by name, and a list of pairs for `record`. */

@@ -1,5 +1,5 @@
-import type { RecordOptions } from '../amounts/record-options.ts';
-import { readRecordStream } from '../amounts/record-stream.ts';
+import type { RecordOptions } from '../amounts/record/options.ts';
+import { readRecordStream } from '../amounts/record/stream.ts';
 import { renderFault } from '../render/fault.ts';
 import { renderRecord } from '../render/record.ts';
 import { lookFor } from './look.ts';

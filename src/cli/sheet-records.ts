@@ -1,7 +1,7 @@
 import { dirname, isAbsolute, join } from 'node:path';
-import { readRecordStream } from '../amounts/record-stream.ts';
-import type { RecordSummary } from '../amounts/record-summary.ts';
-import type { NamedRecord, Records } from '../desk/sheet-record.ts';
+import { readRecordStream } from '../amounts/record/stream.ts';
+import type { RecordSummary } from '../amounts/record/summary.ts';
+import type { NamedRecord, Records } from '../desk/sheet/record.ts';
 import { type Result, failure } from '../report/result.ts';
 import { textBytes } from './text-file.ts';
 import { UnreadableFile, type World } from './world.ts';

@@ -1,14 +1,21 @@
 import { CONTRACT } from '../desk/envelope.ts';
-import { answerReadSheet, readSheet } from '../desk/sheet.ts';
-import type { SheetAnswer, SheetFault, TankAnswer } from '../desk/sheet-answer.ts';
+import { answerReadSheet, readSheet } from '../desk/sheet/sheet.ts';
+import type { SheetAnswer, SheetFault, TankAnswer } from '../desk/sheet/answer.ts';
 import type { Fault } from '../report/fault.ts';
 import { printable } from '../report/excerpt.ts';
 import { renderFault } from '../render/fault.ts';
 import type { Look } from '../render/look.ts';
-import { reportHtml } from '../render/report-html.ts';
-import { renderCautions, renderFoot, renderHead, renderTank, renderTotals, renderUnanswered } from '../render/sheet.ts';
-import { sheetCsv } from '../render/sheet-csv.ts';
-import { sheetMarkdown } from '../render/sheet-markdown.ts';
+import { reportHtml } from '../render/report/html.ts';
+import {
+  renderCautions,
+  renderFoot,
+  renderHead,
+  renderTank,
+  renderTotals,
+  renderUnanswered,
+} from '../render/sheet/sheet.ts';
+import { sheetCsv } from '../render/sheet/csv.ts';
+import { sheetMarkdown } from '../render/sheet/markdown.ts';
 import { lookFor } from './look.ts';
 import type { Showing } from './outcome.ts';
 import { readRecords } from './sheet-records.ts';

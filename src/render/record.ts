@@ -1,5 +1,5 @@
-import type { RecordSummary } from '../amounts/record-summary.ts';
-import type { BadRowReason, CountedRows } from '../amounts/record-tally.ts';
+import type { RecordSummary } from '../amounts/record/summary.ts';
+import type { BadRowReason, CountedRows } from '../amounts/record/tally.ts';
 import { hanging, labelled, page } from './block.ts';
 import { type Cell, columns, indented } from './columns.ts';
 import { figureOf, quantityText } from './figure.ts';

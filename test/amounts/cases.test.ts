@@ -1,7 +1,7 @@
 import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import type { GivenTexts } from '../../src/amounts/given.ts';
-import type { RecordText } from '../../src/amounts/record.ts';
+import type { RecordText } from '../../src/amounts/record/record.ts';
 import { amountsOf, circuitOf } from './circuit.ts';
 
 const lines = readFileSync(new URL('../../fixtures/amounts/cases.tsv', import.meta.url), 'utf8')

@@ -1,12 +1,12 @@
 import { readFileSync } from 'node:fs';
 import { describe, expect, test } from 'vitest';
 import { parse } from 'yaml';
-import type { RecordOptions } from '../../src/amounts/record-options.ts';
-import { openRecord } from '../../src/amounts/record-reader.ts';
-import { MOST_STRETCHES } from '../../src/amounts/record-series.ts';
-import { readRecordStream } from '../../src/amounts/record-stream.ts';
-import type { RecordSummary } from '../../src/amounts/record-summary.ts';
-import { LINES_KEPT } from '../../src/amounts/record-tally.ts';
+import type { RecordOptions } from '../../src/amounts/record/options.ts';
+import { openRecord } from '../../src/amounts/record/reader.ts';
+import { MOST_STRETCHES } from '../../src/amounts/record/series.ts';
+import { readRecordStream } from '../../src/amounts/record/stream.ts';
+import type { RecordSummary } from '../../src/amounts/record/summary.ts';
+import { LINES_KEPT } from '../../src/amounts/record/tally.ts';
 import type { Result } from '../../src/report/result.ts';
 
 interface Read {

@@ -1,7 +1,7 @@
 import { bench, describe } from 'vitest';
 import { QUANTITIES } from '../../src/amounts/quantities.ts';
 import { readQuantity } from '../../src/amounts/quantity.ts';
-import { readRecord } from '../../src/amounts/record.ts';
+import { readRecord } from '../../src/amounts/record/record.ts';
 import { amountsOf, electrodeCircuit } from '../amounts/circuit.ts';
 
 describe('amounts', () => {

@@ -1,6 +1,6 @@
 import process from 'node:process';
 import { bench, describe } from 'vitest';
-import { readRecordStream } from '../../src/amounts/record-stream.ts';
+import { readRecordStream } from '../../src/amounts/record/stream.ts';
 import { madeUpRecord } from './record-rows.ts';
 
 const ROWS = 10_000_000;

@@ -2,7 +2,7 @@ import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { parse } from 'yaml';
 import * as z from 'zod';
-import { openRecord } from '../../src/amounts/record-reader.ts';
+import { openRecord } from '../../src/amounts/record/reader.ts';
 import { answer } from '../../src/desk/answer.ts';
 import { type Published, publishedSchema } from '../../src/desk/schema/published.ts';
 import { runSchema, targetSchema } from '../../src/desk/schema/sheet.ts';

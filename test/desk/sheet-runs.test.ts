@@ -1,10 +1,10 @@
 import { describe, expect, it } from 'vitest';
-import { openRecord } from '../../src/amounts/record-reader.ts';
-import { readClock, clockText, minutesBetween, type Clock } from '../../src/desk/sheet-clock.ts';
-import { readGoal } from '../../src/desk/sheet-goal.ts';
-import type { SheetAnswer, WholeRun, WholeTank, WholeTarget } from '../../src/desk/sheet-answer.ts';
-import { namedRecord, type Records } from '../../src/desk/sheet-record.ts';
-import { answerReadSheet, answerSheet, readSheet } from '../../src/desk/sheet.ts';
+import { openRecord } from '../../src/amounts/record/reader.ts';
+import { readClock, clockText, minutesBetween, type Clock } from '../../src/desk/sheet/clock.ts';
+import { readGoal } from '../../src/desk/sheet/goal.ts';
+import type { SheetAnswer, WholeRun, WholeTank, WholeTarget } from '../../src/desk/sheet/answer.ts';
+import { namedRecord, type Records } from '../../src/desk/sheet/record.ts';
+import { answerReadSheet, answerSheet, readSheet } from '../../src/desk/sheet/sheet.ts';
 
 const FARADAY = 96_485.33212;
 const COPPER = 63.546;

@@ -2,10 +2,10 @@ import { spawnSync } from 'node:child_process';
 import { createHash } from 'node:crypto';
 import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
-import { openRecord } from '../../src/amounts/record-reader.ts';
-import { answerReadSheet, answerSheet, readSheet } from '../../src/desk/sheet.ts';
-import type { SheetAnswer } from '../../src/desk/sheet-answer.ts';
-import { LONGEST_SHEET } from '../../src/desk/sheet-text.ts';
+import { openRecord } from '../../src/amounts/record/reader.ts';
+import { answerReadSheet, answerSheet, readSheet } from '../../src/desk/sheet/sheet.ts';
+import type { SheetAnswer } from '../../src/desk/sheet/answer.ts';
+import { LONGEST_SHEET } from '../../src/desk/sheet/text.ts';
 import type { Fault } from '../../src/report/fault.ts';
 
 const QUAY = readFileSync('fixtures/tern-quay.yaml', 'utf8');

@@ -1,8 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { type Integral, type IntegralRules, integrateRecord } from '../../src/amounts/record-integral.ts';
-import { openRecord } from '../../src/amounts/record-reader.ts';
-import { readRecordStream } from '../../src/amounts/record-stream.ts';
+import { type Integral, type IntegralRules, integrateRecord } from '../../src/amounts/record/integral.ts';
+import { openRecord } from '../../src/amounts/record/reader.ts';
+import { readRecordStream } from '../../src/amounts/record/stream.ts';
 
 /** Readings in whole milliseconds and whole milliamperes, in order of time: they can be integrated exactly. */
 const readings = fc

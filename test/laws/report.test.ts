@@ -1,10 +1,10 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { answerSheet } from '../../src/desk/sheet.ts';
-import { renderHead, renderTank } from '../../src/render/sheet.ts';
+import { answerSheet } from '../../src/desk/sheet/sheet.ts';
+import { renderHead, renderTank } from '../../src/render/sheet/sheet.ts';
 import { PLAIN_LOOK } from '../../src/render/look.ts';
-import { reportHtml } from '../../src/render/report-html.ts';
-import { sheetCsv } from '../../src/render/sheet-csv.ts';
+import { reportHtml } from '../../src/render/report/html.ts';
+import { sheetCsv } from '../../src/render/sheet/csv.ts';
 import { activeParts, markupProblem } from '../support/markup.ts';
 
 /** Names as nobody would write them: any code points, and pieces of markup. */

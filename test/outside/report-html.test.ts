@@ -1,8 +1,8 @@
 import { spawnSync } from 'node:child_process';
 import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
-import { answerSheet } from '../../src/desk/sheet.ts';
-import { reportHtml } from '../../src/render/report-html.ts';
+import { answerSheet } from '../../src/desk/sheet/sheet.ts';
+import { reportHtml } from '../../src/render/report/html.ts';
 
 /** HTML Tidy of the HTACG, where the machine has it: its own reading of what HTML allows. */
 const tidy = (page: string): { readonly status: number | null; readonly said: string } => {

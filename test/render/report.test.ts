@@ -1,12 +1,12 @@
 import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
-import { openRecord } from '../../src/amounts/record-reader.ts';
-import type { SheetAnswer } from '../../src/desk/sheet-answer.ts';
-import type { Records } from '../../src/desk/sheet-record.ts';
-import { answerReadSheet, readSheet } from '../../src/desk/sheet.ts';
-import { reportHtml } from '../../src/render/report-html.ts';
-import { sheetCsv } from '../../src/render/sheet-csv.ts';
-import { sheetMarkdown } from '../../src/render/sheet-markdown.ts';
+import { openRecord } from '../../src/amounts/record/reader.ts';
+import type { SheetAnswer } from '../../src/desk/sheet/answer.ts';
+import type { Records } from '../../src/desk/sheet/record.ts';
+import { answerReadSheet, readSheet } from '../../src/desk/sheet/sheet.ts';
+import { reportHtml } from '../../src/render/report/html.ts';
+import { sheetCsv } from '../../src/render/sheet/csv.ts';
+import { sheetMarkdown } from '../../src/render/sheet/markdown.ts';
 import { activeParts, markupProblem } from '../support/markup.ts';
 
 const QUAY = readFileSync('fixtures/tern-quay.yaml', 'utf8');

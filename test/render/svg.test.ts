@@ -1,10 +1,10 @@
 import { describe, expect, it } from 'vitest';
-import type { TraceStretch } from '../../src/desk/sheet-answer.ts';
+import type { TraceStretch } from '../../src/desk/sheet/answer.ts';
 import { escaped, formulaHtml, formulaParts } from '../../src/render/markup.ts';
-import { bandText, electrodeBand, shareText } from '../../src/render/svg-band.ts';
-import { recordChart } from '../../src/render/svg-chart.ts';
-import { element } from '../../src/render/svg-element.ts';
-import { scaleOver, timeScale, timeUnit } from '../../src/render/svg-scale.ts';
+import { bandText, electrodeBand, shareText } from '../../src/render/svg/band.ts';
+import { recordChart } from '../../src/render/svg/chart.ts';
+import { element } from '../../src/render/svg/element.ts';
+import { scaleOver, timeScale, timeUnit } from '../../src/render/svg/scale.ts';
 
 describe('a scale', () => {
   it.each([

@@ -1,6 +1,6 @@
 import * as z from 'zod';
-import type { RecordSummary } from '../../amounts/record-summary.ts';
-import type { BadRowReason } from '../../amounts/record-tally.ts';
+import type { RecordSummary } from '../../amounts/record/summary.ts';
+import type { BadRowReason } from '../../amounts/record/tally.ts';
 import { faultSchema } from './fault.ts';
 import { quantitySchema } from './shape.ts';
 
