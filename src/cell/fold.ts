@@ -1,12 +1,9 @@
-import { type Rational, ONE, ZERO, signOf } from '../exact/rational.ts';
-import { type Species, countAtoms } from '../species/species.ts';
+import { type Rational, ZERO, signOf } from '../exact/rational.ts';
+import { WATER } from '../redox/media.ts';
+import type { Species } from '../species/species.ts';
 
 /** Water in the state given; what H^+ and OH^- fold into. */
-export const waterIn = (state: string | null): Species => {
-  const atom = (symbol: string, count: Rational) => ({ kind: 'atom', symbol, massNumber: null, count }) as const;
-  const parts = [{ multiplier: ONE, members: [atom('H', ONE.add(ONE)), atom('O', ONE)] }];
-  return { formula: 'H2O', parts, composition: countAtoms(parts), charge: ZERO, state, key: 'H2O' };
-};
+export const waterIn = (state: string | null): Species => ({ ...WATER, state });
 
 /** Amounts of species, positive on the right. `water` is how much H^+ and OH^- became, never negative. */
 export interface Folded {
